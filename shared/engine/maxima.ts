@@ -1,0 +1,92 @@
+/** A function sampled over rising u with its exact value and slope, and the same function anywhere between. */
+export interface Sampled {
+  u: ArrayLike<number>;
+  value: ArrayLike<number>;
+  slope: ArrayLike<number>;
+  /** Value and slope at any u in between. */
+  at: (u: number) => { value: number; slope: number };
+}
+
+export interface Maximum {
+  u: number;
+  value: number;
+  /** The first or last sample, where the function falls off into the interval. */
+  edge: 'low' | 'high' | null;
+}
+
+/** Below this rise over the neighbouring valley (nepers) a bump is rounding noise on a plateau, not a peak. */
+const PROMINENCE = 1e-9;
+
+/**
+ * All local maxima, both edges included where the function falls away from them. Between two samples a maximum lies
+ * where the slope goes from + to −; it is found by bisection on the slope, so its place is good to about 1e-13 in u
+ * and its value to rounding. A flat top counts once; a falling plateau does not count. Values may be −Infinity nowhere.
+ */
+export function localMaxima(samples: Sampled): Maximum[] {
+  const n = samples.u.length;
+  const found: Maximum[] = [];
+  if (n === 0) return found;
+  if (n === 1) return [{ u: samples.u[0], value: samples.value[0], edge: 'low' }];
+  if (samples.slope[0] <= 0) found.push({ u: samples.u[0], value: samples.value[0], edge: 'low' });
+  for (let i = 0; i + 1 < n; i++) {
+    const a = samples.slope[i];
+    const b = samples.slope[i + 1];
+    if (a > 0 && b <= 0) found.push(bisect(samples, samples.u[i], samples.u[i + 1]));
+    // A kink (a table's or a mask's corner): the slope jumps at the sample itself.
+    else if (a <= 0 && b <= 0 && i > 0 && isKink(samples, i)) {
+      found.push({ u: samples.u[i], value: samples.value[i], edge: null });
+    }
+  }
+  if (samples.slope[n - 1] > 0) found.push({ u: samples.u[n - 1], value: samples.value[n - 1], edge: 'high' });
+  return found.filter((peak, k) => isProminent(samples, found, peak, k));
+}
+
+/** The sample stands above both neighbours though no slope told so (one-sided slopes at a corner). */
+function isKink(s: Sampled, i: number): boolean {
+  return s.value[i] > s.value[i - 1] && s.value[i] > s.value[i + 1];
+}
+
+function bisect(samples: Sampled, low: number, high: number): Maximum {
+  let a = low;
+  let b = high;
+  let best = { u: a, value: Number.NEGATIVE_INFINITY };
+  for (let k = 0; k < 60 && b - a > 1e-14 * Math.max(1, Math.abs(a)); k++) {
+    const u = 0.5 * (a + b);
+    const { value, slope } = samples.at(u);
+    if (value > best.value) best = { u, value };
+    if (slope > 0) a = u;
+    else b = u;
+  }
+  const end = samples.at(a);
+  return end.value > best.value ? { u: a, value: end.value, edge: null } : { ...best, edge: null };
+}
+
+/** A peak must rise above the lowest sample between it and its neighbours on both sides (edges: on one). */
+function isProminent(samples: Sampled, all: Maximum[], peak: Maximum, k: number): boolean {
+  const from = k > 0 ? all[k - 1].u : Number.NEGATIVE_INFINITY;
+  const to = k + 1 < all.length ? all[k + 1].u : Number.POSITIVE_INFINITY;
+  const left = valley(samples, from, peak.u);
+  const right = valley(samples, peak.u, to);
+  const rises = (low: number) => peak.value - low > PROMINENCE;
+  if (peak.edge === 'low') return rises(right);
+  if (peak.edge === 'high') return rises(left);
+  return rises(left) && rises(right);
+}
+
+function valley(samples: Sampled, from: number, to: number): number {
+  let low = Number.POSITIVE_INFINITY;
+  let i = lowerBound(samples.u, from);
+  for (; i < samples.u.length && samples.u[i] <= to; i++) low = Math.min(low, samples.value[i]);
+  return low;
+}
+
+function lowerBound(u: ArrayLike<number>, value: number): number {
+  let lo = 0;
+  let hi = u.length;
+  while (lo < hi) {
+    const mid = (lo + hi) >> 1;
+    if (u[mid] < value) lo = mid + 1;
+    else hi = mid;
+  }
+  return lo;
+}

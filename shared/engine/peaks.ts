@@ -1,0 +1,76 @@
+import { branchAdmittance } from './branch';
+import { type Curve, type CurveOptions, sweepCurve } from './curve';
+import { localMaxima } from './maxima';
+import { type CompiledRail, nodeAdmittance, railImpedance, scratch } from './rail';
+
+/** A local maximum of |Z|. */
+export interface Peak {
+  frequency_Hz: number;
+  impedance_ohm: number;
+  /** Set when it is not a resonance but the end of the span, where |Z| rises outwards. */
+  edge: 'low' | 'high' | null;
+  /** The members of the node that make it (index into `CompiledRail.members`); null at an edge without a partner. */
+  inductive: number | null;
+  capacitive: number | null;
+  /** Q = ω·|dB/dω| / (2G) of the node, from Y = G + jB at the peak; null at an edge. */
+  q: number | null;
+}
+
+/** Value and slope of ln|Z| over u = ln f, for the refinement of extrema. */
+export function logImpedance(rail: CompiledRail): (u: number) => { value: number; slope: number } {
+  const out = scratch();
+  return (u) => {
+    railImpedance(rail, Math.exp(u), out);
+    const m2 = out[0] * out[0] + out[1] * out[1];
+    return { value: 0.5 * Math.log(m2), slope: (out[0] * out[2] + out[1] * out[3]) / m2 };
+  };
+}
+
+/**
+ * All peaks of |Z| over [low_Hz, high_Hz], by rising frequency. Frequencies are good to 1e-9 and heights to 1e-12
+ * relative (well inside the 1e-6 and 1e-9 promised). The two lines that make a peak are the ones that carry the
+ * largest inductive and the largest capacitive current there.
+ */
+export function findPeaks(rail: CompiledRail, low_Hz: number, high_Hz: number, options?: CurveOptions): Peak[] {
+  return peaksOfCurve(rail, sweepCurve(rail, low_Hz, high_Hz, options));
+}
+
+/** As `findPeaks`, from a sweep that is already there. */
+export function peaksOfCurve(rail: CompiledRail, curve: Curve): Peak[] {
+  const at = logImpedance(rail);
+  const u = curve.frequency_Hz.map(Math.log);
+  const n = u.length;
+  return localMaxima({ u, value: curve.logMagnitude, slope: curve.slope, at }).map(({ u: place, edge }) => {
+    const end = edge === 'low' ? curve.frequency_Hz[0] : edge === 'high' ? curve.frequency_Hz[n - 1] : Math.exp(place);
+    return { ...describe(rail, end, edge !== null), edge };
+  });
+}
+
+function describe(rail: CompiledRail, frequency_Hz: number, isEdge: boolean): Omit<Peak, 'edge'> {
+  const out = scratch();
+  railImpedance(rail, frequency_Hz, out);
+  const impedance_ohm = Math.hypot(out[0], out[1]);
+  let inductive: number | null = null;
+  let capacitive: number | null = null;
+  let mostInductive = 0;
+  let mostCapacitive = 0;
+  rail.members.forEach((member, index) => {
+    if (member.count === 0) return;
+    branchAdmittance(member.branch, frequency_Hz, out);
+    const b = member.count * out[1];
+    if (b < mostInductive) {
+      mostInductive = b;
+      inductive = index;
+    }
+    if (b > mostCapacitive) {
+      mostCapacitive = b;
+      capacitive = index;
+    }
+  });
+  let q: number | null = null;
+  if (!isEdge) {
+    nodeAdmittance(rail, frequency_Hz, out);
+    q = out[0] > 0 ? Math.abs(out[3]) / (2 * out[0]) : Number.POSITIVE_INFINITY;
+  }
+  return { frequency_Hz, impedance_ohm, inductive, capacitive, q };
+}
