@@ -35,7 +35,10 @@ export function sourceBranch(source: SourceModel, field = 'source'): Branch | nu
       const r = finite(source.resistance_ohm, `${field}.resistance_ohm`, 'resistance');
       const l = finite(source.inductance_H, `${field}.inductance_H`, 'inductance');
       if (r === 0 && l === 0)
-        throw new EngineError(field, 'resistance and inductance are both zero: an ideal source holds any target');
+        throw new EngineError(
+          field,
+          'resistance and inductance are both zero: an ideal source holds any target',
+        );
       return { kind: 'series', r, l, d: 0 };
     }
     case 'damped': {
@@ -64,7 +67,11 @@ export function lineBranch(line: LineModel, field: string): Branch {
     const l = finite(line.added_inductance_H ?? 0, `${field}.added_inductance_H`, 'inductance');
     return { kind: 'table', table: prepareTable(line.table, `${field}.table`), l };
   }
-  const branch = { resistance_ohm: line.esr_ohm, inductance_H: line.inductance_H, capacitance_F: line.capacitance_F };
+  const branch = {
+    resistance_ohm: line.esr_ohm,
+    inductance_H: line.inductance_H,
+    capacitance_F: line.capacitance_F,
+  };
   finite(line.esr_ohm, `${field}.esr_ohm`, 'ESR');
   if (!Number.isFinite(line.capacitance_F))
     throw new EngineError(`${field}.capacitance_F`, 'capacitance must be a finite number');
@@ -102,7 +109,12 @@ export function selfResonance_Hz(branch: Branch): number | null {
  * Admittance of a branch at `frequency_Hz`: `out[0] + j·out[1]` in siemens, and its derivative by ln f in
  * `out[2] + j·out[3]` (dY/du = −Y²·dZ/du). Throws EngineError where the impedance is exactly zero.
  */
-export function branchAdmittance(branch: Branch, frequency_Hz: number, out: Float64Array, field = 'network'): void {
+export function branchAdmittance(
+  branch: Branch,
+  frequency_Hz: number,
+  out: Float64Array,
+  field = 'network',
+): void {
   const omega = 2 * Math.PI * frequency_Hz;
   let zr: number;
   let zi: number;

@@ -28,9 +28,16 @@ const MAX_DEPTH = 24;
  * The skirts of a resonance fall like 1/δ and are never cubic, so a narrow peak is found from afar.
  * Throws EngineError for an empty or not finite band.
  */
-export function sweepCurve(rail: CompiledRail, low_Hz: number, high_Hz: number, options: CurveOptions = {}): Curve {
-  if (!(low_Hz > 0) || !Number.isFinite(high_Hz)) throw new EngineError('band_Hz', 'the band must lie above 0 Hz');
-  if (!(high_Hz > low_Hz)) throw new EngineError('band_Hz', 'the band is empty: its end must lie above its start');
+export function sweepCurve(
+  rail: CompiledRail,
+  low_Hz: number,
+  high_Hz: number,
+  options: CurveOptions = {},
+): Curve {
+  if (!(low_Hz > 0) || !Number.isFinite(high_Hz))
+    throw new EngineError('band_Hz', 'the band must lie above 0 Hz');
+  if (!(high_Hz > low_Hz))
+    throw new EngineError('band_Hz', 'the band is empty: its end must lie above its start');
   const tolerance = options.tolerance_Np ?? 5e-4;
   const out = scratch();
   const points: number[][] = [];
@@ -63,7 +70,13 @@ export function sweepCurve(rail: CompiledRail, low_Hz: number, high_Hz: number, 
     previous = next;
   }
   const column = (k: number) => Float64Array.from(points, (p) => p[k]);
-  return { frequency_Hz: column(1), re_ohm: column(2), im_ohm: column(3), logMagnitude: column(4), slope: column(5) };
+  return {
+    frequency_Hz: column(1),
+    re_ohm: column(2),
+    im_ohm: column(3),
+    logMagnitude: column(4),
+    slope: column(5),
+  };
 }
 
 /** Both ends slope one way and the middle the other: two extrema hide between the ends. */

@@ -26,7 +26,11 @@ export function holds(tightest: Tightest): boolean {
  * The tightest frequency over the band: exact at the refined maxima of |Z|/Z_t, the band's edges and the mask's
  * corners, not only at grid points. Throws EngineError for an empty band.
  */
-export function tightestHeadroom(rail: CompiledRail, band_Hz: readonly [number, number], target: TargetMask): Tightest {
+export function tightestHeadroom(
+  rail: CompiledRail,
+  band_Hz: readonly [number, number],
+  target: TargetMask,
+): Tightest {
   return surfaceMaxima(rail, band_Hz, target).reduce((worst, next) =>
     next.headroom_dB < worst.headroom_dB ? next : worst,
   );
@@ -75,5 +79,10 @@ export function tightnessAt(rail: CompiledRail, target: TargetMask, frequency_Hz
   railImpedance(rail, frequency_Hz, out);
   const impedance_ohm = Math.hypot(out[0], out[1]);
   const target_ohm = targetAt(target, frequency_Hz);
-  return { frequency_Hz, impedance_ohm, target_ohm, headroom_dB: 20 * Math.log10(target_ohm / impedance_ohm) };
+  return {
+    frequency_Hz,
+    impedance_ohm,
+    target_ohm,
+    headroom_dB: 20 * Math.log10(target_ohm / impedance_ohm),
+  };
 }

@@ -37,7 +37,8 @@ export function localMaxima(samples: Sampled): Maximum[] {
       found.push({ u: samples.u[i], value: samples.value[i], edge: null });
     }
   }
-  if (samples.slope[n - 1] > 0) found.push({ u: samples.u[n - 1], value: samples.value[n - 1], edge: 'high' });
+  if (samples.slope[n - 1] > 0)
+    found.push({ u: samples.u[n - 1], value: samples.value[n - 1], edge: 'high' });
   return found.filter((peak, k) => isProminent(samples, found, peak, k));
 }
 

@@ -31,7 +31,12 @@ export function logImpedance(rail: CompiledRail): (u: number) => { value: number
  * relative (well inside the 1e-6 and 1e-9 promised). The two lines that make a peak are the ones that carry the
  * largest inductive and the largest capacitive current there.
  */
-export function findPeaks(rail: CompiledRail, low_Hz: number, high_Hz: number, options?: CurveOptions): Peak[] {
+export function findPeaks(
+  rail: CompiledRail,
+  low_Hz: number,
+  high_Hz: number,
+  options?: CurveOptions,
+): Peak[] {
   return peaksOfCurve(rail, sweepCurve(rail, low_Hz, high_Hz, options));
 }
 
@@ -41,12 +46,13 @@ export function peaksOfCurve(rail: CompiledRail, curve: Curve): Peak[] {
   const u = curve.frequency_Hz.map(Math.log);
   const n = u.length;
   return localMaxima({ u, value: curve.logMagnitude, slope: curve.slope, at }).map(({ u: place, edge }) => {
-    const end = edge === 'low' ? curve.frequency_Hz[0] : edge === 'high' ? curve.frequency_Hz[n - 1] : Math.exp(place);
-    return { ...describe(rail, end, edge !== null), edge };
+    const end =
+      edge === 'low' ? curve.frequency_Hz[0] : edge === 'high' ? curve.frequency_Hz[n - 1] : Math.exp(place);
+    return { ...describePeak(rail, end, edge !== null), edge };
   });
 }
 
-function describe(rail: CompiledRail, frequency_Hz: number, isEdge: boolean): Omit<Peak, 'edge'> {
+function describePeak(rail: CompiledRail, frequency_Hz: number, isEdge: boolean): Omit<Peak, 'edge'> {
   const out = scratch();
   railImpedance(rail, frequency_Hz, out);
   const impedance_ohm = Math.hypot(out[0], out[1]);

@@ -1,4 +1,12 @@
-import { type Branch, branchAdmittance, checkPackage, lineBranch, loadBranch, seriesBranch, sourceBranch } from './branch';
+import {
+  type Branch,
+  branchAdmittance,
+  checkPackage,
+  lineBranch,
+  loadBranch,
+  seriesBranch,
+  sourceBranch,
+} from './branch';
 import { EngineError } from './errors';
 import type { RailNetwork } from './network';
 
@@ -24,7 +32,13 @@ export function compileRail(network: RailNetwork): CompiledRail {
   const source = sourceBranch(network.source);
   if (source) members.push({ role: 'source', id: 'source', line: -1, count: 1, branch: source });
   if (network.plane)
-    members.push({ role: 'plane', id: 'plane', line: -1, count: 1, branch: seriesBranch(network.plane, 'plane') });
+    members.push({
+      role: 'plane',
+      id: 'plane',
+      line: -1,
+      count: 1,
+      branch: seriesBranch(network.plane, 'plane'),
+    });
   network.lines.forEach((line, index) => {
     if (!Number.isInteger(line.count) || line.count < 0)
       throw new EngineError(`lines[${index}].count`, 'count must be a whole number, zero or more');
@@ -90,7 +104,8 @@ export function railImpedance(rail: CompiledRail, frequency_Hz: number, out: Flo
   nodeAdmittance(rail, frequency_Hz, out);
   const view = rail.view;
   const nothing = out[0] === 0 && out[1] === 0;
-  if (nothing && !view?.die) throw new EngineError('bank', 'nothing feeds this rail at this frequency', frequency_Hz);
+  if (nothing && !view?.die)
+    throw new EngineError('bank', 'nothing feeds this rail at this frequency', frequency_Hz);
   if (!view) {
     invert(out);
     return;

@@ -15,4 +15,19 @@ export type Second = Quantity<'s'>;
 export type Metre = Quantity<'m'>;
 
 /** Units that a person may type or read; `''` is a pure number, `%` a percentage. */
-export type UnitSymbol = 'Ω' | 'H' | 'F' | 'Hz' | 'V' | 'A' | 's' | 'm' | 'mm' | 'mm²' | 'W' | 'J' | '%' | 'dB' | '';
+export type UnitSymbol =
+  | 'Ω'
+  | 'H'
+  | 'F'
+  | 'Hz'
+  | 'V'
+  | 'A'
+  | 's'
+  | 'm'
+  | 'mm'
+  | 'mm²'
+  | 'W'
+  | 'J'
+  | '%'
+  | 'dB'
+  | '';

@@ -1,0 +1,86 @@
+import { z } from 'zod';
+import { terminationSchema, toleranceSchema } from './part.schema';
+import { frequencySchema, railSpecSchema } from './rail-spec.schema';
+
+const positive = z.number().gt(0, 'must be above zero').max(1e15);
+const notNegative = z.number().min(0, 'must not be negative').max(1e15);
+
+/** A part in a document: its numbers are taken as they stand (in-service values). */
+export const documentPartSchema = z.strictObject({
+  id: z.string().min(1, 'must not be empty').max(80),
+  capacitance_F: positive,
+  esr_ohm: notNegative,
+  esl_H: notNegative,
+  mount_H: notNegative.default(0),
+  unit_cost: notNegative.optional(),
+  area_mm2: notNegative.optional(),
+  description: z.string().max(200).optional(),
+  technology: z.string().max(40).optional(),
+  dielectric: z.string().max(12).optional(),
+  case: z.string().max(12).optional(),
+  tolerance: toleranceSchema.optional(),
+  rated_voltage_V: positive.optional(),
+  height_mm: positive.optional(),
+  termination: terminationSchema.optional(),
+});
+export type DocumentPart = z.infer<typeof documentPartSchema>;
+
+export const documentLineSchema = z.strictObject({
+  part: z.string().min(1),
+  count: z.int('count must be a whole number').min(1, 'count must be at least 1').max(100_000),
+  /** Mounting inductance of this line, instead of the part's own. */
+  mount_H: notNegative.optional(),
+  /** Farthest distance to the load; with the plane's geometry it gives the path inductance. */
+  distance_m: notNegative.max(10).optional(),
+  side: z.enum(['top', 'bottom']).optional(),
+  locked: z.boolean().optional(),
+});
+export type DocumentLine = z.infer<typeof documentLineSchema>;
+
+export const objectiveSchema = z.enum(['parts', 'cost', 'area']);
+
+export const documentSearchSchema = z.strictObject({
+  minimise: objectiveSchema.default('parts'),
+  candidates: z.array(z.string().min(1)).min(1, 'name at least one candidate').max(500),
+  max_kinds: z.int().min(1).max(500).optional(),
+  max_per_part: z.int().min(1).max(10_000).optional(),
+  seed: z.int().min(0).max(4_294_967_295).optional(),
+});
+
+/** One rail in one JSON document. Unknown keys are refused; the fixed fields never change their meaning. */
+export const railDocumentSchema = z
+  .strictObject({
+    format: z.literal('millpond-rail'),
+    version: z.literal(1),
+    rail: railSpecSchema,
+    parts: z.array(documentPartSchema).max(20_000),
+    bank: z.array(documentLineSchema).max(2000).default([]),
+    search: documentSearchSchema.optional(),
+    frequencies_Hz: z.array(frequencySchema).min(1, 'name at least one frequency').max(1_000_000).optional(),
+  })
+  .superRefine((document, ctx) => {
+    const known = new Set<string>();
+    document.parts.forEach((part, i) => {
+      if (known.has(part.id))
+        ctx.addIssue({ code: 'custom', path: ['parts', i, 'id'], message: `part ${part.id} stands twice` });
+      known.add(part.id);
+    });
+    document.bank.forEach((line, i) => {
+      if (!known.has(line.part))
+        ctx.addIssue({
+          code: 'custom',
+          path: ['bank', i, 'part'],
+          message: `no part is called ${line.part}`,
+        });
+    });
+    document.search?.candidates.forEach((id, i) => {
+      if (!known.has(id))
+        ctx.addIssue({
+          code: 'custom',
+          path: ['search', 'candidates', i],
+          message: `no part is called ${id}`,
+        });
+    });
+  });
+export type RailDocument = z.infer<typeof railDocumentSchema>;
+export type RailDocumentInput = z.input<typeof railDocumentSchema>;

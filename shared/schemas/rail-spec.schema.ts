@@ -1,0 +1,149 @@
+import { z } from 'zod';
+
+/** Finite numbers only (zod refuses NaN and infinities); the ranges keep typing slips out, not real designs. */
+const positive = (what: string, max = 1e15) =>
+  z.number().gt(0, `${what} must be above zero`).max(max, `${what} is too large`);
+const notNegative = (what: string, max = 1e15) =>
+  z.number().min(0, `${what} must not be negative`).max(max, `${what} is too large`);
+
+export const frequencySchema = positive('frequency');
+
+const risingFrequencies = (points: readonly (readonly number[])[], ctx: z.RefinementCtx) => {
+  for (let i = 1; i < points.length; i++)
+    if (points[i][0] <= points[i - 1][0])
+      ctx.addIssue({ code: 'custom', path: [i, 0], message: 'frequencies must rise from point to point' });
+};
+
+export const targetSchema = z.discriminatedUnion('kind', [
+  z.strictObject({ kind: z.literal('flat'), impedance_ohm: positive('target impedance', 1e6) }),
+  z.strictObject({
+    kind: z.literal('step'),
+    ripple_percent: positive('ripple', 100),
+    step_A: positive('load step', 1e5),
+  }),
+  z.strictObject({
+    kind: z.literal('mask'),
+    points: z
+      .array(z.tuple([frequencySchema, positive('impedance', 1e6)]))
+      .min(1, 'a mask needs at least one point')
+      .max(200, 'at most 200 points')
+      .superRefine(risingFrequencies),
+  }),
+]);
+export type Target = z.infer<typeof targetSchema>;
+
+export const bandSchema = z.tuple([frequencySchema, frequencySchema]).superRefine((band, ctx) => {
+  if (band[1] <= band[0])
+    ctx.addIssue({ code: 'custom', path: [1], message: 'the end of the band must lie above its start' });
+});
+
+export const sourceSchema = z
+  .discriminatedUnion('kind', [
+    z.strictObject({
+      kind: z.literal('rl'),
+      resistance_ohm: notNegative('resistance'),
+      inductance_H: notNegative('inductance'),
+    }),
+    z.strictObject({
+      kind: z.literal('damped'),
+      series_resistance_ohm: notNegative('resistance').default(0),
+      series_inductance_H: notNegative('inductance').default(0),
+      inductor_resistance_ohm: notNegative('resistance').default(0),
+      inductance_H: notNegative('inductance'),
+      damping_ohm: notNegative('resistance'),
+      damping_inductance_H: notNegative('inductance').default(0),
+    }),
+    z.strictObject({
+      kind: z.literal('table'),
+      points: z
+        .array(z.tuple([frequencySchema, notNegative('resistance'), z.number()]))
+        .min(2, 'a table needs at least two points')
+        .max(20_000, 'at most 20 000 points')
+        .superRefine(risingFrequencies),
+    }),
+    z.strictObject({ kind: z.literal('open') }),
+  ])
+  .superRefine((source, ctx) => {
+    if (source.kind === 'rl' && source.resistance_ohm === 0 && source.inductance_H === 0)
+      ctx.addIssue({
+        code: 'custom',
+        path: ['resistance_ohm'],
+        message: 'resistance and inductance are both zero',
+      });
+  });
+export type Source = z.infer<typeof sourceSchema>;
+
+/** What a plane pair's capacitance was computed from, kept so that it can be edited. */
+export const planeGeometrySchema = z.strictObject({
+  length_m: positive('length', 10),
+  width_m: positive('width', 10),
+  spacing_m: positive('spacing', 0.1),
+  relative_permittivity: z.number().min(1, 'relative permittivity is at least 1').max(1000),
+  /** Effective radius of a capacitor's vias and of the load's, for the path inductance between them. */
+  via_radius_m: positive('radius', 0.1).default(1.5e-4),
+  load_radius_m: positive('radius', 0.1).default(1.5e-3),
+});
+export type PlaneGeometry = z.infer<typeof planeGeometrySchema>;
+
+export const planeSchema = z.strictObject({
+  capacitance_F: positive('capacitance', 1),
+  resistance_ohm: notNegative('resistance', 1e6),
+  inductance_H: notNegative('inductance', 1),
+  geometry: planeGeometrySchema.optional(),
+});
+export type Plane = z.infer<typeof planeSchema>;
+
+export const packageSchema = z.strictObject({
+  resistance_ohm: notNegative('resistance', 1e6),
+  inductance_H: notNegative('inductance', 1),
+  die_capacitance_F: notNegative('capacitance', 1).default(0),
+  die_resistance_ohm: notNegative('resistance', 1e6).default(0),
+});
+
+export const loadStepSchema = z.strictObject({
+  before_A: notNegative('current', 1e5),
+  step_A: positive('current step', 1e5),
+  rise_s: positive('rise time', 10),
+  hold_s: positive('hold time', 1e4),
+  fall_s: positive('fall time', 10),
+  end_s: positive('end', 1e4).optional(),
+});
+
+/** How the band was found, kept so that it can be edited: knee/rise time above, regulator bandwidth below. */
+export const bandBasisSchema = z.strictObject({
+  rise_s: positive('rise time', 1),
+  knee: z.union([z.literal(0.35), z.literal(0.5)]).default(0.35),
+  regulator_bandwidth_Hz: frequencySchema,
+});
+
+export const railNameSchema = z
+  .string()
+  .trim()
+  .min(1, 'must not be empty')
+  .max(60, 'at most 60 characters')
+  .regex(/^[^\p{Cc}]*$/u, 'must not contain control characters');
+
+/** Everything that is said about a rail but its bank. The `rail` object of the rail document. */
+export const railSpecSchema = z
+  .strictObject({
+    name: railNameSchema,
+    voltage_V: positive('voltage', 1e4),
+    target: targetSchema,
+    band_Hz: bandSchema,
+    band_basis: bandBasisSchema.optional(),
+    source: sourceSchema,
+    plane: planeSchema.optional(),
+    package: packageSchema.optional(),
+    observe: z.enum(['pins', 'die']).default('pins'),
+    load_step: loadStepSchema.optional(),
+  })
+  .superRefine((rail, ctx) => {
+    if (rail.observe === 'die' && !rail.package)
+      ctx.addIssue({
+        code: 'custom',
+        path: ['package'],
+        message: 'to look from the die, say what the package is',
+      });
+  });
+export type RailSpec = z.infer<typeof railSpecSchema>;
+export type RailSpecInput = z.input<typeof railSpecSchema>;
