@@ -35,6 +35,10 @@ export function maskTarget(points: readonly (readonly [number, number])[]): Targ
 
 /** Target in ohm at one frequency. */
 export function targetAt(mask: TargetMask, frequency_Hz: number): number {
+  const { frequency_Hz: f, impedance_ohm: z } = mask;
+  const last = f.length - 1;
+  if (frequency_Hz <= f[0] || last === 0) return z[0];
+  if (frequency_Hz >= f[last]) return z[last];
   return Math.exp(targetSegment(mask, frequency_Hz).logValue);
 }
 

@@ -1,0 +1,70 @@
+import type { Part } from '../schemas/part.schema';
+import type { BankLine, SearchSettings } from '../schemas/rail.schema';
+import type { DocumentPart, RailDocument } from '../schemas/rail-document.schema';
+import type { RailSpec } from '../schemas/rail-spec.schema';
+
+/** A library part as it stands in a document, known there by its part number. */
+export function documentPart(part: Part): DocumentPart {
+  return {
+    id: part.partNumber,
+    capacitance_F: part.capacitance_F,
+    esr_ohm: part.esr_ohm,
+    esl_H: part.esl_H,
+    mount_H: part.mount_H,
+    ...(part.unit_cost !== null && { unit_cost: part.unit_cost }),
+    ...(part.area_mm2 !== null && { area_mm2: part.area_mm2 }),
+    ...(part.description && { description: part.description }),
+    technology: part.technology,
+    ...(part.dielectric && { dielectric: part.dielectric }),
+    case: part.caseSize,
+    tolerance: part.tolerance,
+    rated_voltage_V: part.rated_voltage_V,
+    ...(part.height_mm !== null && { height_mm: part.height_mm }),
+    termination: part.termination,
+  };
+}
+
+/**
+ * A rail with its bank as one document. `parts` by id; lines of count 0 and lines whose part is not in `parts` are left
+ * out. With `search`, the candidates that are in `parts` come along.
+ */
+export function railDocument(
+  spec: RailSpec,
+  bank: readonly BankLine[],
+  parts: ReadonlyMap<string, Part>,
+  search?: SearchSettings,
+): RailDocument {
+  const used = new Map<string, Part>();
+  const lines: RailDocument['bank'] = [];
+  for (const line of bank) {
+    const part = parts.get(line.partId);
+    if (!part || line.count === 0) continue;
+    used.set(part.id, part);
+    lines.push({
+      part: part.partNumber,
+      count: line.count,
+      ...(line.mount_H !== null && { mount_H: line.mount_H }),
+      ...(line.distance_m !== null && { distance_m: line.distance_m }),
+      side: line.side,
+      ...(line.locked && { locked: true }),
+    });
+  }
+  const candidates = (search?.candidateIds ?? []).flatMap((id) => parts.get(id) ?? []);
+  for (const part of candidates) used.set(part.id, part);
+  return {
+    format: 'millpond-rail',
+    version: 1,
+    rail: spec,
+    parts: [...used.values()].map(documentPart),
+    bank: lines,
+    ...(search &&
+      candidates.length > 0 && {
+        search: {
+          minimise: search.minimise,
+          candidates: candidates.map((part) => part.partNumber),
+          ...(search.max_kinds !== null && { max_kinds: search.max_kinds }),
+          max_per_part: search.max_per_part,
+        },
+      }),
+  };
+}

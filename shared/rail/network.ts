@@ -1,0 +1,61 @@
+import type { LineModel, PackageModel, RailNetwork, SourceModel } from '../engine/network';
+import { pathInductance } from '../engine/plane';
+import type { DocumentPart, RailDocument } from '../schemas/rail-document.schema';
+import type { RailSpec, Source } from '../schemas/rail-spec.schema';
+
+function sourceModel(source: Source): SourceModel {
+  if (source.kind !== 'table') return source;
+  return {
+    kind: 'table',
+    table: {
+      frequency_Hz: Float64Array.from(source.points, (p) => p[0]),
+      re_ohm: Float64Array.from(source.points, (p) => p[1]),
+      im_ohm: Float64Array.from(source.points, (p) => p[2]),
+    },
+  };
+}
+
+/** Inductance in henry of the path from a line at `distance_m` to the load; 0 while plane or distance is not known. */
+export function linePath_H(spec: Pick<RailSpec, 'plane'>, distance_m: number | undefined): number {
+  const geometry = spec.plane?.geometry;
+  if (!geometry || distance_m === undefined) return 0;
+  return pathInductance(geometry.spacing_m, distance_m, geometry.via_radius_m, geometry.load_radius_m);
+}
+
+/** One line of a bank as the engine takes it: ESL + mount + path in series. */
+export function lineModel(
+  spec: Pick<RailSpec, 'plane'>,
+  part: DocumentPart,
+  line: { count: number; mount_H?: number; distance_m?: number },
+): LineModel {
+  return {
+    id: part.id,
+    count: line.count,
+    esr_ohm: part.esr_ohm,
+    capacitance_F: part.capacitance_F,
+    inductance_H: part.esl_H + (line.mount_H ?? part.mount_H) + linePath_H(spec, line.distance_m),
+  };
+}
+
+/** The rail of a document as the engine takes it. */
+export function networkOf(document: RailDocument): RailNetwork {
+  const { rail } = document;
+  const parts = new Map(document.parts.map((part) => [part.id, part]));
+  const lines = document.bank.flatMap((line) => {
+    const part = parts.get(line.part);
+    return part ? [lineModel(rail, part, line)] : [];
+  });
+  return {
+    source: sourceModel(rail.source),
+    ...(rail.plane && {
+      plane: {
+        capacitance_F: rail.plane.capacitance_F,
+        resistance_ohm: rail.plane.resistance_ohm,
+        inductance_H: rail.plane.inductance_H,
+      },
+    }),
+    lines,
+    ...(rail.package && { package: rail.package satisfies PackageModel }),
+    observe: rail.observe,
+  };
+}
