@@ -1,0 +1,15 @@
+/**
+ * A small seeded generator (mulberry32: a 32-bit Weyl sequence through a multiply–xorshift mixer, period 2³²).
+ * Only destroy-and-repair draws from it, where speed and repeatability count and statistical finesse does not.
+ * Returns numbers in [0, 1).
+ */
+export function seededRandom(seed: number): () => number {
+  let state = seed >>> 0;
+  return () => {
+    state = (state + 0x6d2b79f5) >>> 0;
+    let t = state;
+    t = Math.imul(t ^ (t >>> 15), t | 1);
+    t ^= t + Math.imul(t ^ (t >>> 7), t | 61);
+    return ((t ^ (t >>> 14)) >>> 0) / 4294967296;
+  };
+}

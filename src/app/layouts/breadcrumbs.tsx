@@ -1,0 +1,79 @@
+import { useQuery } from '@tanstack/react-query';
+import { Link, useLocation, useParams } from 'react-router-dom';
+import { paths } from '@/config/paths';
+import { boardQuery } from '@/features/boards/api/boards';
+import { railsQuery } from '@/features/rails/api/rails';
+
+const PAGES: Record<string, string> = {
+  people: 'People',
+  revisions: 'Revisions',
+  placement: 'Placement',
+  parts: 'Parts',
+  mail: 'Mail',
+  account: 'Account',
+  specification: 'Specification',
+};
+
+interface Crumb {
+  text: string;
+  to?: string;
+}
+
+/** Boards / Tide gateway / VDD_CORE: the way to this page, its last step in bold. */
+export function Breadcrumbs() {
+  const { boardId, railId, letter, partId } = useParams();
+  const { pathname } = useLocation();
+  const board = useQuery({ ...boardQuery(boardId ?? ''), enabled: boardId !== undefined });
+  const rails = useQuery({
+    ...railsQuery(boardId ?? ''),
+    enabled: boardId !== undefined && railId !== undefined,
+  });
+  const crumbs: Crumb[] = [];
+  if (pathname === '/' || pathname.startsWith('/boards')) crumbs.push({ text: 'Boards', to: paths.boards() });
+  if (boardId) crumbs.push({ text: board.data?.name ?? '…', to: paths.board(boardId) });
+  if (boardId && railId) {
+    const rail = rails.data?.rails.find((one) => one.id === railId);
+    crumbs.push({ text: rail?.spec.name ?? '…', to: paths.bench(boardId, railId) });
+  }
+  const last = pathname.split('/').filter(Boolean).pop() ?? '';
+  if (pathname.startsWith('/parts')) crumbs.push({ text: 'Parts', to: paths.parts() });
+  else if (boardId && pathname.includes('/revisions'))
+    crumbs.push({ text: 'Revisions', to: paths.revisions(boardId) });
+  else if (PAGES[last]) crumbs.push({ text: PAGES[last] });
+  if (letter) crumbs.push({ text: letter });
+  if (partId) crumbs.push({ text: 'part' });
+  if (last === 'new') crumbs.push({ text: 'new' });
+  return (
+    <nav aria-label="where you are" className="min-w-0 truncate">
+      <ol className="flex min-w-0 items-center gap-2">
+        {crumbs.map((crumb, i) => {
+          const isLast = i === crumbs.length - 1;
+          return (
+            <li
+              key={crumb.to ?? crumb.text}
+              className={`flex items-center gap-2 ${isLast ? 'truncate' : 'hidden sm:flex'}`}
+            >
+              {i > 0 && (
+                <span aria-hidden className="hidden text-stone sm:inline">
+                  /
+                </span>
+              )}
+              {isLast || !crumb.to ? (
+                <span
+                  aria-current={isLast ? 'page' : undefined}
+                  className={isLast ? 'truncate font-bold' : 'text-stone'}
+                >
+                  {crumb.text}
+                </span>
+              ) : (
+                <Link to={crumb.to} className="text-stone underline-offset-4 hover:underline">
+                  {crumb.text}
+                </Link>
+              )}
+            </li>
+          );
+        })}
+      </ol>
+    </nav>
+  );
+}

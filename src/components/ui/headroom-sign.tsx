@@ -1,0 +1,24 @@
+import { formatFixed } from '@shared/units/format';
+import { cx } from '@/lib/class-names';
+
+interface Props {
+  holds: boolean | null;
+  headroom_dB: number | null;
+  /** With words: “holds by 2.4 dB”, “short by 0.3 dB”. */
+  words?: boolean;
+  className?: string;
+}
+
+/** ▽ under the surface (holds), ▲ above it (short): a sign and a number, never a colour alone. */
+export function HeadroomSign({ holds, headroom_dB, words = false, className }: Props) {
+  if (holds === null || headroom_dB === null)
+    return <span className={cx('text-stone', className)}>– no result</span>;
+  const decibels = formatFixed(Math.abs(headroom_dB), 1);
+  return (
+    <span className={cx('whitespace-nowrap', holds ? 'text-reed' : 'text-kingfisher', className)}>
+      <span aria-hidden>{holds ? '▽' : '▲'} </span>
+      <span className={words ? undefined : 'sr-only'}>{holds ? 'holds by' : 'short by'} </span>
+      {decibels} dB
+    </span>
+  );
+}
