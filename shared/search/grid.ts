@@ -12,14 +12,16 @@ export function startGrid(prepared: Prepared, points: number): number[] {
   for (let i = 1; i < count - 1; i++) grid.push(low * (high / low) ** (i / (count - 1)));
   for (const member of prepared.rail.members) grid.push(selfResonance_Hz(member.branch) ?? 0);
   for (const f of prepared.problem.target.frequency_Hz) grid.push(f);
-  return insertFrequencies(
+  grid.sort((a, b) => a - b);
+  return insertNew(
     [],
     grid.filter((f) => f >= low && f <= high),
   );
 }
 
-/** `grid` with `more`, rising and without doubles (closer than 1e-9 relative counts as the same). */
-export function insertFrequencies(grid: readonly number[], more: readonly number[]): number[] {
-  const all = [...grid, ...more].sort((a, b) => a - b);
-  return all.filter((f, i) => i === 0 || f > all[i - 1] * (1 + 1e-9));
+/** `grid` with those of `more` appended that it does not hold yet (1e-9 relative counts as the same). */
+export function insertNew(grid: readonly number[], more: readonly number[]): number[] {
+  const all = [...grid];
+  for (const f of more) if (!all.some((g) => Math.abs(f - g) <= 1e-9 * f)) all.push(f);
+  return all;
 }

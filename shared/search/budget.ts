@@ -1,0 +1,40 @@
+import type { Prepared } from './prepare';
+
+/** Two real weights closer than this (relative) count as equal. */
+const SAME = 1e-9;
+
+/** The largest budget that excludes weight `weight`: one unit less, or for real weights a hair less. */
+export function budgetBelow({ step }: Prepared, weight: number): number {
+  return step === 1 ? weight - 1 : weight * (1 - SAME);
+}
+
+/** The bound after all mixes of weight ≤ `budget` are excluded. */
+export function boundAbove({ step }: Prepared, budget: number): number {
+  return step === 1 ? Math.floor(budget) + 1 : budget;
+}
+
+/** True when no weight is left between bound and incumbent. */
+export function isClosed(prepared: Prepared, bound: number, weight: number): boolean {
+  return bound > budgetBelow(prepared, weight) || bound >= weight * (1 - 2 * SAME);
+}
+
+/**
+ * The next budget of the deepening: the bound plus a third of the gap to the incumbent (the passes far below are over at once
+ * and tell little), but for whole weights at least the bound itself, and never past what would still be an improvement.
+ * `most` is the weight of everything at its maximum, which ends the search when there is no incumbent.
+ */
+export function nextBudget(
+  prepared: Prepared,
+  bound: number,
+  incumbent: number | null,
+  most: number,
+  stride: number,
+): number {
+  const top = incumbent === null ? most : budgetBelow(prepared, incumbent);
+  const gap = incumbent === null ? Math.max(0.3 * bound, 0.02 * most) : incumbent - bound;
+  if (prepared.step === 1)
+    return Math.min(top, Math.floor(bound) + Math.max(0, Math.floor(stride * gap) - 1));
+  const least = 0.01 * (incumbent ?? most);
+  const next = bound + Math.max(stride * gap, least);
+  return next > top - least ? top : next;
+}

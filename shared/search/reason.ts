@@ -1,0 +1,77 @@
+import type { Tightest } from '../engine/headroom';
+import type { Prepared } from './prepare';
+import { type Reach, reachAt } from './reach';
+import { type Rows, rowQuadratic } from './rows';
+
+const PREFIXES: [number, string][] = [
+  [1e9, 'G'],
+  [1e6, 'M'],
+  [1e3, 'k'],
+  [1, ''],
+  [1e-3, 'm'],
+  [1e-6, 'µ'],
+  [1e-9, 'n'],
+  [1e-12, 'p'],
+];
+
+/** A quantity with three digits and an SI prefix, e.g. 11.6 mΩ. */
+export function engineering(value: number, unit: string): string {
+  const size = Math.abs(value);
+  const [scale, prefix] = PREFIXES.find(([s]) => size >= s * 0.9995) ?? PREFIXES[PREFIXES.length - 1];
+  return `${Number((value / scale).toPrecision(3))} ${prefix}${unit}`;
+}
+
+/** |Z| in ohm that row `f` sees at Y = x + jy (|Z|²/Zt² = N/(q + N), see shortfall.ts). */
+function impedanceAt(rows: Rows, f: number, x: number, y: number): number {
+  const re = 1 + rows.zsRe[f] * x - rows.zsIm[f] * y;
+  const im = rows.zsRe[f] * y + rows.zsIm[f] * x;
+  const n = re * re + im * im;
+  return rows.zt[f] * Math.sqrt(n / (rowQuadratic(rows, f, x, y) + n));
+}
+
+/** Why no mix can meet the row of `reach`: what the best candidate and all together leave there, and what is to blame. */
+export function explainReach(prepared: Prepared, rows: Rows, reach: Reach): string {
+  const exact = rows.exact.findLast((f) => f <= reach.row) as number;
+  const at = `At ${engineering(rows.frequency_Hz[exact], 'Hz')}`;
+  const target = `the target of ${engineering(rows.zt[exact], 'Ω')}`;
+  const series = Math.hypot(rows.zsRe[exact], rows.zsIm[exact]);
+  const view = prepared.rail.view;
+  if (rows.a[exact] < 0 && view && series > rows.zt[exact])
+    return `${at} the package's ${engineering(view.l, 'H')} and ${engineering(view.r, 'Ω')} alone are ${engineering(series, 'Ω')}, above ${target}: no bank on the board can bring that down.`;
+  let best = { ohm: Number.POSITIVE_INFINITY, k: -1 };
+  prepared.parts.forEach((part, k) => {
+    const more = part.max - part.min;
+    const x = rows.y0x[exact] + more * rows.yx[k][exact];
+    const y = rows.y0y[exact] + more * rows.yy[k][exact];
+    const ohm = impedanceAt(rows, exact, x, y);
+    if (more > 0 && ohm < best.ohm) best = { ohm, k };
+  });
+  const together = reachAt(prepared, rows, exact);
+  const all = engineering(impedanceAt(rows, exact, together.x, together.y), 'Ω');
+  if (best.k < 0) return `${at} what is fixed leaves ${all}, above ${target}, and no candidate may be added.`;
+  const part = prepared.parts[best.k];
+  const one = part.max === 1 ? `one ${part.id}` : `${part.max} of ${part.id}`;
+  const cause =
+    rows.frequency_Hz[exact] > part.resonance_Hz
+      ? 'its inductance with mount and path is too large'
+      : 'its capacitance is too small';
+  return `${at} even ${one}, the best candidate there, leave ${engineering(best.ohm, 'Ω')}, and the best use of all candidates within their maxima ${all}, above ${target}: ${cause}.`;
+}
+
+/** Every frequency alone is within reach, but every combination has been tried. */
+export function explainExhausted(closest: Tightest | null): string {
+  const all = 'Every combination within the maxima and the number of kinds has been tried and none holds';
+  return closest ? `${all}: ${nearest(closest)}.` : `${all}.`;
+}
+
+/** The time was up before any mix was found. */
+export function explainTimeout(seconds: number, closest: Tightest | null): string {
+  const none = `No mix was found in ${Number(seconds.toPrecision(2))} s, and none is proven impossible`;
+  return closest ? `${none}: ${nearest(closest)}.` : `${none}.`;
+}
+
+function nearest(closest: Tightest): string {
+  const { frequency_Hz, impedance_ohm, target_ohm, headroom_dB } = closest;
+  const short = Number(Math.max(0, -headroom_dB).toPrecision(3));
+  return `the closest still has ${engineering(impedance_ohm, 'Ω')} at ${engineering(frequency_Hz, 'Hz')}, ${short} dB above the target of ${engineering(target_ohm, 'Ω')}`;
+}
