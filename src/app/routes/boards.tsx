@@ -1,0 +1,1 @@
+export { BoardsPage as Component } from '@/features/boards/components/boards-page';

@@ -1,0 +1,1 @@
+export { ForgottenPage as Component } from '@/features/session/components/forgotten-page';
