@@ -16,6 +16,9 @@ export const noteSchema = z.string().trim().max(2000, 'at most 2000 characters')
 /** The version of an editable thing, for optimistic concurrency: a save names the one it started from. */
 export const versionSchema = z.int().min(1);
 
+/** The same in a query, where a request has no body (DELETE). */
+export const versionQuerySchema = z.strictObject({ version: z.coerce.number().pipe(versionSchema) });
+
 export const pageQuerySchema = z.strictObject({
   limit: z.coerce.number().int().min(1).max(500).default(100),
   offset: z.coerce.number().int().min(0).max(1_000_000).default(0),

@@ -68,7 +68,19 @@ export const partSchema = partFieldsSchema.extend({
 export type Part = z.infer<typeof partSchema>;
 
 export const createPartSchema = partFieldsSchema;
-export const updatePartSchema = partFieldsSchema.partial().extend({ version: versionSchema });
+const { description, dielectric, height_mm, termination, unit_cost, area_mm2 } = partFieldsSchema.shape;
+/** What is left out stays as it is: without their defaults, which would stand in for a missing field. */
+export const updatePartSchema = partFieldsSchema
+  .extend({
+    description: description.unwrap(),
+    dielectric: dielectric.unwrap(),
+    height_mm: height_mm.unwrap(),
+    termination: termination.unwrap(),
+    unit_cost: unit_cost.unwrap(),
+    area_mm2: area_mm2.unwrap(),
+  })
+  .partial()
+  .extend({ version: versionSchema });
 export const setPartStateSchema = z.strictObject({ version: versionSchema, state: partStateSchema });
 
 export const partSortSchema = z.enum([
@@ -99,3 +111,12 @@ export const partQuerySchema = pageQuerySchema.extend({
 });
 export type PartQuery = z.infer<typeof partQuerySchema>;
 export const partPageSchema = pageOf(partSchema);
+
+const facetSchema = z.array(z.object({ value: z.string(), count: z.int() }));
+/** What the library holds, for filters: each value with how many parts have it. */
+export const partFacetsSchema = z.object({
+  technologies: facetSchema,
+  dielectrics: facetSchema,
+  caseSizes: facetSchema,
+});
+export type PartFacets = z.infer<typeof partFacetsSchema>;

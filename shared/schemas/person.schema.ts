@@ -58,6 +58,14 @@ export const siteSchema = z.object({
 });
 export type Site = z.infer<typeof siteSchema>;
 
+export const healthSchema = z.object({
+  status: z.enum(['ok', 'failing']),
+  database: z.enum(['ok', 'failing']),
+  version: z.string(),
+  engineVersion: z.string(),
+});
+export type Health = z.infer<typeof healthSchema>;
+
 export const requestResetSchema = z.strictObject({ email: z.string().trim().toLowerCase().min(1).max(200) });
 export const tokenSchema = z.string().regex(/^[A-Za-z0-9_-]{20,100}$/, 'is not a valid token');
 export const tokenInfoSchema = z.object({ email: z.string(), name: z.string(), expiresAt: isoDateSchema });

@@ -1,0 +1,181 @@
+import { planeCapacitance } from '@shared/engine/plane';
+import type { BankLine } from '@shared/schemas/rail.schema';
+import type { Plane, PlaneGeometry, RailSpec } from '@shared/schemas/rail-spec.schema';
+
+export interface DemoLine extends Omit<BankLine, 'partId'> {
+  partNumber: string;
+}
+
+export interface DemoRail {
+  spec: RailSpec;
+  bank: DemoLine[];
+  /** What the bank was when revision A was cut, where it differs. */
+  firstBank?: DemoLine[];
+}
+
+const metres = (millimetres: number): number => millimetres / 1000;
+
+function plane(length_mm: number, width_mm: number, spacing_mm: number, resistance_ohm: number): Plane {
+  const geometry: PlaneGeometry = {
+    length_m: metres(length_mm),
+    width_m: metres(width_mm),
+    spacing_m: metres(spacing_mm),
+    relative_permittivity: 4.1,
+    via_radius_m: metres(0.15),
+    load_radius_m: metres(1.5),
+  };
+  return {
+    capacitance_F: planeCapacitance(
+      geometry.length_m,
+      geometry.width_m,
+      geometry.spacing_m,
+      geometry.relative_permittivity,
+    ),
+    resistance_ohm,
+    inductance_H: 8e-12,
+    geometry,
+  };
+}
+
+const line = (
+  partNumber: string,
+  count: number,
+  distance_mm: number | null,
+  side: BankLine['side'] = 'bottom',
+  locked = false,
+): DemoLine => ({
+  partNumber,
+  count,
+  mount_H: null,
+  distance_m: distance_mm === null ? null : metres(distance_mm),
+  side,
+  locked,
+});
+
+/** From short to easy, so that there is something to fix and something to see. */
+export const demoRails: DemoRail[] = [
+  {
+    spec: {
+      name: 'VDD_CORE',
+      voltage_V: 0.85,
+      target: { kind: 'step', ripple_percent: 3, step_A: 10 },
+      band_Hz: [10e3, 12e6],
+      band_basis: { rise_s: 29e-9, knee: 0.35, regulator_bandwidth_Hz: 10e3 },
+      source: {
+        kind: 'damped',
+        series_resistance_ohm: 0.0004,
+        series_inductance_H: 0,
+        inductor_resistance_ohm: 0.0002,
+        inductance_H: 9e-9,
+        damping_ohm: 0.005,
+        damping_inductance_H: 0,
+      },
+      plane: plane(52, 40, 0.1, 0.0006),
+      observe: 'pins',
+      load_step: { before_A: 2, step_A: 10, rise_s: 29e-9, hold_s: 60e-6, fall_s: 29e-9 },
+    },
+    bank: [
+      line('AB-P7343-470U-2V5-6M', 4, 24, 'top'),
+      line('AB-C0603-X6S-22U-4', 2, 14),
+      line('AB-C0402-X6S-2U2-6V3', 5, 8),
+      line('AB-C0402-X7R-470N-10', 4, 6),
+    ],
+    firstBank: [
+      line('AB-P7343-470U-2V5-6M', 5, 24, 'top'),
+      line('AB-C0603-X6S-22U-4', 4, 14),
+      line('AB-C0402-X6S-2U2-6V3', 10, 8),
+      line('AB-C0402-X7R-470N-10', 7, 6),
+    ],
+  },
+  {
+    spec: {
+      name: 'VDD_DDR',
+      voltage_V: 1.1,
+      target: { kind: 'flat', impedance_ohm: 0.009 },
+      band_Hz: [10e3, 20e6],
+      source: { kind: 'rl', resistance_ohm: 0.0009, inductance_H: 12e-9 },
+      plane: plane(46, 28, 0.1, 0.0008),
+      package: {
+        resistance_ohm: 0.004,
+        inductance_H: 60e-12,
+        die_capacitance_F: 12e-9,
+        die_resistance_ohm: 0.006,
+      },
+      observe: 'pins',
+    },
+    bank: [
+      line('AB-P7343-330U-4-7M', 2, 22, 'top'),
+      line('AB-C0603-X6S-22U-4', 4, 14),
+      line('AB-C0402-X6S-2U2-6V3', 8, 8),
+      line('AB-C0402-X7R-220N-16', 8, 6),
+    ],
+  },
+  {
+    spec: {
+      name: 'VDD_IO',
+      voltage_V: 1.8,
+      target: { kind: 'step', ripple_percent: 5, step_A: 3 },
+      band_Hz: [10e3, 25e6],
+      source: { kind: 'rl', resistance_ohm: 0.002, inductance_H: 40e-9 },
+      plane: plane(60, 44, 0.2, 0.001),
+      observe: 'pins',
+    },
+    bank: [
+      line('AB-P7343-220U-6V3-9M', 1, 30, 'top'),
+      line('AB-C0603-X6S-10U-6V3', 3, 16),
+      line('AB-C0402-X6S-1U-10', 6, 9),
+    ],
+  },
+  {
+    spec: {
+      name: 'VDD_SERDES',
+      voltage_V: 0.9,
+      target: {
+        kind: 'mask',
+        points: [
+          [10e3, 0.012],
+          [1e6, 0.012],
+          [10e6, 0.02],
+          [40e6, 0.06],
+        ],
+      },
+      band_Hz: [10e3, 40e6],
+      source: { kind: 'rl', resistance_ohm: 0.0015, inductance_H: 10e-9 },
+      plane: plane(30, 18, 0.1, 0.0012),
+      observe: 'pins',
+    },
+    bank: [
+      line('AB-P7343-220U-6V3-9M', 1, 20, 'top', true),
+      line('AB-C0603-X5R-22U-6V3', 2, 11),
+      line('AB-C0402-X6S-2U2-6V3', 5, 6),
+      line('AB-C0201-X5R-100N-6V3', 7, 4),
+    ],
+  },
+  {
+    spec: {
+      name: 'VDD_AUX',
+      voltage_V: 3.3,
+      target: { kind: 'step', ripple_percent: 5, step_A: 0.8 },
+      band_Hz: [10e3, 10e6],
+      source: { kind: 'rl', resistance_ohm: 0.01, inductance_H: 150e-9 },
+      observe: 'pins',
+    },
+    bank: [line('AB-T7343-100U-16-75M', 1, null, 'top'), line('AB-C0603-X7R-1U-25', 2, null, 'top')],
+  },
+  {
+    spec: {
+      name: 'VBUS_72',
+      voltage_V: 72,
+      target: { kind: 'flat', impedance_ohm: 0.6 },
+      band_Hz: [1e3, 5e6],
+      source: { kind: 'rl', resistance_ohm: 0.05, inductance_H: 2e-6 },
+      plane: plane(70, 22, 0.36, 0.002),
+      observe: 'pins',
+    },
+    bank: [
+      line('AB-ED10-100U-100-180M', 1, 45, 'top'),
+      line('AB-C1210-X7S-4U7-100-S', 2, 20, 'top'),
+      line('AB-C0603-X7R-100N-100', 2, 12, 'top'),
+    ],
+  },
+];

@@ -1,0 +1,23 @@
+import { Column, Entity, Index, JoinColumn, ManyToOne, PrimaryColumn } from 'typeorm';
+import { PersonEntity } from './person.entity';
+
+@Entity('board')
+@Index('board_by_name', ['name', 'id'])
+@Index('board_by_owner', ['ownerId'])
+@Index('board_by_editor', ['updatedById'])
+export class BoardEntity {
+  @PrimaryColumn({ type: 'text' }) id!: string;
+  @Column({ type: 'text' }) name!: string;
+  @Column({ type: 'text', default: '' }) description!: string;
+  @Column({ name: 'owner_id', type: 'text' }) ownerId!: string;
+  @ManyToOne(() => PersonEntity, { onDelete: 'RESTRICT' })
+  @JoinColumn({ name: 'owner_id' })
+  owner?: PersonEntity;
+  @Column({ type: 'integer', default: 1 }) version!: number;
+  @Column({ name: 'created_at', type: 'text' }) createdAt!: string;
+  @Column({ name: 'updated_at', type: 'text' }) updatedAt!: string;
+  @Column({ name: 'updated_by', type: 'text', nullable: true }) updatedById!: string | null;
+  @ManyToOne(() => PersonEntity, { onDelete: 'SET NULL' })
+  @JoinColumn({ name: 'updated_by' })
+  updatedBy?: PersonEntity | null;
+}

@@ -1,0 +1,44 @@
+import { createBoardSchema, setMemberSchema, updateBoardSchema } from '@shared/schemas/board.schema';
+import { pageQuerySchema } from '@shared/schemas/common.schema';
+import { createBoard, deleteBoard, listBoards, readBoard, updateBoard } from '../services/board.service';
+import { removeMember, setMember } from '../services/member.service';
+import { created, done, route } from './route';
+
+export const boardRoutes = [
+  route('get', '/boards', {
+    access: 'signed-in',
+    query: pageQuerySchema,
+    handle: ({ ctx, actor, query }) => listBoards(ctx, actor, query),
+  }),
+  route('post', '/boards', {
+    access: 'signed-in',
+    body: createBoardSchema,
+    handle: async ({ ctx, actor, body }) => created(await createBoard(ctx, actor, body)),
+  }),
+  route('get', '/boards/:boardId', {
+    access: 'signed-in',
+    handle: ({ ctx, actor, params }) => readBoard(ctx, actor, params.boardId),
+  }),
+  route('patch', '/boards/:boardId', {
+    access: 'signed-in',
+    body: updateBoardSchema,
+    handle: ({ ctx, actor, params, body }) => updateBoard(ctx, actor, params.boardId, body),
+  }),
+  route('delete', '/boards/:boardId', {
+    access: 'signed-in',
+    handle: async ({ ctx, actor, params }) => {
+      await deleteBoard(ctx, actor, params.boardId);
+      return done();
+    },
+  }),
+  route('put', '/boards/:boardId/members/:personId', {
+    access: 'signed-in',
+    body: setMemberSchema,
+    handle: ({ ctx, actor, params, body }) =>
+      setMember(ctx, actor, params.boardId, params.personId, body.role),
+  }),
+  route('delete', '/boards/:boardId/members/:personId', {
+    access: 'signed-in',
+    handle: ({ ctx, actor, params }) => removeMember(ctx, actor, params.boardId, params.personId),
+  }),
+];
