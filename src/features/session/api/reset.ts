@@ -3,12 +3,12 @@ import { queryOptions, useMutation, useQuery, useQueryClient } from '@tanstack/r
 import { command, request } from '@/lib/api-client';
 
 export const useRequestReset = () =>
-  useMutation({ mutationFn: (body: { email: string }) => command('POST', '/resets', { body }) });
+  useMutation({ mutationFn: (body: { email: string }) => command('POST', '/password-resets', { body }) });
 
 export const resetQuery = (token: string) =>
   queryOptions({
     queryKey: ['reset', token],
-    queryFn: ({ signal }) => request('GET', `/resets/${token}`, tokenInfoSchema, { signal }),
+    queryFn: ({ signal }) => request('GET', `/password-resets/${token}`, tokenInfoSchema, { signal }),
     staleTime: Number.POSITIVE_INFINITY,
   });
 export const useReset = (token: string) => useQuery(resetQuery(token));
@@ -18,7 +18,7 @@ export function useSetPassword(token: string) {
   const client = useQueryClient();
   return useMutation({
     mutationFn: (body: { password: string }) =>
-      command('POST', `/resets/${token}`, { body, quietUnauthorised: true }),
+      command('POST', `/password-resets/${token}`, { body, quietUnauthorised: true }),
     onSuccess: () => client.clear(),
   });
 }

@@ -1,0 +1,63 @@
+import { describe, expect, it } from 'vitest';
+import type { DocumentPart } from '../schemas/rail-document.schema';
+import type { RailSpec } from '../schemas/rail-spec.schema';
+import { railCautions } from './cautions';
+
+const rail: RailSpec = {
+  name: 'VBUS_72',
+  voltage_V: 72,
+  target: { kind: 'flat', impedance_ohm: 0.1 },
+  band_Hz: [1e3, 1e6],
+  source: { kind: 'rl', resistance_ohm: 0.01, inductance_H: 1e-8 },
+  observe: 'pins',
+};
+const part = (id: string, more: Partial<DocumentPart>): DocumentPart => ({
+  id,
+  capacitance_F: 1e-6,
+  esr_ohm: 0.01,
+  esl_H: 1e-9,
+  mount_H: 0,
+  ...more,
+});
+const kinds = (parts: DocumentPart[], voltage_V = 72) =>
+  railCautions({
+    rail: { ...rail, voltage_V },
+    parts,
+    bank: parts.map((one) => ({ part: one.id, count: 2 })),
+  }).map((caution) => caution.kind);
+
+describe('railCautions', () => {
+  it('warns above 60 V with the stored energy, not at 60 V', () => {
+    const [first] = railCautions({ rail, parts: [part('A', {})], bank: [{ part: 'A', count: 2 }] });
+    // ½ · 2 µF · 72² = 5.18 mJ
+    expect(first.kind).toBe('voltage');
+    expect(first.text).toContain('5.18\u00a0mJ');
+    expect(kinds([part('A', {})], 60)).not.toContain('voltage');
+  });
+
+  it('names large ceramics from 1206 on, and polymers not among them', () => {
+    expect(kinds([part('A', { technology: 'ceramic', case: '1206', dielectric: 'C0G' })])).toContain(
+      'cracks',
+    );
+    expect(kinds([part('A', { technology: 'ceramic', case: '0805', dielectric: 'C0G' })])).not.toContain(
+      'cracks',
+    );
+    expect(kinds([part('A', { technology: 'polymer', case: '7343' })])).toEqual([
+      'voltage',
+      'polarity',
+      'inrush',
+    ]);
+  });
+
+  it('tells Class II from Class I and finds parts rated below the rail', () => {
+    expect(kinds([part('A', { technology: 'ceramic', dielectric: 'X7R' })])).toContain('losses');
+    expect(kinds([part('A', { technology: 'ceramic', dielectric: 'C0G' })])).not.toContain('losses');
+    expect(kinds([part('A', { rated_voltage_V: 50 })])).toContain('rating');
+    expect(kinds([part('A', { rated_voltage_V: 100 })])).not.toContain('rating');
+  });
+
+  it('says nothing about parts that the bank does not use, and nothing of an empty bank but its voltage', () => {
+    const idle = part('A', { technology: 'ceramic', case: '1210' });
+    expect(railCautions({ rail, parts: [idle], bank: [] }).map((one) => one.kind)).toEqual(['voltage']);
+  });
+});

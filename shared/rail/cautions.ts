@@ -1,0 +1,87 @@
+import type { DocumentPart, RailDocument } from '../schemas/rail-document.schema';
+import { formatQuantity } from '../units/format';
+
+export interface Caution {
+  kind: 'voltage' | 'rating' | 'cracks' | 'losses' | 'polarity' | 'inrush';
+  title: string;
+  text: string;
+}
+
+/** Above this DC voltage a rail is treated as a hazard to touch (product sketch, cautions). */
+export const TOUCH_LIMIT_V = 60;
+/** Start-up ramp for which the mean inrush current is stated. */
+const RAMP_s = 1e-3;
+const POLARISED = new Set(['polymer', 'tantalum', 'aluminium']);
+/** Ceramics of Class I (EIA-198, IEC 60384-8): they hardly lose capacitance. */
+const CLASS_I = /^(C0G|COG|NP0|U2J|C0H|U1)/i;
+
+/** Ceramics whose inch case code is 1206 or larger crack when the board bends. */
+export const isLargeCeramic = (part: Pick<DocumentPart, 'technology' | 'case'>): boolean =>
+  part.technology === 'ceramic' && /^\d{4}$/.test(part.case ?? '') && Number(part.case) >= 1206;
+
+export const isPolarised = (part: Pick<DocumentPart, 'technology'>): boolean =>
+  POLARISED.has(part.technology ?? '');
+
+const names = (parts: readonly DocumentPart[]) => parts.map((part) => part.id).join(', ');
+
+/** The parts that the bank really uses, each with its count. */
+function used(document: Pick<RailDocument, 'parts' | 'bank'>): { part: DocumentPart; count: number }[] {
+  return document.parts
+    .map((part) => ({
+      part,
+      count: document.bank.reduce((sum, line) => (line.part === part.id ? sum + line.count : sum), 0),
+    }))
+    .filter(({ count }) => count > 0);
+}
+
+/** What a person should know before trusting or touching this rail, in the order of harm. */
+export function railCautions(document: Pick<RailDocument, 'rail' | 'parts' | 'bank'>): Caution[] {
+  const { voltage_V } = document.rail;
+  const bank = used(document);
+  const parts = bank.map(({ part }) => part);
+  const capacitance_F = bank.reduce((sum, { part, count }) => sum + count * part.capacitance_F, 0);
+  const cautions: Caution[] = [];
+  if (voltage_V > TOUCH_LIMIT_V)
+    cautions.push({
+      kind: 'voltage',
+      title: 'above 60 V DC: energy and shock hazard',
+      text: `The bank stores ${formatQuantity(0.5 * capacitance_F * voltage_V ** 2, 'J')} (½CV² with catalogue values). Discharge it before touching.`,
+    });
+  const under = parts.filter(
+    (part) => part.rated_voltage_V !== undefined && part.rated_voltage_V < voltage_V,
+  );
+  if (under.length > 0)
+    cautions.push({
+      kind: 'rating',
+      title: 'rated below the rail',
+      text: `${names(under)}: rated for less than ${formatQuantity(voltage_V, 'V', { trim: true })}. Do not fit.`,
+    });
+  const large = parts.filter(isLargeCeramic);
+  if (large.length > 0)
+    cautions.push({
+      kind: 'cracks',
+      title: 'large ceramics crack when the board bends',
+      text: `${names(large)}: keep from edges, score lines, connectors and screws, or use soft terminations.`,
+    });
+  const polarised = parts.filter(isPolarised);
+  if (polarised.length > 0)
+    cautions.push({
+      kind: 'polarity',
+      title: 'polarised parts',
+      text: `${names(polarised)}: check orientation and voltage derating.`,
+    });
+  const lossy = parts.filter((part) => part.technology === 'ceramic' && !CLASS_I.test(part.dielectric ?? ''));
+  if (lossy.length > 0)
+    cautions.push({
+      kind: 'losses',
+      title: 'Class II dielectrics',
+      text: `${names(lossy)}: capacitance falls with bias, temperature and age; catalogue values do not show it.`,
+    });
+  if (capacitance_F > 0)
+    cautions.push({
+      kind: 'inrush',
+      title: 'inrush at start-up',
+      text: `Charging ${formatQuantity(capacitance_F, 'F')} to ${formatQuantity(voltage_V, 'V', { trim: true })} in 1 ms takes ${formatQuantity((capacitance_F * voltage_V) / RAMP_s, 'A')} on average; check the regulator’s limit and soft start.`,
+    });
+  return cautions;
+}

@@ -1,0 +1,70 @@
+import type { RevisionRail } from '@shared/schemas/revision.schema';
+import { describe, expect, it } from 'vitest';
+import { layoutCautions, railGroups } from './instance-groups';
+
+const instance = (designator: string, partNumber: string) => ({
+  designator,
+  partNumber,
+  value: '',
+  caseSize: '',
+  side: 'top' as const,
+  rail: 'R',
+  mount_H: 0,
+  distance_m: null,
+  farthest_m: null,
+  farthestReason: null,
+});
+const part = (id: string, technology: string, caseSize: string) => ({
+  id,
+  capacitance_F: 1e-6,
+  esr_ohm: 0.01,
+  esl_H: 1e-9,
+  mount_H: 0,
+  technology,
+  case: caseSize,
+});
+const rail = (railId: string, parts: ReturnType<typeof part>[], placed: string[]): RevisionRail => ({
+  railId,
+  document: {
+    format: 'millpond-rail',
+    version: 1,
+    rail: {
+      name: railId,
+      voltage_V: 1,
+      target: { kind: 'flat', impedance_ohm: 0.01 },
+      band_Hz: [1e4, 1e7],
+      source: { kind: 'open' },
+      observe: 'pins',
+    },
+    parts,
+    bank: [],
+  },
+  summary: {
+    engineVersion: '1',
+    holds: null,
+    tightest: null,
+    parts: 0,
+    kinds: 0,
+    cost: null,
+    area_mm2: null,
+    error: null,
+  },
+  peaks: [],
+  instances: placed.map((id, i) => instance(`C${i}`, id)),
+});
+
+describe('placement by rail', () => {
+  const results = [
+    rail('one', [part('BIG', 'ceramic', '1210'), part('IDLE', 'ceramic', '2220')], ['BIG', 'BIG']),
+    rail('two', [part('BIG', 'ceramic', '1210'), part('POL', 'polymer', '7343')], ['POL']),
+    rail('three', [], []),
+  ];
+
+  it('leaves out rails with nothing to place', () => {
+    expect(railGroups(results).map((group) => group.railId)).toEqual(['one', 'two']);
+  });
+
+  it('names each part to be careful with once, and only parts that are placed', () => {
+    expect(layoutCautions(results)).toEqual({ cracks: ['BIG'], polarised: ['POL'] });
+  });
+});

@@ -1,0 +1,32 @@
+import { isLargeCeramic, isPolarised } from '@shared/rail/cautions';
+import type { Instance, RevisionRail } from '@shared/schemas/revision.schema';
+
+export interface RailGroup {
+  railId: string;
+  rail: string;
+  instances: Instance[];
+}
+
+/** The capacitors of a revision, rail by rail; rails without any are left out. */
+export function railGroups(results: readonly RevisionRail[]): RailGroup[] {
+  return results
+    .filter(({ instances }) => instances.length > 0)
+    .map(({ railId, document, instances }) => ({ railId, rail: document.rail.name, instances }));
+}
+
+export interface LayoutCautions {
+  /** Part numbers of large ceramics with an ordinary termination. */
+  cracks: string[];
+  polarised: string[];
+}
+
+/** The parts of a revision that layout must treat with care, each named once. */
+export function layoutCautions(results: readonly RevisionRail[]): LayoutCautions {
+  const placed = new Set(results.flatMap(({ instances }) => instances.map((one) => one.partNumber)));
+  const parts = results.flatMap(({ document }) => document.parts).filter((part) => placed.has(part.id));
+  const unique = (ids: string[]) => [...new Set(ids)].sort();
+  return {
+    cracks: unique(parts.filter((part) => isLargeCeramic(part)).map((part) => part.id)),
+    polarised: unique(parts.filter((part) => isPolarised(part)).map((part) => part.id)),
+  };
+}

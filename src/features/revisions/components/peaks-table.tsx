@@ -1,0 +1,54 @@
+import type { RevisionPeak } from '@shared/schemas/revision.schema';
+import { formatDecibel } from '@shared/units/format';
+import { Decimal } from '@/components/ui/decimal';
+import { Table, Td, Th } from '@/components/ui/table';
+
+const HEAD = (
+  <>
+    <Th numeric>peak</Th>
+    <Th numeric>frequency</Th>
+    <Th numeric>impedance</Th>
+    <Th numeric>target there</Th>
+    <Th>against the target</Th>
+    <Th>made by</Th>
+  </>
+);
+
+function Against({ peak: { impedance_ohm, target_ohm } }: { peak: RevisionPeak }) {
+  if (target_ohm === null) return <span className="text-stone">outside the band</span>;
+  const headroom_dB = 20 * Math.log10(target_ohm / impedance_ohm);
+  return headroom_dB < 0 ? (
+    <span className="text-kingfisher">▲ breaks the surface, {formatDecibel(headroom_dB)}</span>
+  ) : (
+    <span className="text-reed">▽ under it, {formatDecibel(headroom_dB)}</span>
+  );
+}
+
+/** Anti-resonances of the rail, each with the two members that make it. */
+export function PeaksTable({ rail, peaks }: { rail: string; peaks: readonly RevisionPeak[] }) {
+  if (peaks.length === 0) return <p className="text-stone">No peaks in the band.</p>;
+  return (
+    <Table caption={`peaks of ${rail}`} head={HEAD}>
+      {peaks.map((peak, i) => (
+        <tr key={peak.frequency_Hz}>
+          <Td numeric>{i + 1}</Td>
+          <Td numeric>
+            <Decimal value={peak.frequency_Hz} unit="Hz" />
+          </Td>
+          <Td numeric>
+            <Decimal value={peak.impedance_ohm} unit="Ω" />
+          </Td>
+          <Td numeric>
+            <Decimal value={peak.target_ohm} unit="Ω" />
+          </Td>
+          <Td className="whitespace-nowrap">
+            <Against peak={peak} />
+          </Td>
+          <Td className="min-w-52 text-stone">
+            {peak.inductive ?? 'several'} against {peak.capacitive ?? 'several'}
+          </Td>
+        </tr>
+      ))}
+    </Table>
+  );
+}

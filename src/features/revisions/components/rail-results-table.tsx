@@ -1,0 +1,69 @@
+import type { RevisionRail } from '@shared/schemas/revision.schema';
+import { formatQuantity } from '@shared/units/format';
+import { Decimal } from '@/components/ui/decimal';
+import { HeadroomSign } from '@/components/ui/headroom-sign';
+import { Table, Td, Th } from '@/components/ui/table';
+import { LINK } from '@/components/ui/text-link';
+
+const HEAD = (
+  <>
+    <Th>rail</Th>
+    <Th numeric>voltage</Th>
+    <Th numeric>target there</Th>
+    <Th numeric>impedance</Th>
+    <Th>tightest headroom</Th>
+    <Th numeric>parts</Th>
+    <Th numeric>kinds</Th>
+    <Th numeric>cost</Th>
+    <Th numeric>area</Th>
+  </>
+);
+
+/** The anchor of a rail's section on the revision's page. */
+export const railAnchor = (railId: string) => `rail-${railId}`;
+
+function Headroom({ summary }: Pick<RevisionRail, 'summary'>) {
+  if (summary.error) return <span className="text-kingfisher">▲ {summary.error}</span>;
+  return (
+    <>
+      <HeadroomSign holds={summary.holds} headroom_dB={summary.tightest?.headroom_dB ?? null} words />
+      {summary.tightest && (
+        <span className="text-stone"> at {formatQuantity(summary.tightest.frequency_Hz, 'Hz')}</span>
+      )}
+    </>
+  );
+}
+
+export function RailResultsTable({ rails }: { rails: readonly RevisionRail[] }) {
+  return (
+    <Table caption="rails of this revision and their results" head={HEAD}>
+      {rails.map(({ railId, document, summary }) => (
+        <tr key={railId} className="hover:bg-wash/50">
+          <Td>
+            <a href={`#${railAnchor(railId)}`} className={`${LINK} font-semibold`}>
+              {document.rail.name}
+            </a>
+          </Td>
+          <Td numeric>
+            <Decimal value={document.rail.voltage_V} unit="V" />
+          </Td>
+          <Td numeric>
+            <Decimal value={summary.tightest?.target_ohm} unit="Ω" />
+          </Td>
+          <Td numeric>
+            <Decimal value={summary.tightest?.impedance_ohm} unit="Ω" />
+          </Td>
+          <Td className="min-w-56">
+            <Headroom summary={summary} />
+          </Td>
+          <Td numeric>{summary.parts}</Td>
+          <Td numeric>{summary.kinds}</Td>
+          <Td numeric>{summary.cost === null ? '—' : summary.cost.toFixed(2)}</Td>
+          <Td numeric>
+            <Decimal value={summary.area_mm2} unit="mm²" />
+          </Td>
+        </tr>
+      ))}
+    </Table>
+  );
+}
