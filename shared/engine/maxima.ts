@@ -33,13 +33,15 @@ export function localMaxima(samples: Sampled): Maximum[] {
     const b = samples.slope[i + 1];
     if (a > 0 && b <= 0) found.push(bisect(samples, samples.u[i], samples.u[i + 1]));
     // A kink (a table's or a mask's corner): the slope jumps at the sample itself.
-    else if (a <= 0 && b <= 0 && i > 0 && isKink(samples, i)) {
+    // Where the slope before was rising, the turn between has been found already; a second find right beside it would leave
+    // no valley between the two, and both would be dropped.
+    else if (a <= 0 && b <= 0 && i > 0 && samples.slope[i - 1] <= 0 && isKink(samples, i)) {
       found.push({ u: samples.u[i], value: samples.value[i], edge: null });
     }
   }
   if (samples.slope[n - 1] > 0)
     found.push({ u: samples.u[n - 1], value: samples.value[n - 1], edge: 'high' });
-  return found.filter((peak, k) => isProminent(samples, found, peak, k));
+  return keepProminent(samples, found);
 }
 
 /** The sample stands above both neighbours though no slope told so (one-sided slopes at a corner). */
@@ -62,16 +64,28 @@ function bisect(samples: Sampled, low: number, high: number): Maximum {
   return end.value > best.value ? { u: a, value: end.value, edge: null } : { ...best, edge: null };
 }
 
-/** A peak must rise above the lowest sample between it and its neighbours on both sides (edges: on one). */
-function isProminent(samples: Sampled, all: Maximum[], peak: Maximum, k: number): boolean {
-  const from = k > 0 ? all[k - 1].u : Number.NEGATIVE_INFINITY;
-  const to = k + 1 < all.length ? all[k + 1].u : Number.POSITIVE_INFINITY;
-  const left = valley(samples, from, peak.u);
-  const right = valley(samples, peak.u, to);
-  const rises = (low: number) => peak.value - low > PROMINENCE;
-  if (peak.edge === 'low') return rises(right);
-  if (peak.edge === 'high') return rises(left);
-  return rises(left) && rises(right);
+/**
+ * A peak must rise above the lowest sample between it and its neighbours on both sides (edges: on one). Of two peaks with no
+ * valley between them only the lower one goes, never both.
+ */
+function keepProminent(samples: Sampled, found: readonly Maximum[]): Maximum[] {
+  const kept = [...found];
+  for (let k = 0; k < kept.length; ) {
+    const peak = kept[k];
+    const before = kept[k - 1];
+    const after = kept[k + 1];
+    const left = valley(samples, before?.u ?? Number.NEGATIVE_INFINITY, peak.u);
+    const right = valley(samples, peak.u, after?.u ?? Number.POSITIVE_INFINITY);
+    const isLow = peak.edge !== 'low' && !(peak.value - left > PROMINENCE);
+    const isFlat = peak.edge !== 'high' && !(peak.value - right > PROMINENCE);
+    if (isFlat && after && after.value <= peak.value) kept.splice(k + 1, 1);
+    else if (isLow && before && before.value < peak.value) kept.splice(--k, 1);
+    else if (isLow || isFlat) {
+      kept.splice(k, 1);
+      k = Math.max(0, k - 1);
+    } else k++;
+  }
+  return kept;
 }
 
 function valley(samples: Sampled, from: number, to: number): number {
