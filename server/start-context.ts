@@ -1,7 +1,8 @@
 import type { Config } from './config/environment';
 import { keptSecret } from './config/secret';
 import type { Context } from './context';
-import { Database, databaseFile } from './db/database';
+import { Database } from './db/database';
+import { databaseFile } from './db/database-file';
 import { createLogger } from './logger';
 import { Mailer } from './mail/mailer';
 import { Background } from './services/background';

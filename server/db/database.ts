@@ -1,9 +1,7 @@
-import { mkdirSync } from 'node:fs';
+import { closeSync, mkdirSync, openSync } from 'node:fs';
 import path from 'node:path';
 import type { DataSource, EntityManager } from 'typeorm';
 import { createDataSource } from './data-source';
-
-export const databaseFile = (dataFolder: string): string => path.join(dataFolder, 'millpond.db');
 
 /**
  * Reads go straight to `manager`. Every write goes through `write`, one at a time: the driver has a single
@@ -16,6 +14,8 @@ export class Database {
 
   static async open(file: string): Promise<Database> {
     mkdirSync(path.dirname(file), { recursive: true, mode: 0o700 });
+    // Made by us, so that only the server's user may read it; SQLite gives its side files the same mode.
+    closeSync(openSync(file, 'a', 0o600));
     const source = createDataSource(file);
     await source.initialize();
     return new Database(source);

@@ -1,5 +1,5 @@
 import { createBoardSchema, setMemberSchema, updateBoardSchema } from '@shared/schemas/board.schema';
-import { pageQuerySchema } from '@shared/schemas/common.schema';
+import { pageQuerySchema, versionQuerySchema } from '@shared/schemas/common.schema';
 import { createBoard, deleteBoard, listBoards, readBoard, updateBoard } from '../services/board.service';
 import { removeMember, setMember } from '../services/member.service';
 import { created, done, route } from './route';
@@ -26,8 +26,9 @@ export const boardRoutes = [
   }),
   route('delete', '/boards/:boardId', {
     access: 'signed-in',
-    handle: async ({ ctx, actor, params }) => {
-      await deleteBoard(ctx, actor, params.boardId);
+    query: versionQuerySchema,
+    handle: async ({ ctx, actor, params, query }) => {
+      await deleteBoard(ctx, actor, params.boardId, query.version);
       return done();
     },
   }),

@@ -79,12 +79,7 @@ export async function updateBoard(
 ): Promise<BoardDetail> {
   return ctx.db.write(async (manager) => {
     await openBoard(manager, actor, boardId, 'manage');
-    const board = await manager.findOneOrFail(BoardEntity, {
-      where: { id: boardId },
-      relations: { updatedBy: true },
-    });
-    if (board.version !== body.version)
-      throw stale(await boardDetail(manager, actor, boardId), personRef(board.updatedBy), board.updatedAt);
+    const board = await requireCurrent(manager, actor, boardId, body.version);
     const { name = board.name, description = board.description } = body;
     await manager.update(
       BoardEntity,
@@ -101,9 +96,31 @@ export async function updateBoard(
   });
 }
 
-export async function deleteBoard(ctx: Context, actor: Actor, boardId: string): Promise<void> {
+async function requireCurrent(
+  manager: EntityManager,
+  actor: Actor,
+  boardId: string,
+  version: number,
+): Promise<BoardEntity> {
+  const board = await manager.findOneOrFail(BoardEntity, {
+    where: { id: boardId },
+    relations: { updatedBy: true },
+  });
+  if (board.version !== version)
+    throw stale(await boardDetail(manager, actor, boardId), personRef(board.updatedBy), board.updatedAt);
+  return board;
+}
+
+/** With its rails and revisions. */
+export async function deleteBoard(
+  ctx: Context,
+  actor: Actor,
+  boardId: string,
+  version: number,
+): Promise<void> {
   await ctx.db.write(async (manager) => {
     await openBoard(manager, actor, boardId, 'manage');
+    await requireCurrent(manager, actor, boardId, version);
     await manager.delete(BoardEntity, { id: boardId });
   });
 }

@@ -1,6 +1,7 @@
 import { searchSettingsSchema } from '@shared/schemas/rail.schema';
 import type { EntityManager } from 'typeorm';
 import type { Context } from '../../context';
+import { touchBoard } from '../../services/board-access';
 import { partsById } from '../../services/part-list.service';
 import { partKeys } from '../../services/part-view';
 import { nameKey, storeUsedParts } from '../../services/rail-checks';
@@ -39,6 +40,7 @@ export async function seedDemo(ctx: Context): Promise<void> {
     await storeRevision(manager, board, engineer, 'First sizing, from the power budget.', daysAgo(6));
     await seedRails(manager, daysAgo(2), false);
     await storeRevision(manager, board, engineer, 'Core bank made smaller for the new outline.', daysAgo(1));
+    await touchBoard(manager, board.id, daysAgo(1));
   });
 }
 

@@ -1,0 +1,3 @@
+import path from 'node:path';
+
+export const databaseFile = (dataFolder: string): string => path.join(dataFolder, 'millpond.db');
