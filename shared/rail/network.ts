@@ -37,25 +37,29 @@ export function lineModel(
   };
 }
 
-/** The rail of a document as the engine takes it. */
-export function networkOf(document: RailDocument): RailNetwork {
-  const { rail } = document;
-  const parts = new Map(document.parts.map((part) => [part.id, part]));
-  const lines = document.bank.flatMap((line) => {
-    const part = parts.get(line.part);
-    return part ? [lineModel(rail, part, line)] : [];
-  });
+/** A rail with lines already made. */
+export function networkWith(spec: RailSpec, lines: LineModel[]): RailNetwork {
   return {
-    source: sourceModel(rail.source),
-    ...(rail.plane && {
+    source: sourceModel(spec.source),
+    ...(spec.plane && {
       plane: {
-        capacitance_F: rail.plane.capacitance_F,
-        resistance_ohm: rail.plane.resistance_ohm,
-        inductance_H: rail.plane.inductance_H,
+        capacitance_F: spec.plane.capacitance_F,
+        resistance_ohm: spec.plane.resistance_ohm,
+        inductance_H: spec.plane.inductance_H,
       },
     }),
     lines,
-    ...(rail.package && { package: rail.package satisfies PackageModel }),
-    observe: rail.observe,
+    ...(spec.package && { package: spec.package satisfies PackageModel }),
+    observe: spec.observe,
   };
+}
+
+/** The rail of a document as the engine takes it. */
+export function networkOf(document: RailDocument): RailNetwork {
+  const parts = new Map(document.parts.map((part) => [part.id, part]));
+  const lines = document.bank.flatMap((line) => {
+    const part = parts.get(line.part);
+    return part ? [lineModel(document.rail, part, line)] : [];
+  });
+  return networkWith(document.rail, lines);
 }

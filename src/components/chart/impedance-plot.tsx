@@ -1,0 +1,162 @@
+import type { Data, Layout } from 'plotly.js-dist-min';
+import { useMemo } from 'react';
+import type { FrequencyAxis, ImpedanceAxis } from './axis';
+import { Plot } from './plotly';
+import { useTokens } from './tokens';
+
+/** A curve over frequency; `style` names what it means, not how it looks. */
+export interface PlotCurve {
+  name: string;
+  style: 'total' | 'line' | 'other';
+  frequency_Hz: Float64Array;
+  magnitude_ohm: Float64Array;
+}
+
+interface ImpedancePlotProps {
+  x: FrequencyAxis;
+  y: ImpedanceAxis;
+  curves: readonly PlotCurve[];
+  /** The waterline at the total's frequencies, NaN outside the band: where the total lies above, the gap is filled. */
+  target_ohm: Float64Array | null;
+  /** A stretch of the axis was dragged over, or (null) the whole is wanted again. */
+  onZoom: (span_Hz: [number, number] | null) => void;
+}
+
+/** Room in px at the left for the scale's numbers and at the bottom for those of the frequency axis. */
+export const SCALE_WIDTH = 64;
+export const TICK_HEIGHT = 26;
+const TOP = 8;
+
+const config = { displayModeBar: false, responsive: false, doubleClick: 'reset' as const, scrollZoom: false };
+
+/** The impedance chart: double-logarithmic, margins fixed so that what stands below lines up with it to the pixel. */
+export default function ImpedancePlot({ x, y, curves, target_ohm, onZoom }: ImpedancePlotProps) {
+  const tokens = useTokens();
+  const data = useMemo<Data[]>(() => {
+    const traces: Data[] = [];
+    const lines = curves.filter((curve) => curve.style === 'line');
+    if (lines.length > 0) traces.push(joined(lines, tokens.stone));
+    const total = curves.find((curve) => curve.style === 'total');
+    if (total && target_ohm) traces.push(...broken(total, target_ohm, tokens.kingfisher));
+    for (const curve of curves.filter((one) => one.style === 'other'))
+      traces.push(trace(curve, { color: tokens.stone, width: 1.4, dash: '5px,4px' }));
+    if (total) traces.push(trace(total, { color: tokens.ink, width: 2.2 }));
+    return traces;
+  }, [curves, target_ohm, tokens]);
+  const layout = useMemo<Partial<Layout>>(
+    () => ({
+      width: x.width + SCALE_WIDTH,
+      height: y.height + TOP + TICK_HEIGHT,
+      margin: { l: SCALE_WIDTH, r: 0, t: TOP, b: TICK_HEIGHT, pad: 0 },
+      paper_bgcolor: 'transparent',
+      plot_bgcolor: 'transparent',
+      showlegend: false,
+      hovermode: false,
+      dragmode: 'zoom',
+      font: { family: 'JetBrains Mono, monospace', size: 12, color: tokens.stone },
+      xaxis: {
+        ...SCALE,
+        range: [Math.log10(x.low_Hz), Math.log10(x.high_Hz)],
+        gridcolor: tokens.hairline,
+        linecolor: tokens.hairline,
+        tickcolor: tokens.stone,
+        minor: { ticks: 'inside', ticklen: 4, tickcolor: tokens.stone, dtick: 'D1', nticks: 9 },
+        ticksuffix: 'Hz',
+      },
+      yaxis: {
+        ...SCALE,
+        range: [Math.log10(y.low_ohm), Math.log10(y.high_ohm)],
+        gridcolor: tokens.hairline,
+        linecolor: tokens.hairline,
+        tickcolor: tokens.stone,
+        ticksuffix: 'Ω',
+        fixedrange: true,
+      },
+    }),
+    [x, y, tokens],
+  );
+  return (
+    <Plot
+      data={data}
+      layout={layout}
+      config={config}
+      onRelayout={(event: Readonly<Record<string, unknown>>) => {
+        const from = event['xaxis.range[0]'];
+        const to = event['xaxis.range[1]'];
+        if (typeof from === 'number' && typeof to === 'number') onZoom([10 ** from, 10 ** to]);
+        else if (event['xaxis.autorange'] === true) onZoom(null);
+      }}
+    />
+  );
+}
+
+const SCALE = {
+  type: 'log' as const,
+  dtick: 1,
+  showline: true,
+  mirror: true,
+  zeroline: false,
+  exponentformat: 'SI' as const,
+  ticklabelstandoff: 4,
+};
+
+function trace(curve: PlotCurve, line: { color: string; width: number; dash?: string }): Data {
+  return {
+    type: 'scatter',
+    mode: 'lines',
+    x: curve.frequency_Hz,
+    y: curve.magnitude_ohm,
+    line: { shape: 'linear', ...line } as never,
+    hoverinfo: 'skip',
+    name: curve.name,
+  };
+}
+
+/** Many thin lines as one trace with gaps: the library's cost is by trace, not by point. */
+function joined(curves: readonly PlotCurve[], color: string): Data {
+  const size = curves.reduce((sum, curve) => sum + curve.frequency_Hz.length + 1, 0);
+  const x = new Float64Array(size);
+  const y = new Float64Array(size);
+  let at = 0;
+  for (const curve of curves) {
+    x.set(curve.frequency_Hz, at);
+    y.set(curve.magnitude_ohm, at);
+    at += curve.frequency_Hz.length;
+    x[at] = Number.NaN;
+    y[at] = Number.NaN;
+    at++;
+  }
+  return {
+    type: 'scatter',
+    mode: 'lines',
+    x,
+    y,
+    connectgaps: false,
+    line: { color, width: 0.8 },
+    hoverinfo: 'skip',
+    name: 'bank lines',
+  };
+}
+
+/** The area between waterline and curve, where the curve lies above. */
+function broken(total: PlotCurve, target_ohm: Float64Array, color: string): Data[] {
+  const from = target_ohm.findIndex((value) => !Number.isNaN(value));
+  if (from < 0) return [];
+  let to = target_ohm.length;
+  while (to > from && Number.isNaN(target_ohm[to - 1])) to--;
+  const x = total.frequency_Hz.subarray(from, to);
+  const base = target_ohm.subarray(from, to);
+  const top = total.magnitude_ohm.subarray(from, to).map((value, i) => Math.max(value, base[i]));
+  if (top.every((value, i) => value === base[i])) return [];
+  const shared = {
+    type: 'scatter' as const,
+    mode: 'lines' as const,
+    x,
+    line: { width: 0 },
+    hoverinfo: 'skip' as const,
+  };
+  return [
+    { ...shared, y: base, name: 'waterline' },
+    { ...shared, y: top, name: 'breaks the surface', fill: 'tonexty', fillcolor: color },
+  ];
+}

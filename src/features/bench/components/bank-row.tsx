@@ -1,0 +1,184 @@
+import type { Part } from '@shared/schemas/part.schema';
+import { formatLength, formatQuantity } from '@shared/units/format';
+import { type KeyboardEvent, useState } from 'react';
+import type { FrequencyAxis } from '@/components/chart/axis';
+import { ShareStrip } from '@/components/chart/share-strip';
+import { cx } from '@/lib/class-names';
+import type { DraftLine } from '../lib/bank-history';
+import { partName } from '../lib/part-name';
+import { LineDetails } from './line-details';
+
+export interface RowStrip {
+  frequency_Hz: Float64Array;
+  share: Float64Array;
+  /** ESL + mount + path of one capacitor. */
+  inductance_H: number | null;
+}
+
+interface BankRowProps {
+  line: DraftLine;
+  part: Part | undefined;
+  axis: FrequencyAxis;
+  strip: RowStrip | null;
+  /** Share at the pointer's frequency, 1 = all. */
+  cursorShare: number | null;
+  /** What stands in the preview instead of the count, e.g. the count before. */
+  before: number | null;
+  readOnly: boolean;
+  onCount: (count: number) => void;
+  onChange: (patch: Partial<DraftLine>) => string | null;
+  onRemove: () => void;
+  onMove: (by: number) => void;
+}
+
+/** One line of the bank: its name, its count, and its share of the current on the chart's axis. */
+export function BankRow(props: BankRowProps) {
+  const { line, part, axis, strip, cursorShare, before, readOnly, onCount, onMove } = props;
+  const [open, setOpen] = useState(false);
+  const name = part ? partName(part) : 'unknown part';
+  /** Does what a key asks for; false when the row does not know it. */
+  const pressed = (key: string): boolean => {
+    if (key === 'ArrowUp') onMove(-1);
+    else if (key === 'ArrowDown') onMove(1);
+    else if (readOnly) return false;
+    else if (key === 'ArrowLeft' || key === '-') onCount(line.count - 1);
+    else if (key === 'ArrowRight' || key === '+') onCount(line.count + 1);
+    else if (key === 'Enter') setOpen(!open);
+    else if (key === 'Delete') props.onRemove();
+    else return false;
+    return true;
+  };
+  const onKeyDown = (event: KeyboardEvent<HTMLButtonElement>) => {
+    if (!pressed(event.key)) return;
+    event.preventDefault();
+  };
+  return (
+    <div className="border-b">
+      <div
+        className={cx(
+          'relative min-h-[46px] py-1.5 focus-within:bg-wash/40 lg:grid',
+          line.count === 0 && 'opacity-60',
+        )}
+        style={{ gridTemplateColumns: 'var(--score-left) minmax(0, 1fr)' }}
+      >
+        <div className="flex items-start justify-between gap-2 pr-3">
+          <button
+            type="button"
+            data-row
+            aria-label={`${name}, ${line.count}`}
+            aria-expanded={readOnly ? undefined : open}
+            onKeyDown={onKeyDown}
+            onClick={() => !readOnly && setOpen(!open)}
+            className="min-w-0 text-left"
+            title={part?.partNumber}
+          >
+            <span className="block truncate font-semibold">
+              {line.locked && <span title="the mix search leaves it as it is">locked · </span>}
+              {name}
+            </span>
+            <span className="block truncate text-small text-stone">
+              {formatQuantity(strip?.inductance_H, 'H')} each
+              {line.distance_m !== null && ` · ${formatLength(line.distance_m)}`}
+              {line.side === 'bottom' && ' · bottom'}
+            </span>
+          </button>
+          <CountStepper
+            count={line.count}
+            before={before}
+            readOnly={readOnly}
+            name={name}
+            onCount={onCount}
+          />
+        </div>
+        <div className="relative flex items-end max-lg:ml-[var(--score-left)]">
+          {strip && (
+            <ShareStrip
+              axis={axis}
+              frequency_Hz={strip.frequency_Hz}
+              share={strip.share}
+              tone="line"
+              label={`share of the load current of ${name} over frequency`}
+            />
+          )}
+          {cursorShare !== null && <CursorShare share={cursorShare} />}
+        </div>
+      </div>
+      {open && part && !readOnly && (
+        <LineDetails line={line} part={part} onChange={props.onChange} onRemove={props.onRemove} />
+      )}
+    </div>
+  );
+}
+
+/** The share under the pointer, in per cent. */
+export function CursorShare({ share }: { share: number }) {
+  return (
+    <span className="pointer-events-none absolute top-0 right-0 bg-paper/80 px-1 text-small text-stone">
+      {share >= 0.0005 ? `${formatQuantity(share * 100, '', { digits: share < 0.1 ? 2 : 3 })} %` : '0 %'}
+    </span>
+  );
+}
+
+interface StepperProps {
+  count: number;
+  before: number | null;
+  readOnly: boolean;
+  name: string;
+  onCount: (count: number) => void;
+}
+
+function CountStepper({ count, before, readOnly, name, onCount }: StepperProps) {
+  const [typed, setTyped] = useState<string | null>(null);
+  if (readOnly)
+    return (
+      <span className="shrink-0 font-bold">
+        {before !== null && before !== count ? (
+          <span className="font-normal text-stone">{before} → </span>
+        ) : null}
+        {count}
+      </span>
+    );
+  const commit = () => {
+    if (typed !== null && /^\d{1,4}$/.test(typed.trim())) onCount(Number(typed));
+    setTyped(null);
+  };
+  const step =
+    'flex size-6 items-center justify-center text-base text-deep hover:bg-wash disabled:opacity-40';
+  return (
+    <span className="flex shrink-0 items-center">
+      <button
+        type="button"
+        tabIndex={-1}
+        className={step}
+        disabled={count === 0}
+        aria-label={`one ${name} fewer`}
+        onClick={() => onCount(count - 1)}
+      >
+        −
+      </button>
+      <input
+        aria-label={`count of ${name}`}
+        tabIndex={-1}
+        inputMode="numeric"
+        value={typed ?? count}
+        onChange={(event) => setTyped(event.target.value)}
+        onBlur={commit}
+        onKeyDown={(event) => {
+          event.stopPropagation();
+          if (event.key === 'Enter') commit();
+          if (event.key === 'Escape') setTyped(null);
+        }}
+        className="w-8 border-0 bg-transparent text-center font-bold"
+      />
+      <button
+        type="button"
+        tabIndex={-1}
+        className={step}
+        aria-label={`one ${name} more`}
+        onClick={() => onCount(count + 1)}
+      >
+        +
+      </button>
+    </span>
+  );
+}

@@ -1,0 +1,219 @@
+import { railDocument } from '@shared/rail/document';
+import type { Part } from '@shared/schemas/part.schema';
+import type { RailWithParts } from '@shared/schemas/rail.schema';
+import { useQuery } from '@tanstack/react-query';
+import { type ReactNode, useCallback, useMemo, useState } from 'react';
+import { Button } from '@/components/ui/button';
+import { Notice } from '@/components/ui/notice';
+import { Section } from '@/components/ui/page';
+import { messageOf } from '@/lib/problem';
+import { candidatesQuery } from '../api/part-choice';
+import { useAnalysis } from '../hooks/use-analysis';
+import { useBench } from '../hooks/use-bench';
+import { useBenchKeys } from '../hooks/use-bench-keys';
+import { mixIn, useMixSearch } from '../hooks/use-mix-search';
+import { type DraftLine, isSameLine, keyed } from '../lib/bank-history';
+import { cautionsFor } from '../lib/cautions';
+import { bankOfMix } from '../lib/mix';
+import { BenchFacts } from './bench-facts';
+import { PartPicker } from './part-picker';
+import { ConflictDialog, SaveStatus } from './save-status';
+import { chartSpan, memberName, Score } from './score';
+import { SearchPanel } from './search-panel';
+import { SidePanel } from './side-panel';
+
+interface BenchProps {
+  server: RailWithParts;
+  personId: string;
+  canEdit: boolean;
+  /** Address of the specification form, for who may edit. */
+  editTo: string | null;
+  onSaved: (answer: RailWithParts) => void;
+  /** Puts the save state where the page wants it (the header). */
+  renderStatus: (status: ReactNode) => ReactNode;
+}
+
+/** The working screen of one rail. Mounted anew for each rail (by key). */
+export function Bench({ server, personId, canEdit, editTo, onSaved, renderStatus }: BenchProps) {
+  const { spec } = server.rail;
+  const bench = useBench({ server, personId, onSaved });
+  const [picking, setPicking] = useState(false);
+  const [showLines, setShowLines] = useState(true);
+  const [previewing, setPreviewing] = useState(false);
+  const [zoom, setZoom] = useState<[number, number] | null>(null);
+  const whole = useMemo(() => chartSpan(spec.band_Hz), [spec.band_Hz]);
+  const candidates = useQuery(candidatesQuery(spec.voltage_V));
+  const search = useMixSearch();
+
+  const mix = mixIn(search.state);
+  const known = useMemo(
+    () => new Map([...(candidates.data ?? []).map((part) => [part.id, part] as const), ...bench.parts]),
+    [candidates.data, bench.parts],
+  );
+  const mixLines = useMemo(
+    () => (mix ? bankOfMix(bench.lines, mix, known) : null),
+    [mix, bench.lines, known],
+  );
+  const present = useAnalysis('bench', spec, bench.lines, known, whole);
+  const found = useAnalysis('preview', spec, mixLines, known, whole);
+  const isPreview = previewing && mixLines !== null;
+  const shown = isPreview ? found : present;
+  const shownLines = isPreview ? mixLines : bench.lines;
+  const other = isPreview
+    ? present.analysis && { name: 'present bank', analysis: present.analysis }
+    : found.analysis && { name: 'best mix', analysis: found.analysis };
+  const before = useMemo(
+    () => (isPreview ? new Map(bench.lines.map((line) => [line.partId, line.count])) : null),
+    [isPreview, bench.lines],
+  );
+
+  const startSearch = useCallback(() => {
+    if (!candidates.data || candidates.data.length === 0 || !canEdit) return;
+    const ids = bench.search.candidateIds ?? candidates.data.map((part) => part.id);
+    setPreviewing(false);
+    void search.start(railDocument(spec, bench.lines, known, { ...bench.search, candidateIds: ids }));
+  }, [candidates.data, canEdit, bench.search, bench.lines, known, spec, search.start]);
+
+  const addPart = (part: Part) => {
+    bench.learn([part]);
+    const there = bench.lines.find((line) => line.partId === part.id);
+    if (there) bench.edit({ type: 'count', key: there.key, count: there.count + 1, at: Date.now() });
+    else {
+      const [line] = keyed([
+        { partId: part.id, count: 1, mount_H: null, distance_m: null, side: 'top', locked: false },
+      ]);
+      bench.edit({ type: 'add', line });
+    }
+    setPicking(false);
+  };
+  const change = (key: string, patch: Partial<DraftLine>): string | null => {
+    const line = bench.lines.find((one) => one.key === key);
+    if (!line) return null;
+    const next = { ...line, ...patch };
+    if (bench.lines.some((one) => one.key !== key && isSameLine(one, next)))
+      return 'another line has this part mounted alike: raise its count instead';
+    bench.edit({ type: 'change', key, patch });
+    return null;
+  };
+  const adopt = () => {
+    if (!mixLines) return;
+    bench.learn(mixLines.flatMap((line) => known.get(line.partId) ?? []));
+    bench.edit({ type: 'replace', lines: mixLines });
+    setPreviewing(false);
+    search.reset();
+  };
+  useBenchKeys({
+    undo: () => canEdit && bench.edit({ type: 'undo' }),
+    redo: () => canEdit && bench.edit({ type: 'redo' }),
+    search: startSearch,
+    add: () => canEdit && setPicking(true),
+    lines: () => setShowLines((on) => !on),
+  });
+  const cautions = cautionsFor(spec, shownLines, known, shown.analysis?.cavity_Hz ?? []);
+  return (
+    <div className="flex min-w-0 flex-col xl:flex-row">
+      {renderStatus(<SaveStatus save={bench.save} />)}
+      <ConflictDialog save={bench.save} onSettle={bench.settle} />
+      <div className="min-w-0 flex-1 py-5 pr-5 pl-6">
+        {isPreview && (
+          <p className="mb-3 border-l-2 border-deep pl-3">
+            <strong>Preview of the mix found.</strong> The bank is unchanged; its curve is dashed.
+          </p>
+        )}
+        <Score
+          spec={spec}
+          lines={shownLines}
+          parts={known}
+          analysis={shown.analysis}
+          other={other}
+          before={before}
+          span_Hz={zoom ?? whole}
+          onSpan={setZoom}
+          showLines={showLines}
+          readOnly={!canEdit || isPreview}
+          facts={<BenchFacts spec={spec} editTo={editTo} showLines={showLines} onShowLines={setShowLines} />}
+          onCount={(key, count) => bench.edit({ type: 'count', key, count, at: Date.now() })}
+          onChange={change}
+          onRemove={(key) => bench.edit({ type: 'remove', key })}
+          footer={
+            <div className="flex flex-wrap items-center justify-between gap-4 py-3">
+              {canEdit ? (
+                <div className="flex gap-5">
+                  <Button variant="plain" onClick={() => setPicking(true)}>
+                    + add a part
+                  </Button>
+                  <Button
+                    variant="plain"
+                    disabled={!bench.canUndo}
+                    onClick={() => bench.edit({ type: 'undo' })}
+                  >
+                    undo
+                  </Button>
+                  <Button
+                    variant="plain"
+                    disabled={!bench.canRedo}
+                    onClick={() => bench.edit({ type: 'redo' })}
+                  >
+                    redo
+                  </Button>
+                </div>
+              ) : (
+                <p className="text-stone">You see this rail; engineers of the board change it.</p>
+              )}
+              <p className="text-small text-stone max-lg:hidden">
+                ↑↓ line · ←→ count · A add · U undo · F search · L lines
+              </p>
+            </div>
+          }
+        />
+        {bench.lines.length === 0 && !isPreview && (
+          <p className="max-w-prose pb-4 text-stone">
+            The bank is empty: what you see is source and planes alone.
+            {canEdit && ' Add a part, or let the mix search find the smallest bank.'}
+          </p>
+        )}
+      </div>
+      <aside
+        aria-label="results"
+        className="shrink-0 border-t px-6 py-5 xl:w-[18.5rem] xl:border-t-0 xl:border-l"
+      >
+        <SidePanel analysis={shown.analysis} error={shown.error} nameOf={(id) => memberName(id, known)}>
+          {canEdit && (
+            <Section title="mix search">
+              <SearchPanel
+                settings={bench.search}
+                candidates={candidates.data}
+                candidatesError={candidates.isError ? messageOf(candidates.error) : null}
+                state={search.state}
+                previewing={isPreview}
+                readOnly={!canEdit}
+                onSettings={bench.setSearch}
+                onSearch={startSearch}
+                onStop={search.stop}
+                onPreview={setPreviewing}
+                onAdopt={adopt}
+                onDismiss={search.reset}
+              />
+            </Section>
+          )}
+          <Section title="cautions">
+            <div className="flex flex-col gap-3">
+              {cautions.map((one) => (
+                <Notice key={one.title} tone="caution" title={`! ${one.title}`} className="text-small">
+                  {one.text}
+                </Notice>
+              ))}
+              <p className="text-small text-stone">
+                Estimates from models: measure the rail before release. Local codes, the applicable safety
+                standard and a qualified engineer’s judgement come first.
+              </p>
+            </div>
+          </Section>
+        </SidePanel>
+      </aside>
+      {picking && (
+        <PartPicker open voltage_V={spec.voltage_V} onPick={addPart} onClose={() => setPicking(false)} />
+      )}
+    </div>
+  );
+}

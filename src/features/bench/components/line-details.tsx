@@ -1,0 +1,86 @@
+import type { Part } from '@shared/schemas/part.schema';
+import { formatQuantity } from '@shared/units/format';
+import { useState } from 'react';
+import { Link } from 'react-router-dom';
+import { Button } from '@/components/ui/button';
+import { Field } from '@/components/ui/field';
+import { Checkbox, Select } from '@/components/ui/input';
+import { QuantityInput } from '@/components/ui/quantity-input';
+import { paths } from '@/config/paths';
+import type { DraftLine } from '../lib/bank-history';
+
+interface LineDetailsProps {
+  line: DraftLine;
+  part: Part;
+  /** Applies a change; answers why not, when it may not be. */
+  onChange: (patch: Partial<DraftLine>) => string | null;
+  onRemove: () => void;
+}
+
+/** How a line is mounted and how far from the load: opened under its row. */
+export function LineDetails({ line, part, onChange, onRemove }: LineDetailsProps) {
+  const [refusal, setRefusal] = useState<string | null>(null);
+  const change = (patch: Partial<DraftLine>) => setRefusal(onChange(patch));
+  return (
+    <div className="mb-3 border-l-2 border-shallow py-1 pl-3">
+      <p className="mb-2 text-small text-stone">
+        <Link to={paths.part(part.id)} className="text-deep underline-offset-4 hover:underline">
+          {part.partNumber}
+        </Link>{' '}
+        · {formatQuantity(part.esr_ohm, 'Ω')} ESR · {formatQuantity(part.esl_H, 'H')} ESL ·{' '}
+        {formatQuantity(part.rated_voltage_V, 'V', { trim: true })} rated
+      </p>
+      <div className="grid max-w-3xl grid-cols-2 gap-4 sm:grid-cols-4">
+        <Field label="mounting inductance" hint={`usual: ${formatQuantity(part.mount_H, 'H')}`}>
+          {(control) => (
+            <QuantityInput
+              {...control}
+              unit="H"
+              value={line.mount_H}
+              placeholder={formatQuantity(part.mount_H, 'H')}
+              onCommit={(mount_H) => change({ mount_H })}
+            />
+          )}
+        </Field>
+        <Field label="distance to the load" hint="adds the path on the planes">
+          {(control) => (
+            <QuantityInput
+              {...control}
+              unit="mm"
+              value={line.distance_m}
+              placeholder="not planned"
+              onCommit={(distance_m) => change({ distance_m })}
+            />
+          )}
+        </Field>
+        <Field label="side">
+          {(control) => (
+            <Select
+              {...control}
+              value={line.side}
+              onChange={(event) => change({ side: event.target.value === 'bottom' ? 'bottom' : 'top' })}
+            >
+              <option value="top">top</option>
+              <option value="bottom">bottom</option>
+            </Select>
+          )}
+        </Field>
+        <div className="flex flex-col justify-center gap-2">
+          <Checkbox
+            label="locked for the search"
+            checked={line.locked}
+            onChange={(event) => change({ locked: event.target.checked })}
+          />
+          <Button variant="plain" className="w-fit text-kingfisher" onClick={onRemove}>
+            Remove the line
+          </Button>
+        </div>
+      </div>
+      {refusal && (
+        <p role="alert" className="mt-2 text-small text-kingfisher">
+          ▲ {refusal}
+        </p>
+      )}
+    </div>
+  );
+}

@@ -1,0 +1,99 @@
+import { formatDecibel, formatQuantity } from '@shared/units/format';
+import type { BenchAnalysis } from '@workers/analysis/analysis.interface';
+import type { ReactNode } from 'react';
+import { Section } from '@/components/ui/page';
+import { cx } from '@/lib/class-names';
+import { moneyText } from '../lib/mix';
+
+interface SidePanelProps {
+  analysis: BenchAnalysis | null;
+  error: { message: string; field: string | null } | null;
+  nameOf: (member: string | null) => string;
+  children: ReactNode;
+}
+
+const SHOWN_BREAKS = 6;
+
+/** What matters at the right: headroom, what breaks the surface and why, what the bank comes to. */
+export function SidePanel({ analysis, error, nameOf, children }: SidePanelProps) {
+  return (
+    <div className="flex flex-col gap-7">
+      {error && (
+        <p role="alert" className="text-kingfisher">
+          ▲ no result: {error.message}
+        </p>
+      )}
+      {analysis && (
+        <>
+          <Section title="headroom, catalogue values">
+            <p
+              data-testid="headroom"
+              aria-live="polite"
+              className={cx('text-figure font-bold', analysis.holds ? 'text-reed' : 'text-kingfisher')}
+            >
+              {formatDecibel(analysis.tightest.headroom_dB)}
+            </p>
+            <p className="text-stone">
+              {analysis.holds ? 'holds' : 'short'}: {formatQuantity(analysis.tightest.impedance_ohm, 'Ω')} at{' '}
+              {formatQuantity(analysis.tightest.frequency_Hz, 'Hz')}
+            </p>
+          </Section>
+          <Breaks analysis={analysis} nameOf={nameOf} />
+          <Section title="bank">
+            <dl className="grid grid-cols-[1fr_auto] gap-x-3">
+              <dt>parts · kinds</dt>
+              <dd className="text-right" data-testid="parts-kinds">
+                {analysis.figures.parts} · {analysis.figures.kinds}
+              </dd>
+              <dt>cost</dt>
+              <dd className="text-right">{moneyText(analysis.figures.cost)}</dd>
+              <dt>area</dt>
+              <dd className="text-right">{formatQuantity(analysis.figures.area_mm2, 'mm²')}</dd>
+            </dl>
+          </Section>
+        </>
+      )}
+      {children}
+    </div>
+  );
+}
+
+function Breaks({
+  analysis,
+  nameOf,
+}: {
+  analysis: BenchAnalysis;
+  nameOf: (member: string | null) => string;
+}) {
+  const { breaks } = analysis;
+  if (breaks.length === 0)
+    return (
+      <Section title="breaks the surface">
+        <p className="text-reed">▽ nothing in the band</p>
+      </Section>
+    );
+  return (
+    <Section title="breaks the surface">
+      <ol className="flex flex-col gap-1">
+        {breaks.slice(0, SHOWN_BREAKS).map((one, i) => (
+          <li key={one.frequency_Hz}>
+            <p className="flex justify-between gap-3">
+              <span>
+                {i + 1} {formatQuantity(one.frequency_Hz, 'Hz')}
+              </span>
+              <span className="text-kingfisher">{formatQuantity(one.impedance_ohm, 'Ω')}</span>
+            </p>
+            <p className="text-small text-stone">
+              {one.inductive && one.capacitive
+                ? `${nameOf(one.inductive)} against ${nameOf(one.capacitive)}`
+                : `${nameOf(one.inductive ?? one.capacitive)} alone`}
+            </p>
+          </li>
+        ))}
+      </ol>
+      {breaks.length > SHOWN_BREAKS && (
+        <p className="text-small text-stone">and {breaks.length - SHOWN_BREAKS} more</p>
+      )}
+    </Section>
+  );
+}

@@ -1,0 +1,56 @@
+import type { RailDocument } from '@shared/schemas/rail-document.schema';
+import type { MixEntry, SearchProgress, SearchResult } from '@shared/search/problem';
+import { SearchClient } from '@workers/search/search.client';
+import { useCallback, useEffect, useRef, useState } from 'react';
+
+export type MixSearchState =
+  | { kind: 'idle' }
+  | { kind: 'running'; progress: SearchProgress | null }
+  | { kind: 'done'; result: SearchResult }
+  /** Stopped by hand: what was known then. */
+  | { kind: 'stopped'; progress: SearchProgress | null }
+  | { kind: 'failed'; message: string };
+
+const client = new SearchClient();
+/** Long enough for most banks to be proven; the best mix and its bound stand when it ends. */
+export const SEARCH_SECONDS = 120;
+
+/** Runs the mix search in its worker. The mix that stands so far is in the state's progress or result. */
+export function useMixSearch() {
+  const [state, setState] = useState<MixSearchState>({ kind: 'idle' });
+  const run = useRef(0);
+  const start = useCallback(async (document: RailDocument) => {
+    const mine = ++run.current;
+    setState({ kind: 'running', progress: null });
+    let last: SearchProgress | null = null;
+    const answer = await client.search({ document, seconds: SEARCH_SECONDS, seed: 1 }, (progress) => {
+      last = progress;
+      if (mine === run.current) setState({ kind: 'running', progress });
+    });
+    if (mine !== run.current) return;
+    if (answer.status === 'done') setState({ kind: 'done', result: answer.value });
+    else if (answer.status === 'failed') setState({ kind: 'failed', message: answer.message });
+    else setState({ kind: 'stopped', progress: last });
+  }, []);
+  const stop = useCallback(() => void client.cancel(), []);
+  const reset = useCallback(() => {
+    run.current++;
+    void client.cancel();
+    setState({ kind: 'idle' });
+  }, []);
+  useEffect(
+    () => () => {
+      run.current++;
+      void client.cancel();
+    },
+    [],
+  );
+  return { state, start, stop, reset };
+}
+
+/** The mix that stands in a state, if there is one. */
+export function mixIn(state: MixSearchState): MixEntry[] | null {
+  if (state.kind === 'running' || state.kind === 'stopped') return state.progress?.mix ?? null;
+  if (state.kind === 'done') return state.result.mix;
+  return null;
+}

@@ -1,0 +1,47 @@
+import type { Part } from '@shared/schemas/part.schema';
+import type { MixEntry, Objective } from '@shared/search/problem';
+import { formatFixed, formatQuantity } from '@shared/units/format';
+import type { DraftLine } from './bank-history';
+import { keyed } from './bank-history';
+
+/**
+ * The bank that a mix makes: locked lines stay, a part that is in the bank already keeps its mount and distance, what the
+ * mix does not use goes.
+ */
+export function bankOfMix(
+  lines: readonly DraftLine[],
+  mix: readonly MixEntry[],
+  parts: ReadonlyMap<string, Part>,
+): DraftLine[] {
+  const byNumber = new Map([...parts.values()].map((part) => [part.partNumber, part]));
+  const found = mix.flatMap(({ id, count }) => {
+    const part = byNumber.get(id);
+    if (!part || count === 0) return [];
+    const placed = lines.find((line) => line.partId === part.id && !line.locked);
+    if (placed) return [{ ...placed, count }];
+    return keyed([{ partId: part.id, count, mount_H: null, distance_m: null, side: 'top', locked: false }]);
+  });
+  found.sort((a, b) => (parts.get(b.partId)?.capacitance_F ?? 0) - (parts.get(a.partId)?.capacitance_F ?? 0));
+  return [...lines.filter((line) => line.locked), ...found];
+}
+
+/** `17 parts`, `1.90 €`, `106 mm²`. */
+export function weightText(objective: Objective, weight: number | null): string {
+  if (weight === null || !Number.isFinite(weight)) return '—';
+  if (objective === 'parts') return `${Math.round(weight)} part${Math.round(weight) === 1 ? '' : 's'}`;
+  if (objective === 'cost') return moneyText(weight);
+  return formatQuantity(weight, 'mm²');
+}
+
+/** A bound is never shown higher than it is: rounded down to the digits shown. */
+export function boundText(objective: Objective, bound: number): string {
+  if (objective === 'parts') return weightText('parts', Math.ceil(bound - 1e-9));
+  const step = objective === 'cost' ? 100 : 10;
+  return weightText(objective, Math.floor(bound * step + 1e-9) / step);
+}
+
+/** Prices as the library has them: three decimals below a tenth, else two. */
+export function moneyText(value: number | null): string {
+  if (value === null) return '—';
+  return `${formatFixed(value, Math.abs(value) < 0.1 && value !== 0 ? 3 : 2)}\u00a0€`;
+}

@@ -1,0 +1,55 @@
+import type { RailSpec } from '@shared/schemas/rail-spec.schema';
+import { formatQuantity } from '@shared/units/format';
+
+const q = (value: number, unit: 'V' | 'A' | 's' | 'Hz' | 'Ω' | 'H' | 'F') =>
+  formatQuantity(value, unit, { trim: true });
+
+function sourceText({ source }: RailSpec): string {
+  switch (source.kind) {
+    case 'open':
+      return 'none';
+    case 'table':
+      return `table, ${source.points.length} points`;
+    case 'rl':
+      return `${q(source.resistance_ohm, 'Ω')} + ${q(source.inductance_H, 'H')}`;
+    case 'damped':
+      return `damped, ${q(source.inductance_H, 'H')}`;
+  }
+}
+
+function targetText({ target, voltage_V }: RailSpec): string {
+  switch (target.kind) {
+    case 'flat':
+      return formatQuantity(target.impedance_ohm, 'Ω');
+    case 'step':
+      return formatQuantity((voltage_V * target.ripple_percent) / 100 / target.step_A, 'Ω');
+    case 'mask':
+      return `mask, ${target.points.length} points`;
+  }
+}
+
+/** What stands in the margin of the bench: each fact of the rail in one line. */
+export function specFacts(spec: RailSpec): [name: string, value: string][] {
+  const facts: [string, string][] = [['rail', q(spec.voltage_V, 'V')]];
+  if (spec.target.kind === 'step') {
+    facts.push(['ripple', `${spec.target.ripple_percent}\u00a0%`]);
+    const rise = spec.load_step ? ` / ${q(spec.load_step.rise_s, 's')}` : '';
+    facts.push(['step', `${q(spec.target.step_A, 'A')}${rise}`]);
+  }
+  facts.push(['target', targetText(spec)]);
+  facts.push(['band', `${q(spec.band_Hz[0], 'Hz')} – ${q(spec.band_Hz[1], 'Hz')}`]);
+  facts.push(['source', sourceText(spec)]);
+  facts.push(['planes', spec.plane ? q(spec.plane.capacitance_F, 'F') : 'none']);
+  if (spec.package) facts.push(['package', q(spec.package.inductance_H, 'H')]);
+  facts.push(['seen at', spec.observe]);
+  facts.push(['values', 'catalogue']);
+  return facts;
+}
+
+/** Corners of the waterline over the band, for drawing. */
+export function waterlinePoints(spec: RailSpec, targetAt: (f: number) => number): [number, number][] {
+  const [low, high] = spec.band_Hz;
+  const corners =
+    spec.target.kind === 'mask' ? spec.target.points.map(([f]) => f).filter((f) => f > low && f < high) : [];
+  return [low, ...corners, high].map((f) => [f, targetAt(f)]);
+}

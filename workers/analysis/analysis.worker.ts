@@ -1,0 +1,4 @@
+import * as Comlink from 'comlink';
+import { Analysis } from './analysis';
+
+Comlink.expose(new Analysis());
