@@ -18,6 +18,9 @@ export function isClosed(prepared: Prepared, bound: number, weight: number): boo
   return bound > budgetBelow(prepared, weight) || bound >= weight * (1 - 2 * SAME);
 }
 
+/** Share of the gap between bound and incumbent that one pass of the deepening covers. */
+const STRIDE = 1 / 3;
+
 /**
  * The next budget of the deepening: the bound plus a third of the gap to the incumbent (the passes far below are over at once
  * and tell little), but for whole weights at least the bound itself, and never past what would still be an improvement.
@@ -28,13 +31,12 @@ export function nextBudget(
   bound: number,
   incumbent: number | null,
   most: number,
-  stride: number,
 ): number {
   const top = incumbent === null ? most : budgetBelow(prepared, incumbent);
-  const gap = incumbent === null ? Math.max(0.3 * bound, 0.02 * most) : incumbent - bound;
+  const gap = incumbent === null ? Math.max(0.9 * bound, 0.06 * most) : incumbent - bound;
   if (prepared.step === 1)
-    return Math.min(top, Math.floor(bound) + Math.max(0, Math.floor(stride * gap) - 1));
+    return Math.min(top, Math.floor(bound) + Math.max(0, Math.floor(STRIDE * gap) - 1));
   const least = 0.01 * (incumbent ?? most);
-  const next = bound + Math.max(stride * gap, least);
+  const next = bound + Math.max(STRIDE * gap, least);
   return next > top - least ? top : next;
 }

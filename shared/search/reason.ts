@@ -51,27 +51,35 @@ export function explainReach(prepared: Prepared, rows: Rows, reach: Reach): stri
   if (best.k < 0) return `${at} what is fixed leaves ${all}, above ${target}, and no candidate may be added.`;
   const part = prepared.parts[best.k];
   const one = part.max === 1 ? `one ${part.id}` : `${part.max} of ${part.id}`;
-  const cause =
-    rows.frequency_Hz[exact] > part.resonance_Hz
-      ? 'its inductance with mount and path is too large'
-      : 'its capacitance is too small';
+  // Z = 1/Y of one piece: its reactance has the sign of −Im Y
+  const re = rows.yx[best.k][exact];
+  const im = rows.yy[best.k][exact];
+  const inductance =
+    im < 0 ? 'its inductance with mount and path is too large' : 'its capacitance is too small';
+  const cause = Math.abs(im) < re ? 'its ESR is too large' : inductance;
   return `${at} even ${one}, the best candidate there, leave ${engineering(best.ohm, 'Ω')}, and the best use of all candidates within their maxima ${all}, above ${target}: ${cause}.`;
 }
 
 /** Every frequency alone is within reach, but every combination has been tried. */
-export function explainExhausted(closest: Tightest | null): string {
-  const all = 'Every combination within the maxima and the number of kinds has been tried and none holds';
-  return closest ? `${all}: ${nearest(closest)}.` : `${all}.`;
+export function explainExhausted(prepared: Prepared, closest: Tightest | null): string {
+  const all = 'Every combination within the maxima and the number of kinds is excluded';
+  return `${all}${nearest(prepared, closest)}.`;
 }
 
 /** The time was up before any mix was found. */
-export function explainTimeout(seconds: number, closest: Tightest | null): string {
+export function explainTimeout(prepared: Prepared, seconds: number, closest: Tightest | null): string {
   const none = `No mix was found in ${Number(seconds.toPrecision(2))} s, and none is proven impossible`;
-  return closest ? `${none}: ${nearest(closest)}.` : `${none}.`;
+  return `${none}${nearest(prepared, closest)}.`;
 }
 
-function nearest(closest: Tightest): string {
+/** How close the best attempt came, and whether the package alone is to blame there. */
+function nearest({ rail }: Prepared, closest: Tightest | null): string {
+  if (!closest) return '';
   const { frequency_Hz, impedance_ohm, target_ohm, headroom_dB } = closest;
   const short = Number(Math.max(0, -headroom_dB).toPrecision(3));
-  return `the closest still has ${engineering(impedance_ohm, 'Ω')} at ${engineering(frequency_Hz, 'Hz')}, ${short} dB above the target of ${engineering(target_ohm, 'Ω')}`;
+  const attempt = `: the closest still has ${engineering(impedance_ohm, 'Ω')} at ${engineering(frequency_Hz, 'Hz')}, ${short} dB above the target of ${engineering(target_ohm, 'Ω')}`;
+  if (!rail.view) return attempt;
+  const series = Math.hypot(rail.view.r, 2 * Math.PI * frequency_Hz * rail.view.l);
+  if (series <= target_ohm) return attempt;
+  return `${attempt}; the package's ${engineering(rail.view.l, 'H')} and ${engineering(rail.view.r, 'Ω')} alone are ${engineering(series, 'Ω')} there`;
 }

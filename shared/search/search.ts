@@ -40,42 +40,51 @@ export function* searchMix(
     if (stage.improve() || report.isDue()) yield report.progress('mix');
 
   const pass = new ProofPass(prepared, stage.rows);
-  const slice = options.nodeSlice ?? 2048;
-  const most = prepared.parts.reduce((sum, part) => sum + part.max * part.weight, 0);
-  const stride = 1 / 3;
-  for (;;) {
-    const { incumbent } = stage;
-    if (incumbent && isClosed(prepared, report.bound, incumbent.weight)) break;
-    if (!incumbent && report.bound > most) return report.missing(explainExhausted(stage.closest), null, true);
-    if (isOver()) break;
-    pass.start(nextBudget(prepared, report.bound, incumbent?.weight ?? null, most, stride));
-    for (;;) {
-      const state = pass.run(slice);
-      report.nodes = pass.nodes;
-      if (state === 'done') break;
-      if (state === 'found') {
-        const mix = pass.mix();
-        const weight = mix.reduce((sum, n, k) => sum + n * prepared.parts[k].weight, 0);
-        const answer = stage.offer(mix, weight);
-        if (answer === 'grown') pass.setRows(stage.rows);
-        if (answer === 'held') pass.accept(budgetBelow(prepared, weight));
-        else pass.reject();
-      }
-      if (isOver()) break;
-      yield report.progress('proof');
-    }
-    if (isOver()) break;
+  const most = (1 + 1e-9) * prepared.parts.reduce((sum, part) => sum + part.max * part.weight, 0);
+  while (!isOver()) {
+    const before = stage.incumbent;
+    if (before && isClosed(prepared, report.bound, before.weight)) break;
+    pass.start(nextBudget(prepared, report.bound, before?.weight ?? null, most));
+    const isExcluded = yield* runPass(pass, stage, report, options.nodeSlice ?? 2048, isOver);
+    if (!isExcluded) break;
     report.bound = Math.max(report.bound, boundAbove(prepared, pass.budget));
+    if (!stage.incumbent && pass.budget >= most)
+      return report.missing(
+        explainExhausted(prepared, stage.closest),
+        stage.closest?.frequency_Hz ?? null,
+        true,
+      );
     yield report.progress('proof');
   }
-  const { incumbent } = stage;
-  if (!incumbent)
-    return report.missing(
-      explainTimeout(report.seconds(), stage.closest),
-      stage.closest?.frequency_Hz ?? null,
-      false,
-    );
-  return report.found(incumbent);
+  if (stage.incumbent) return report.found(stage.incumbent);
+  const reason = explainTimeout(prepared, report.seconds(), stage.closest);
+  return report.missing(reason, stage.closest?.frequency_Hz ?? null, false);
+}
+
+/** One pass to its end; every mix on the way goes to the engine. True: no mix of weight ≤ pass.budget (as it then is) is left. */
+function* runPass(
+  pass: ProofPass,
+  stage: MixStage,
+  report: Reporter,
+  slice: number,
+  isOver: () => boolean,
+): Generator<SearchProgress, boolean, void> {
+  for (;;) {
+    const state = pass.run(slice);
+    report.nodes = pass.nodes;
+    if (state === 'done') return true;
+    if (state === 'found') {
+      const mix = pass.mix();
+      const weight = mix.reduce((sum, n, k) => sum + n * stage.prepared.parts[k].weight, 0);
+      const answer = stage.offer(mix, weight);
+      if (answer === 'grown') pass.setRows(stage.rows);
+      if (answer === 'held') pass.accept(budgetBelow(stage.prepared, weight));
+      else pass.reject();
+      if (answer !== 'held') continue;
+    }
+    if (isOver()) return false;
+    yield report.progress('proof');
+  }
 }
 
 /** Runs a search to its end. */
