@@ -1,0 +1,37 @@
+import type { Part } from '@shared/schemas/part.schema';
+import { formatLetterCode, formatQuantity } from '@shared/units/format';
+import { Facts } from '@/components/ui/facts';
+import { dayAndTime } from '@/lib/time';
+import { resonance_Hz } from '../lib/part-curve';
+import { toleranceText } from '../lib/tolerance';
+import { PartStateText } from './part-state';
+
+/** All that the library says about a part. */
+export function PartFacts({ part }: { part: Part }) {
+  const f0 = resonance_Hz(part, part.esl_H + part.mount_H);
+  return (
+    <Facts
+      rows={[
+        ['state', <PartStateText key="state" state={part.state} />],
+        ['technology', part.technology],
+        ['dielectric', part.dielectric || '—'],
+        ['case', part.caseSize],
+        [
+          'capacitance',
+          `${formatQuantity(part.capacitance_F, 'F', { trim: true })} (${formatLetterCode(part.capacitance_F, 'F')})`,
+        ],
+        ['tolerance', `${toleranceText(part.tolerance, part.capacitance_F)} (${part.tolerance})`],
+        ['rated voltage', formatQuantity(part.rated_voltage_V, 'V', { trim: true })],
+        ['ESR', formatQuantity(part.esr_ohm, 'Ω')],
+        ['ESL', formatQuantity(part.esl_H, 'H')],
+        ['usual mount', formatQuantity(part.mount_H, 'H')],
+        ['self-resonance, mounted', f0 === null ? '—' : formatQuantity(f0, 'Hz')],
+        ['height', part.height_mm === null ? '—' : formatQuantity(part.height_mm, 'mm', { trim: true })],
+        ['area', part.area_mm2 === null ? '—' : formatQuantity(part.area_mm2, 'mm²', { trim: true })],
+        ['termination', part.termination],
+        ['price each', part.unit_cost === null ? '—' : part.unit_cost.toFixed(3)],
+        ['updated', `${dayAndTime(part.updatedAt)}${part.updatedBy ? `, ${part.updatedBy.name}` : ''}`],
+      ]}
+    />
+  );
+}
