@@ -1,3 +1,4 @@
+import type { IncomingMessage } from 'node:http';
 import type { RequestHandler } from 'express';
 import type { Logger } from 'pino';
 import { pinoHttp } from 'pino-http';
@@ -8,6 +9,10 @@ export function withoutSecrets(url: string): string {
     .replace(/\/(invitations?|password-resets|reset)\/[^/?#]+/g, '/$1/…')
     .replace(/([?&][^=&]*(?:token|password|secret)[^=&]*)=[^&]*/gi, '$1=…');
 }
+
+/** Routers cut their own part off `url` while they work; the address as it came stands beside it. */
+const isApi = (req: IncomingMessage & { originalUrl?: string }): boolean =>
+  (req.originalUrl ?? req.url ?? '').startsWith('/api/');
 
 export function requestLog(logger: Logger): RequestHandler {
   return pinoHttp({
@@ -22,7 +27,7 @@ export function requestLog(logger: Logger): RequestHandler {
     },
     customLogLevel: (req, res, error) => {
       if (error || res.statusCode >= 500) return 'error';
-      return req.url?.startsWith('/api/') ? 'info' : 'debug';
+      return isApi(req) ? 'info' : 'debug';
     },
     customErrorMessage: () => 'request failed',
   });

@@ -2,7 +2,7 @@ import type { BoardRole, BoardSummary } from '@shared/schemas/board.schema';
 import type { EntityManager } from 'typeorm';
 import { notFound } from '../errors/problems';
 import type { Actor } from './actor';
-import { boardRights } from './rights';
+import { boardRights, seesAllBoards } from './rights';
 
 interface BoardRow {
   id: string;
@@ -69,7 +69,7 @@ export async function boardSummaries(
   limit: number,
   offset: number,
 ): Promise<{ items: BoardSummary[]; total: number }> {
-  const [visible, mine] = actor.siteRole === 'admin' ? ['1', []] : [MINE, [actor.id]];
+  const [visible, mine] = seesAllBoards(actor) ? ['1', []] : [MINE, [actor.id]];
   const [count] = await manager.query<{ n: number }[]>(
     `SELECT count(*) AS n FROM board b WHERE ${visible}`,
     mine,

@@ -29,6 +29,9 @@ export function boardRights(who: Who, board: BoardStanding): BoardRights | null 
   };
 }
 
+/** Lists hold every board for them, else those that one is on. */
+export const seesAllBoards = (who: Who): boolean => who.siteRole === 'admin';
+
 export type BoardAction = 'see' | keyof BoardRights;
 
 const boardRefusals: Record<keyof BoardRights, string> = {

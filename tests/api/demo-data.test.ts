@@ -1,0 +1,105 @@
+import { railDocument } from '@shared/rail/document';
+import { type Part, partFieldsSchema } from '@shared/schemas/part.schema';
+import { railListSchema } from '@shared/schemas/rail.schema';
+import { railDocumentSchema } from '@shared/schemas/rail-document.schema';
+import { railSpecSchema } from '@shared/schemas/rail-spec.schema';
+import { afterEach, beforeEach, describe, expect, it } from 'vitest';
+import { demoParts } from '../../server/db/demo/parts';
+import { demoRails } from '../../server/db/demo/rails';
+import { seedDemo, seedOnFirstRun } from '../../server/db/demo/seed';
+import { entities } from '../../server/db/entities';
+import { openTestApp, type TestApp } from '../helpers/app';
+import { DEMO_BOARD, people } from '../helpers/people';
+
+let t: TestApp;
+beforeEach(async () => {
+  t = await openTestApp();
+});
+afterEach(() => t.close());
+
+const tables = ['person', 'part', 'board', 'board_member', 'rail', 'rail_part', 'revision'];
+const contents = async () => {
+  const all: Record<string, unknown[]> = {};
+  for (const table of tables) all[table] = await t.ctx.db.rows(`SELECT * FROM ${table} ORDER BY 1, 2`);
+  return all;
+};
+
+describe('the demo data', () => {
+  it('is the same after seeding again', async () => {
+    const before = await contents();
+    await seedDemo(t.ctx);
+    await seedOnFirstRun(t.ctx);
+    expect(await contents()).toEqual(before);
+  });
+
+  it('leaves what people changed as it is', async () => {
+    const owner = await t.as('owner');
+    await owner.patch(`/boards/${DEMO_BOARD}`, { version: 1, name: 'Renamed' }).expect(200);
+    await seedDemo(t.ctx);
+    expect((await owner.get(`/boards/${DEMO_BOARD}`)).body).toMatchObject({
+      name: 'Renamed',
+      rails: { total: 6 },
+    });
+  });
+
+  it('holds by the schemas, with four rails that hold and two that are short', async () => {
+    for (const { fields } of demoParts) expect(partFieldsSchema.parse(fields)).toEqual(fields);
+    for (const { spec } of demoRails) expect(railSpecSchema.parse(spec)).toEqual(spec);
+    const { body } = await (await t.as('owner')).get(`/boards/${DEMO_BOARD}/rails`).expect(200);
+    const { rails, parts } = railListSchema.parse(body);
+    const byId = new Map(parts.map((part: Part) => [part.id, part]));
+    const headroom = new Map(rails.map((rail) => [rail.spec.name, rail.summary.tightest?.headroom_dB ?? 0]));
+    for (const rail of rails) railDocumentSchema.parse(railDocument(rail.spec, rail.bank, byId));
+    expect(rails.filter((rail) => rail.summary.holds).length).toBe(4);
+    expect(headroom.get('VDD_CORE')).toBeLessThan(-2);
+    expect(headroom.get('VDD_CORE')).toBeGreaterThan(-4);
+    expect(headroom.get('VDD_SERDES')).toBeLessThan(0);
+    expect(headroom.get('VDD_SERDES')).toBeGreaterThan(-1);
+    for (const rail of rails)
+      for (const line of rail.bank)
+        expect(byId.get(line.partId)?.rated_voltage_V).toBeGreaterThanOrEqual(rail.spec.voltage_V);
+  });
+
+  it('has parts of every state and one person for each role', async () => {
+    const states = demoParts.map((part) => part.state);
+    expect(new Set(states)).toEqual(new Set(['approved', 'draft', 'retired']));
+    expect(new Set(demoParts.map((part) => part.fields.partNumber)).size).toBe(demoParts.length);
+    const { body } = await (await t.as('admin')).get(`/boards/${DEMO_BOARD}`).expect(200);
+    expect(body.myRole).toBeNull();
+    expect(body.owner.id).toBe(people.owner.id);
+  });
+});
+
+describe('the database', () => {
+  it('has exactly the columns that the entities say', async () => {
+    const { dataSource } = t.ctx.db;
+    for (const entity of entities) {
+      const meta = dataSource.getMetadata(entity);
+      const rows = await t.ctx.db.rows<{ name: string; notnull: number }>(
+        `SELECT name, "notnull" FROM pragma_table_info('${meta.tableName}')`,
+      );
+      const inDatabase = rows.map((row) => `${row.name} ${row.notnull ? 'always' : 'maybe'}`);
+      const inEntity = meta.columns.map(
+        (column) => `${column.databaseName} ${column.isNullable ? 'maybe' : 'always'}`,
+      );
+      expect(inDatabase.sort(), meta.tableName).toEqual(inEntity.sort());
+    }
+  });
+
+  it('has an index that begins with each foreign key, and enforces them', async () => {
+    const [{ foreign_keys }] = await t.ctx.db.rows<{ foreign_keys: number }>('PRAGMA foreign_keys');
+    expect(foreign_keys).toBe(1);
+    const [{ journal_mode }] = await t.ctx.db.rows<{ journal_mode: string }>('PRAGMA journal_mode');
+    expect(journal_mode).toBe('wal');
+    for (const table of [...tables, 'session', 'access_token']) {
+      const keys = await t.ctx.db.rows<{ column: string }>(
+        `SELECT "from" AS column FROM pragma_foreign_key_list('${table}')`,
+      );
+      const leading = await t.ctx.db.rows<{ column: string }>(
+        `SELECT x.name AS column FROM pragma_index_list('${table}') i JOIN pragma_index_info(i.name) x WHERE x.seqno = 0`,
+      );
+      const indexed = new Set(leading.map((row) => row.column));
+      for (const { column } of keys) expect(indexed.has(column), `${table}.${column}`).toBe(true);
+    }
+  });
+});
