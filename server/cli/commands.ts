@@ -11,6 +11,17 @@ interface Entry {
 
 /** Loaded only when called, so that a command starts without the code of the others. */
 export const commands: Record<string, Entry> = {
+  analyse: {
+    usage: 'analyse FILE',
+    what: 'impedance, peaks and headroom of a rail document; status 1 when it does not hold',
+    load: () => import('./analyse'),
+  },
+  search: {
+    usage: 'search FILE [--seconds N]',
+    what: 'the smallest bank for a rail document, with its proof',
+    load: () => import('./search'),
+  },
+  schema: { usage: 'schema', what: 'the rail document as JSON Schema', load: () => import('./schema') },
   admin: {
     usage: 'admin create [--email E --name N --password-stdin]',
     what: 'makes an administrator',

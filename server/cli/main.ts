@@ -15,5 +15,6 @@ try {
   process.exitCode = await main(process.argv.slice(2));
 } catch (error) {
   process.stderr.write(`millpond: ${oneLine(error instanceof Error ? error.message : String(error))}\n`);
-  process.exitCode = error instanceof BadInput ? 2 : 1;
+  // 1 is an answer (the rail does not hold), so every failure is 2.
+  process.exitCode = 2;
 }
