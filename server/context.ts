@@ -1,3 +1,4 @@
+import type { KeyObject } from 'node:crypto';
 import type { Logger } from 'pino';
 import type { Config } from './config/environment';
 import type { Database } from './db/database';
@@ -8,7 +9,8 @@ import type { Passwords } from './services/passwords';
 /** What services need from outside; made once at start, replaced piece by piece in tests. */
 export interface Context {
   config: Config;
-  secret: string;
+  /** Signs session cookies. As a key object: from text it would be made anew for every request. */
+  secret: KeyObject;
   db: Database;
   mailer: Mailer;
   passwords: Passwords;

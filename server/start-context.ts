@@ -1,3 +1,4 @@
+import { createSecretKey } from 'node:crypto';
 import type { Config } from './config/environment';
 import { keptSecret } from './config/secret';
 import type { Context } from './context';
@@ -11,7 +12,7 @@ import { Passwords } from './services/passwords';
 /** Opens what the server and the command work with; `db.close()` lets it go. */
 export async function startContext(config: Config): Promise<Context> {
   const log = createLogger(config.logLevel);
-  const secret = config.secret ?? keptSecret(config.dataFolder);
+  const secret = createSecretKey(config.secret ?? keptSecret(config.dataFolder), 'utf8');
   const db = await Database.open(databaseFile(config.dataFolder));
   return {
     config,

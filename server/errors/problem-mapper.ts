@@ -1,5 +1,5 @@
 import type { ErrorRequestHandler, Response } from 'express';
-import { ProblemError } from './problems';
+import { conflict, ProblemError } from './problems';
 
 /** Errors of the body parser and the router carry a status; these are the ones a client can cause. */
 const known: Record<number, [slug: string, title: string]> = {
@@ -15,22 +15,23 @@ function statusOf(error: unknown): number | null {
   return error.status in known ? error.status : null;
 }
 
-/** The write lock was not free in time, or the disk is full: the client may try again later. */
-function isBusy(error: unknown): boolean {
+function sqliteCode(error: unknown): string {
   const cause = error instanceof Error && 'driverError' in error ? error.driverError : error;
-  return (
-    cause instanceof Error &&
-    'code' in cause &&
-    typeof cause.code === 'string' &&
-    /^SQLITE_(BUSY|LOCKED|FULL)/.test(cause.code)
-  );
+  return cause instanceof Error && 'code' in cause && typeof cause.code === 'string' ? cause.code : '';
 }
+
+/** The write lock was not free in time, or the disk is full: the client may try again later. */
+const isBusy = (error: unknown): boolean => /^SQLITE_(BUSY|LOCKED|FULL)/.test(sqliteCode(error));
+
+/** Another process (the command) wrote between our check and our write. */
+const isBrokenRule = (error: unknown): boolean => sqliteCode(error).startsWith('SQLITE_CONSTRAINT');
 
 export function toProblemError(error: unknown): ProblemError {
   if (error instanceof ProblemError) return error;
   const status = statusOf(error);
   if (status !== null)
     return new ProblemError(status, ...known[status], error instanceof Error ? error.message : undefined);
+  if (isBrokenRule(error)) return conflict('Something this depends on changed meanwhile; load it again.');
   if (isBusy(error))
     return new ProblemError(
       503,

@@ -1,5 +1,5 @@
 import { spawnSync } from 'node:child_process';
-import { existsSync, readFileSync, statSync, writeFileSync } from 'node:fs';
+import { existsSync, readFileSync, writeFileSync } from 'node:fs';
 import path from 'node:path';
 import { fileURLToPath } from 'node:url';
 
@@ -20,13 +20,17 @@ export function requireNode() {
 
 const stampFile = path.join(root, 'node_modules', '.millpond-installed');
 
-/** True when what is installed is what the lock file says, by the lock's own text. */
+/** True when what is installed is what the lock file says. */
 function isInstalled(lock) {
   if (existsSync(stampFile)) return readFileSync(stampFile, 'utf8') === lock;
-  // Installed by hand: npm keeps its own copy of the lock, written when it is done.
+  // Installed by hand: npm keeps a lock of its own there, without what it left out for this machine.
   const npmLock = path.join(root, 'node_modules', '.package-lock.json');
-  const lockFile = path.join(root, 'package-lock.json');
-  return existsSync(npmLock) && statSync(npmLock).mtimeMs >= statSync(lockFile).mtimeMs;
+  if (!existsSync(npmLock)) return false;
+  const installed = JSON.parse(readFileSync(npmLock, 'utf8')).packages;
+  return Object.entries(JSON.parse(lock).packages).every(
+    ([name, { version, optional, devOptional }]) =>
+      name === '' || (name in installed ? installed[name].version === version : optional || devOptional),
+  );
 }
 
 /** Installs the dependencies when they are missing or older than the lock file. */

@@ -171,6 +171,20 @@ describe('limits on attempts', () => {
     for (let i = 0; i < 6; i++) await signIn().expect(201);
   });
 
+  it('counts by the caller’s own address behind a trusted proxy only', async () => {
+    const attempt = (address: string) =>
+      signIn(people.owner.email, 'a wrong password').set('X-Forwarded-For', address);
+    await t.close();
+    t = await openTestApp({ rateLimit: 1 });
+    await attempt('203.0.113.1').expect(401);
+    await attempt('203.0.113.2').expect(429);
+    await t.close();
+    t = await openTestApp({ rateLimit: 1, trustProxy: 1 });
+    await attempt('203.0.113.1').expect(401);
+    await attempt('203.0.113.1').expect(429);
+    await attempt('203.0.113.2').expect(401);
+  });
+
   it('limits requests for a reset and the use of links', async () => {
     await t.close();
     t = await openTestApp({ rateLimit: 2 });

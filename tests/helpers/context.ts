@@ -1,3 +1,4 @@
+import { createSecretKey } from 'node:crypto';
 import { pino } from 'pino';
 import { type Config, readConfig } from '../../server/config/environment';
 import type { Context } from '../../server/context';
@@ -16,7 +17,7 @@ export async function testContext(file: string, change: Partial<Config> = {}): P
   const db = await Database.open(file);
   return {
     config,
-    secret: 'a secret for tests only, long enough',
+    secret: createSecretKey('a secret for tests only, long enough', 'utf8'),
     db,
     mailer: new Mailer(db, log, config),
     passwords: new Passwords(TEST_COST),
