@@ -64,7 +64,24 @@ export function railDocument(
           candidates: candidates.map((part) => part.partNumber),
           ...(search.max_kinds !== null && { max_kinds: search.max_kinds }),
           max_per_part: search.max_per_part,
+          ...newPartDistance(search, bank),
         },
       }),
   };
+}
+
+/** Where parts go that are new to the bank: as asked, else no nearer than its farthest line, so that no mix looks too good. */
+function newPartDistance(search: SearchSettings, bank: readonly BankLine[]): { distance_m?: number } {
+  const distance_m = newPartDistance_m(search, bank);
+  return distance_m === null ? {} : { distance_m };
+}
+
+/** The distance in metres that the search gives to parts new to the bank; null where nothing is planned. */
+export function newPartDistance_m(
+  search: Pick<SearchSettings, 'distance_m'>,
+  bank: readonly Pick<BankLine, 'distance_m'>[],
+): number | null {
+  if (search.distance_m !== null) return search.distance_m;
+  const planned = bank.flatMap((line) => line.distance_m ?? []);
+  return planned.length > 0 ? Math.max(...planned) : null;
 }

@@ -8,7 +8,7 @@ export const DEFAULT_MAX_PER_PART = 80;
 
 /**
  * The mix search that a document asks for: locked lines stay, all other lines of the bank make room. A candidate is
- * mounted as the bank's line of that part is, where there is one, else in the part's usual way at no distance.
+ * mounted as the bank's line of that part is, where there is one, else in the part's usual way at the search's `distance_m` (nowhere: no path is added).
  */
 export function mixProblem(document: RailDocument): MixProblem {
   const { rail, search } = document;
@@ -17,7 +17,9 @@ export function mixProblem(document: RailDocument): MixProblem {
   const candidates = (search?.candidates ?? document.parts.map((part) => part.id)).flatMap((id) => {
     const part = parts.get(id);
     if (!part) return [];
-    const placed = document.bank.find((line) => line.part === id && !line.locked);
+    const placed =
+      document.bank.find((line) => line.part === id && !line.locked) ??
+      (search?.distance_m !== undefined ? { distance_m: search.distance_m } : undefined);
     return [
       {
         id,

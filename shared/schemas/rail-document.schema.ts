@@ -44,6 +44,8 @@ export const documentSearchSchema = z.strictObject({
   candidates: z.array(z.string().min(1)).min(1, 'name at least one candidate').max(500),
   max_kinds: z.int().min(1).max(500).optional(),
   max_per_part: z.int().min(1).max(10_000).optional(),
+  /** How far from the load a candidate sits that the bank does not hold yet. */
+  distance_m: notNegative.max(10).optional(),
   seed: z.int().min(0).max(4_294_967_295).optional(),
 });
 

@@ -37,6 +37,8 @@ export const searchSettingsSchema = z.strictObject({
   candidateIds: z.array(idSchema).max(500).nullable().default(null),
   max_kinds: z.int().min(1).max(100).nullable().default(null),
   max_per_part: z.int().min(1).max(999).default(80),
+  /** Distance of parts that are new to the bank; null: as far as the bank's farthest line. */
+  distance_m: z.number().min(0).max(10).nullable().default(null),
 });
 export type SearchSettings = z.infer<typeof searchSettingsSchema>;
 

@@ -70,6 +70,14 @@ function formatPlain(value: number, unit: UnitSymbol, options: FormatOptions): s
   return unit === '' ? signed : `${signed}${NBSP}${unit}`;
 }
 
+/** A rail voltage as engineers write it: `0.85 V`, `3.3 V`, `48 V`; millivolts only below a tenth of a volt. */
+export function formatVolts(value: number): string {
+  const plain = Math.abs(value) >= 0.1 && Math.abs(value) < 1;
+  return plain
+    ? `${formatPlain(value, '', { trim: true, digits: 4 })}${NBSP}V`
+    : formatQuantity(value, 'V', { trim: true, digits: 4 });
+}
+
 /** A number with a fixed number of decimals and the typeset minus; never `−0.0`. */
 export function formatFixed(value: number, decimals: number): string {
   const text = Math.abs(value).toFixed(decimals);

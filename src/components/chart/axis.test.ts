@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { decadesAround, frequencyAt, impedanceDecades, xOf } from './axis';
+import { decadesAround, frequencyAt, impedanceScale, xOf } from './axis';
 
 describe('the frequency axis', () => {
   it('goes from frequency to place and back', () => {
@@ -20,8 +20,8 @@ describe('the frequency axis', () => {
   });
 
   it('cuts a curve that shoots far above the waterline', () => {
-    const [low, high] = impedanceDecades([2e-3, 50], [10e-3]);
-    expect(low).toBeCloseTo(1e-3, 12);
-    expect(high).toBeCloseTo(1, 12);
+    const [low, high] = impedanceScale([2.5e-3, 50], [10e-3]);
+    expect(low).toBeCloseTo(2e-3, 12);
+    expect(high).toBeCloseTo(0.5, 12);
   });
 });

@@ -35,10 +35,10 @@ export function yOf(axis: ImpedanceAxis, impedance_ohm: number): number {
 }
 
 /**
- * Decades that show the curve and the waterline with room above it; a curve that shoots far above (an empty bank) is
+ * Scale that shows the curve and the waterline with room above it; a curve that shoots far above (an empty bank) is
  * cut two decades over the waterline, so that the waterline stays readable.
  */
-export function impedanceDecades(
+export function impedanceScale(
   curve_ohm: ArrayLike<number>,
   target_ohm: readonly number[],
 ): [number, number] {
@@ -52,5 +52,14 @@ export function impedanceDecades(
   const highTarget = Math.max(...target_ohm);
   const floor = Math.max(Math.min(low, lowTarget / 2), lowTarget / 1000);
   const ceiling = Math.max(highTarget * 5, Math.min(high, highTarget * 40));
-  return decadesAround(floor, ceiling);
+  return [roundStep(floor, 'down'), roundStep(ceiling, 'up')];
+}
+
+/** The next 1, 2 or 5 of a decade, downwards or upwards. */
+function roundStep(value: number, way: 'down' | 'up'): number {
+  const decade = 10 ** Math.floor(Math.log10(value) + 1e-9);
+  const ratio = value / decade;
+  const steps = way === 'down' ? [5, 2, 1] : [1, 2, 5, 10];
+  const step = steps.find((one) => (way === 'down' ? one <= ratio + 1e-9 : one >= ratio - 1e-9)) ?? 1;
+  return decade * step;
 }

@@ -59,17 +59,13 @@ export default function ImpedancePlot({ x, y, curves, target_ohm, onZoom }: Impe
         range: [Math.log10(x.low_Hz), Math.log10(x.high_Hz)],
         gridcolor: tokens.hairline,
         linecolor: tokens.hairline,
-        tickcolor: tokens.stone,
         minor: { ticks: 'inside', ticklen: 4, tickcolor: tokens.stone, dtick: 'D1', nticks: 9 },
-        ticksuffix: 'Hz',
       },
       yaxis: {
         ...SCALE,
         range: [Math.log10(y.low_ohm), Math.log10(y.high_ohm)],
         gridcolor: tokens.hairline,
         linecolor: tokens.hairline,
-        tickcolor: tokens.stone,
-        ticksuffix: 'Ω',
         fixedrange: true,
       },
     }),
@@ -96,8 +92,8 @@ const SCALE = {
   showline: true,
   mirror: true,
   zeroline: false,
-  exponentformat: 'SI' as const,
-  ticklabelstandoff: 4,
+  // The scale's numbers are drawn over the plot (scale-labels.tsx), where they can be set in engineering notation.
+  showticklabels: false,
 };
 
 function trace(curve: PlotCurve, line: { color: string; width: number; dash?: string }): Data {

@@ -5,12 +5,12 @@ import { cx } from '@/lib/class-names';
 type Variant = 'primary' | 'secondary' | 'plain' | 'danger';
 
 const BASE =
-  'inline-flex items-center justify-center gap-2 whitespace-nowrap border px-3 py-1.5 font-semibold disabled:cursor-not-allowed disabled:opacity-50';
+  'inline-flex items-center justify-center gap-2 whitespace-nowrap border py-1.5 font-semibold disabled:cursor-not-allowed disabled:opacity-50';
 const VARIANTS: Record<Variant, string> = {
-  primary: 'border-deep bg-deep text-paper hover:not-disabled:opacity-90',
-  secondary: 'border-deep bg-transparent text-deep hover:not-disabled:bg-wash',
-  plain: 'border-transparent bg-transparent px-0 text-deep hover:not-disabled:underline underline-offset-4',
-  danger: 'border-kingfisher bg-transparent text-kingfisher hover:not-disabled:bg-wash',
+  primary: 'px-3 border-deep bg-deep text-paper hover:not-disabled:opacity-90',
+  secondary: 'px-3 border-deep bg-transparent text-deep hover:not-disabled:bg-wash',
+  plain: 'border-transparent bg-transparent text-deep hover:not-disabled:underline underline-offset-4',
+  danger: 'px-3 border-kingfisher bg-transparent text-kingfisher hover:not-disabled:bg-wash',
 };
 
 export function Button({

@@ -77,7 +77,7 @@ export function BankRow(props: BankRowProps) {
               {name}
             </span>
             <span className="block truncate text-small text-stone">
-              {formatQuantity(strip?.inductance_H, 'H')} each
+              {formatQuantity(strip?.inductance_H, 'H')}
               {line.distance_m !== null && ` · ${formatLength(line.distance_m)}`}
               {line.side === 'bottom' && ' · bottom'}
             </span>

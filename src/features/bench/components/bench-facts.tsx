@@ -16,7 +16,7 @@ export function BenchFacts({ spec, editTo, showLines, onShowLines }: BenchFactsP
   return (
     <div className="flex flex-col gap-4">
       <h1 className="text-large font-bold">{spec.name}</h1>
-      <dl className="grid grid-cols-[6rem_1fr] gap-x-1 text-small">
+      <dl className="grid grid-cols-[5.2rem_1fr] gap-x-1 text-small">
         {specFacts(spec).map(([name, value]) => (
           <div key={name} className="contents">
             <dt className="text-stone">{name}</dt>

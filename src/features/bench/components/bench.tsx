@@ -1,4 +1,4 @@
-import { railDocument } from '@shared/rail/document';
+import { newPartDistance_m, railDocument } from '@shared/rail/document';
 import type { Part } from '@shared/schemas/part.schema';
 import type { RailWithParts } from '@shared/schemas/rail.schema';
 import { useQuery } from '@tanstack/react-query';
@@ -50,9 +50,10 @@ export function Bench({ server, personId, canEdit, editTo, onSaved, renderStatus
     () => new Map([...(candidates.data ?? []).map((part) => [part.id, part] as const), ...bench.parts]),
     [candidates.data, bench.parts],
   );
+  const newPartDistance = newPartDistance_m(bench.search, bench.lines);
   const mixLines = useMemo(
-    () => (mix ? bankOfMix(bench.lines, mix, known) : null),
-    [mix, bench.lines, known],
+    () => (mix ? bankOfMix(bench.lines, mix, known, newPartDistance) : null),
+    [mix, bench.lines, known, newPartDistance],
   );
   const present = useAnalysis('bench', spec, bench.lines, known, whole);
   const found = useAnalysis('preview', spec, mixLines, known, whole);
@@ -182,6 +183,7 @@ export function Bench({ server, personId, canEdit, editTo, onSaved, renderStatus
             <Section title="mix search">
               <SearchPanel
                 settings={bench.search}
+                newPartDistance_m={newPartDistance}
                 candidates={candidates.data}
                 candidatesError={candidates.isError ? messageOf(candidates.error) : null}
                 state={search.state}

@@ -1,5 +1,5 @@
 import type { Part } from '@shared/schemas/part.schema';
-import { formatQuantity } from '@shared/units/format';
+import { formatQuantity, formatVolts } from '@shared/units/format';
 import { useDeferredValue, useState } from 'react';
 import { Dialog } from '@/components/ui/dialog';
 import { Failure } from '@/components/ui/failure';
@@ -24,10 +24,7 @@ export function PartPicker({ open, voltage_V, onPick, onClose }: PartPickerProps
   const parts = (choice.data?.items ?? []).filter((part) => part.state !== 'retired');
   return (
     <Dialog title="Add a part to the bank" open={open} onClose={onClose} wide>
-      <Field
-        label="find"
-        hint={`rated for ${formatQuantity(voltage_V, 'V', { trim: true })} or more, not retired`}
-      >
+      <Field label="find" hint={`rated for ${formatVolts(voltage_V)} or more, not retired`}>
         {(control) => (
           <Input
             {...control}

@@ -2,6 +2,7 @@ import { lazy, Suspense } from 'react';
 import type { FrequencyAxis, ImpedanceAxis } from '@/components/chart/axis';
 import { xOf, yOf } from '@/components/chart/axis';
 import type { PlotCurve } from '@/components/chart/impedance-plot';
+import { ScaleLabels } from '@/components/chart/scale-labels';
 import { Waterline } from '@/components/chart/waterline';
 
 const ImpedancePlot = lazy(() => import('@/components/chart/impedance-plot'));
@@ -73,6 +74,7 @@ export function ScoreChart({
                 />
               )}
             </svg>
+            <ScaleLabels x={x} y={y} />
             <Waterline x={x} y={y} points={waterline} marks={breaks} />
           </>
         )}

@@ -5,7 +5,7 @@ import type { RailSpec } from '@shared/schemas/rail-spec.schema';
 import { formatQuantity } from '@shared/units/format';
 import type { BenchAnalysis, BenchMember } from '@workers/analysis/analysis.interface';
 import { type ReactNode, useMemo, useRef, useState } from 'react';
-import { decadesAround, frequencyAt, impedanceDecades } from '@/components/chart/axis';
+import { decadesAround, frequencyAt, impedanceScale } from '@/components/chart/axis';
 import type { PlotCurve } from '@/components/chart/impedance-plot';
 import { PlumbLines } from '@/components/chart/plumb-lines';
 import { ShareStrip } from '@/components/chart/share-strip';
@@ -49,7 +49,7 @@ export function Score(props: ScoreProps) {
   const waterline = useMemo(() => waterlinePoints(spec, (f) => targetAt(target, f)), [spec, target]);
   const [low_ohm, high_ohm] = useMemo(
     () =>
-      impedanceDecades(
+      impedanceScale(
         analysis?.magnitude_ohm ?? [],
         waterline.map(([, z]) => z),
       ),

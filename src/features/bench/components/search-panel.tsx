@@ -1,17 +1,20 @@
 import type { Part } from '@shared/schemas/part.schema';
 import type { SearchSettings } from '@shared/schemas/rail.schema';
-import { formatDecibel, formatQuantity } from '@shared/units/format';
+import { formatDecibel, formatLength, formatQuantity } from '@shared/units/format';
 import { useState } from 'react';
 import { Button } from '@/components/ui/button';
 import { Field } from '@/components/ui/field';
 import { Input, Select } from '@/components/ui/input';
 import { Notice } from '@/components/ui/notice';
+import { QuantityInput } from '@/components/ui/quantity-input';
 import { type MixSearchState, mixIn } from '../hooks/use-mix-search';
 import { CandidatesDialog } from './candidates-dialog';
 import { ProofMeter } from './proof-meter';
 
 interface SearchPanelProps {
   settings: SearchSettings;
+  /** Where parts new to the bank go when the settings do not say. */
+  newPartDistance_m: number | null;
   candidates: readonly Part[] | undefined;
   candidatesError: string | null;
   state: MixSearchState;
@@ -36,7 +39,11 @@ export function SearchPanel(props: SearchPanelProps) {
     <div className="flex flex-col gap-3">
       {(state.kind === 'idle' || state.kind === 'failed') && (
         <>
-          <SettingsForm settings={settings} onSettings={props.onSettings} />
+          <SettingsForm
+            settings={settings}
+            newPartDistance_m={props.newPartDistance_m}
+            onSettings={props.onSettings}
+          />
           <button
             type="button"
             className="w-fit text-left text-deep underline-offset-4 hover:underline disabled:text-stone"
@@ -123,7 +130,7 @@ function Outcome({ state, objective }: { state: MixSearchState; objective: Searc
         <p className="text-small text-stone">
           {result.parts} parts, {result.kinds} kinds · headroom{' '}
           {formatDecibel(result.tightest.headroom_dB, 2)} · {result.seconds.toFixed(1)} s ·{' '}
-          {formatQuantity(result.nodes, '', { digits: 2 })} nodes
+          {result.nodes.toLocaleString('en-GB')} nodes
         </p>
       </div>
     );
@@ -158,9 +165,11 @@ const LEAST = { parts: 'fewest', cost: 'cheapest', area: 'smallest area' } as co
 
 function SettingsForm({
   settings,
+  newPartDistance_m,
   onSettings,
 }: {
   settings: SearchSettings;
+  newPartDistance_m: number | null;
   onSettings: (settings: SearchSettings) => void;
 }) {
   const whole = (text: string, most: number) => {
@@ -199,7 +208,7 @@ function SettingsForm({
           />
         )}
       </Field>
-      <Field label="of one part at most">
+      <Field label="each at most">
         {(control) => (
           <Input
             {...control}
@@ -212,6 +221,26 @@ function SettingsForm({
           />
         )}
       </Field>
+      <div className="col-span-2">
+        <Field
+          label="new parts at a distance of"
+          hint={newPartDistance_m === null ? 'none planned: no path is added' : undefined}
+        >
+          {(control) => (
+            <QuantityInput
+              {...control}
+              unit="mm"
+              value={settings.distance_m}
+              placeholder={
+                newPartDistance_m === null
+                  ? 'not planned'
+                  : `${formatLength(newPartDistance_m)} (farthest line)`
+              }
+              onCommit={(distance_m) => onSettings({ ...settings, distance_m })}
+            />
+          )}
+        </Field>
+      </div>
     </div>
   );
 }

@@ -23,10 +23,14 @@ export function useMixSearch() {
     const mine = ++run.current;
     setState({ kind: 'running', progress: null });
     let last: SearchProgress | null = null;
+    // Progress comes over a port of its own and may arrive after the answer: then it says nothing new.
+    let answered = false;
     const answer = await client.search({ document, seconds: SEARCH_SECONDS, seed: 1 }, (progress) => {
+      if (answered) return;
       last = progress;
       if (mine === run.current) setState({ kind: 'running', progress });
     });
+    answered = true;
     if (mine !== run.current) return;
     if (answer.status === 'done') setState({ kind: 'done', result: answer.value });
     else if (answer.status === 'failed') setState({ kind: 'failed', message: answer.message });

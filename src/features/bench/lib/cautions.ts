@@ -1,7 +1,7 @@
 import type { Part } from '@shared/schemas/part.schema';
 import type { BankLine } from '@shared/schemas/rail.schema';
 import type { RailSpec } from '@shared/schemas/rail-spec.schema';
-import { formatQuantity } from '@shared/units/format';
+import { formatQuantity, formatVolts } from '@shared/units/format';
 
 export interface Caution {
   title: string;
@@ -30,14 +30,14 @@ export function cautionsFor(
     const energy = 0.5 * charge * spec.voltage_V ** 2;
     cautions.push({
       title: `above ${HAZARD_V} V DC`,
-      text: `Shock hazard. The bank stores ½CV² = ${formatQuantity(energy, 'J')} at ${formatQuantity(spec.voltage_V, 'V', { trim: true })}: discharge it and check before touching. The applicable safety standard comes first.`,
+      text: `Shock hazard. The bank stores ½CV² = ${formatQuantity(energy, 'J')} at ${formatVolts(spec.voltage_V)}: discharge it and check before touching. The applicable safety standard comes first.`,
     });
   }
   const under = used.filter((part) => part.rated_voltage_V < spec.voltage_V);
   if (under.length > 0)
     cautions.push({
       title: 'rated below the rail',
-      text: `${under.map((part) => part.partNumber).join(', ')}: rated voltage is below ${formatQuantity(spec.voltage_V, 'V', { trim: true })}. Do not use.`,
+      text: `${under.map((part) => part.partNumber).join(', ')}: rated voltage is below ${formatVolts(spec.voltage_V)}. Do not use.`,
     });
   const retired = used.filter((part) => part.state !== 'approved');
   if (retired.length > 0)

@@ -12,6 +12,7 @@ export function bankOfMix(
   lines: readonly DraftLine[],
   mix: readonly MixEntry[],
   parts: ReadonlyMap<string, Part>,
+  newPartDistance_m: number | null,
 ): DraftLine[] {
   const byNumber = new Map([...parts.values()].map((part) => [part.partNumber, part]));
   const found = mix.flatMap(({ id, count }) => {
@@ -19,7 +20,9 @@ export function bankOfMix(
     if (!part || count === 0) return [];
     const placed = lines.find((line) => line.partId === part.id && !line.locked);
     if (placed) return [{ ...placed, count }];
-    return keyed([{ partId: part.id, count, mount_H: null, distance_m: null, side: 'top', locked: false }]);
+    return keyed([
+      { partId: part.id, count, mount_H: null, distance_m: newPartDistance_m, side: 'top', locked: false },
+    ]);
   });
   found.sort((a, b) => (parts.get(b.partId)?.capacitance_F ?? 0) - (parts.get(a.partId)?.capacitance_F ?? 0));
   return [...lines.filter((line) => line.locked), ...found];

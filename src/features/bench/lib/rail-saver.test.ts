@@ -23,7 +23,7 @@ function rail(version: number): RailWithParts {
         observe: 'pins',
       },
       bank: [],
-      search: { minimise: 'parts', candidateIds: null, max_kinds: null, max_per_part: 80 },
+      search: { minimise: 'parts', candidateIds: null, max_kinds: null, max_per_part: 80, distance_m: null },
       summary: {
         engineVersion: '1',
         holds: null,

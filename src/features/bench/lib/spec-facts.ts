@@ -1,7 +1,7 @@
 import type { RailSpec } from '@shared/schemas/rail-spec.schema';
-import { formatQuantity } from '@shared/units/format';
+import { formatQuantity, formatVolts } from '@shared/units/format';
 
-const q = (value: number, unit: 'V' | 'A' | 's' | 'Hz' | 'Ω' | 'H' | 'F') =>
+const q = (value: number, unit: 'A' | 's' | 'Hz' | 'Ω' | 'H' | 'F') =>
   formatQuantity(value, unit, { trim: true });
 
 function sourceText({ source }: RailSpec): string {
@@ -11,7 +11,7 @@ function sourceText({ source }: RailSpec): string {
     case 'table':
       return `table, ${source.points.length} points`;
     case 'rl':
-      return `${q(source.resistance_ohm, 'Ω')} + ${q(source.inductance_H, 'H')}`;
+      return `${q(source.resistance_ohm, 'Ω')}+${q(source.inductance_H, 'H')}`;
     case 'damped':
       return `damped, ${q(source.inductance_H, 'H')}`;
   }
@@ -30,14 +30,14 @@ function targetText({ target, voltage_V }: RailSpec): string {
 
 /** What stands in the margin of the bench: each fact of the rail in one line. */
 export function specFacts(spec: RailSpec): [name: string, value: string][] {
-  const facts: [string, string][] = [['rail', q(spec.voltage_V, 'V')]];
+  const facts: [string, string][] = [['rail', formatVolts(spec.voltage_V)]];
   if (spec.target.kind === 'step') {
     facts.push(['ripple', `${spec.target.ripple_percent}\u00a0%`]);
     const rise = spec.load_step ? ` / ${q(spec.load_step.rise_s, 's')}` : '';
     facts.push(['step', `${q(spec.target.step_A, 'A')}${rise}`]);
   }
   facts.push(['target', targetText(spec)]);
-  facts.push(['band', `${q(spec.band_Hz[0], 'Hz')} – ${q(spec.band_Hz[1], 'Hz')}`]);
+  facts.push(['band', `${q(spec.band_Hz[0], 'Hz')}–${q(spec.band_Hz[1], 'Hz')}`]);
   facts.push(['source', sourceText(spec)]);
   facts.push(['planes', spec.plane ? q(spec.plane.capacitance_F, 'F') : 'none']);
   if (spec.package) facts.push(['package', q(spec.package.inductance_H, 'H')]);

@@ -1,6 +1,6 @@
 import { targetFromStep } from '@shared/engine/target';
 import type { Rail } from '@shared/schemas/rail.schema';
-import { formatFixed, formatQuantity } from '@shared/units/format';
+import { formatFixed, formatQuantity, formatVolts } from '@shared/units/format';
 import { Link } from 'react-router-dom';
 import { HeadroomSign } from '@/components/ui/headroom-sign';
 import { Table, Td, Th } from '@/components/ui/table';
@@ -53,7 +53,7 @@ export function RailsTable({ rails }: { rails: readonly Rail[] }) {
                 {spec.name}
               </Link>
             </Td>
-            <Td numeric>{formatQuantity(spec.voltage_V, 'V', trim)}</Td>
+            <Td numeric>{formatVolts(spec.voltage_V)}</Td>
             <Td numeric>{step(rail)}</Td>
             <Td numeric>{target(rail)}</Td>
             <Td numeric>

@@ -14,7 +14,7 @@ const filled = { ...EMPTY_SPEC, name: 'VDD_CORE', voltage: '0.9', ripple: '3', s
 
 describe('the specification form', () => {
   it('says what the target, the band and the planes come to while one types', () => {
-    expect(targetSentence(filled)).toBe('3\u00a0% of 900\u00a0mV at 9\u00a0A → 3.00\u00a0mΩ');
+    expect(targetSentence(filled)).toBe('3\u00a0% of 0.9\u00a0V at 9\u00a0A → 3.00\u00a0mΩ');
     expect(bandSentence({ ...filled, bandKind: 'derived', rise: '10n', bandwidth: '50k' })).toContain(
       '35.0\u00a0MHz',
     );

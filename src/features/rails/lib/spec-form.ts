@@ -3,7 +3,7 @@ import { cavityResonances, planeCapacitance } from '@shared/engine/plane';
 import { kneeFrequency, targetFromStep } from '@shared/engine/target';
 import { formatPath } from '@shared/schemas/common.schema';
 import { type RailSpec, railSpecSchema } from '@shared/schemas/rail-spec.schema';
-import { formatQuantity } from '@shared/units/format';
+import { formatQuantity, formatVolts } from '@shared/units/format';
 import { type Parsed, parseLength, parseQuantity } from '@shared/units/parse';
 import type { UnitSymbol } from '@shared/units/quantity';
 
@@ -269,7 +269,7 @@ export function targetSentence(form: SpecForm): string {
   if (form.targetKind !== 'step' || !v.ok || !ripple.ok || !step.ok || step.value <= 0) return '';
   const z = targetFromStep(v.value, ripple.value, step.value);
   const trim = { trim: true };
-  return `${formatQuantity(ripple.value, '%', trim)} of ${formatQuantity(v.value, 'V', trim)} at ${formatQuantity(step.value, 'A', trim)} → ${formatQuantity(z, 'Ω')}`;
+  return `${formatQuantity(ripple.value, '%', trim)} of ${formatVolts(v.value)} at ${formatQuantity(step.value, 'A', trim)} → ${formatQuantity(z, 'Ω')}`;
 }
 
 /** What the band comes to: `50 kHz – 35 MHz`. */

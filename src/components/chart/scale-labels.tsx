@@ -1,0 +1,50 @@
+import { formatQuantity } from '@shared/units/format';
+import { type FrequencyAxis, type ImpedanceAxis, xOf, yOf } from './axis';
+
+/** Decades inside [low, high], both ends included when they are decades. */
+function decades(low: number, high: number): number[] {
+  const slack = 1e-9;
+  const found: number[] = [];
+  for (let k = Math.ceil(Math.log10(low) - slack); k <= Math.log10(high) + slack; k++) found.push(10 ** k);
+  return found;
+}
+
+/** Labels for an axis: its decades, or, zoomed to less than one, its two ends. */
+function labelled(low: number, high: number): number[] {
+  const inside = decades(low, high);
+  return inside.length >= 2 ? inside : [low, high];
+}
+
+/** The numbers of both scales: the outermost ones of the frequency axis stay inside its ends. */
+export function ScaleLabels({ x, y }: { x: FrequencyAxis; y: ImpedanceAxis }) {
+  const trim = { trim: true, digits: 3 };
+  return (
+    <svg
+      aria-hidden="true"
+      width={x.width}
+      height={y.height}
+      className="pointer-events-none absolute top-0 left-0 overflow-visible"
+    >
+      {labelled(x.low_Hz, x.high_Hz).map((f) => {
+        const px = xOf(x, f);
+        const anchor = px < 24 ? 'start' : px > x.width - 24 ? 'end' : 'middle';
+        return (
+          <text key={f} x={px} y={y.height + 19} textAnchor={anchor} className="fill-stone text-small">
+            {formatQuantity(f, 'Hz', trim)}
+          </text>
+        );
+      })}
+      {labelled(y.low_ohm, y.high_ohm).map((z) => (
+        <text
+          key={z}
+          x={-9}
+          y={Math.min(y.height, Math.max(9, yOf(y, z) + 4))}
+          textAnchor="end"
+          className="fill-stone text-small"
+        >
+          {formatQuantity(z, 'Ω', trim)}
+        </text>
+      ))}
+    </svg>
+  );
+}
