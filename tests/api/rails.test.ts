@@ -1,4 +1,4 @@
-import { railListSchema, railWithPartsSchema } from '@shared/schemas/rail.schema';
+import { railListSchema, railWithPartsSchema, searchSettingsSchema } from '@shared/schemas/rail.schema';
 import { railDocumentSchema } from '@shared/schemas/rail-document.schema';
 import { afterEach, beforeEach, describe, expect, it } from 'vitest';
 import { type Caller, openTestApp, type TestApp } from '../helpers/app';
@@ -37,8 +37,14 @@ describe('rails', () => {
     expect(rail).toMatchObject({ position: 6, version: 1, updatedBy: { id: people.engineer.id } });
     expect(rail.summary).toMatchObject({ holds: true, parts: 7, kinds: 2, error: null });
     expect(rail.summary.tightest?.headroom_dB).toBeGreaterThan(0);
-    expect(rail.search).toEqual({ minimise: 'parts', candidateIds: null, max_kinds: null, max_per_part: 80 });
+    expect(rail.search).toEqual(searchSettingsSchema.parse({}));
     expect(parts).toHaveLength(2);
+  });
+
+  it('that were stored before a setting existed have its default', async () => {
+    await t.ctx.db.write((manager) => manager.query(`UPDATE rail SET search = '{"minimise":"area"}'`));
+    for (const rail of (await list()).rails)
+      expect(rail.search).toEqual(searchSettingsSchema.parse({ minimise: 'area' }));
   });
 
   it('say why there is no result', async () => {

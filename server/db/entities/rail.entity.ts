@@ -1,8 +1,21 @@
-import type { BankLine, RailSummary, SearchSettings } from '@shared/schemas/rail.schema';
+import {
+  type BankLine,
+  type RailSummary,
+  type SearchSettings,
+  searchSettingsSchema,
+} from '@shared/schemas/rail.schema';
 import type { RailSpec } from '@shared/schemas/rail-spec.schema';
-import { Column, Entity, Index, JoinColumn, ManyToOne, PrimaryColumn } from 'typeorm';
+import { Column, Entity, Index, JoinColumn, ManyToOne, PrimaryColumn, type ValueTransformer } from 'typeorm';
 import { BoardEntity } from './board.entity';
 import { PersonEntity } from './person.entity';
+
+const defaults = searchSettingsSchema.parse({});
+
+/** Settings that came after a rail was stored have their defaults there. */
+const withLaterSettings: ValueTransformer = {
+  to: (settings: SearchSettings) => settings,
+  from: (stored: Partial<SearchSettings>): SearchSettings => ({ ...defaults, ...stored }),
+};
 
 @Entity('rail')
 @Index('rail_by_position', ['boardId', 'position', 'id'])
@@ -19,7 +32,7 @@ export class RailEntity {
   @Column({ name: 'name_key', type: 'text' }) nameKey!: string;
   @Column({ type: 'simple-json' }) spec!: RailSpec;
   @Column({ type: 'simple-json' }) bank!: BankLine[];
-  @Column({ type: 'simple-json' }) search!: SearchSettings;
+  @Column({ type: 'simple-json', transformer: withLaterSettings }) search!: SearchSettings;
   @Column({ type: 'simple-json' }) summary!: RailSummary;
   /** The summary's own answer again, so that board lists can count without reading it. */
   @Column({ type: 'boolean', nullable: true }) holds!: boolean | null;
