@@ -20,7 +20,7 @@ export interface PreparedPart {
 export interface Prepared {
   problem: MixProblem;
   rail: CompiledRail;
-  /** By rising self-resonance: see proof.ts for why this order makes the bounds bite. */
+  /** By rising self-resonance: see count-tree.ts for why this order makes the bounds bite. */
   parts: PreparedPart[];
   /** Real weight of one unit of `PreparedPart.weight`. */
   unit: number;

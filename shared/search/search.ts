@@ -1,8 +1,7 @@
-import { boundAbove, budgetBelow, isClosed, nextBudget } from './budget';
 import { MixStage } from './mix-stage';
+import { Portfolio } from './portfolio';
 import { prepare } from './prepare';
 import type { MixProblem, SearchOptions, SearchProgress, SearchResult } from './problem';
-import { ProofPass } from './proof';
 import { outOfReach } from './reach';
 import { explainExhausted, explainReach, explainTimeout } from './reason';
 import { Reporter } from './report';
@@ -13,7 +12,7 @@ const FIRST_ROUNDS = 60;
 const FIRST_WORK = 4e7;
 
 /**
- * Searches for the lightest mix and proves it (see the design in proof.ts). A generator, so that a worker can look for a
+ * Searches for the lightest mix and proves it (portfolio.ts). A generator, so that a worker can look for a
  * cancel between steps: it yields at least every 30 ms or so, and whenever a better mix or a better bound is there.
  */
 export function* searchMix(
@@ -39,52 +38,25 @@ export function* searchMix(
   for (let round = 0; round < rounds && !isOver(); round++)
     if (stage.improve() || report.isDue()) yield report.progress('mix');
 
-  const pass = new ProofPass(prepared, stage.rows);
-  const most = (1 + 1e-9) * prepared.parts.reduce((sum, part) => sum + part.max * part.weight, 0);
-  while (!isOver()) {
-    const before = stage.incumbent;
-    if (before && isClosed(prepared, report.bound, before.weight)) break;
-    pass.start(nextBudget(prepared, report.bound, before?.weight ?? null, most));
-    const isExcluded = yield* runPass(pass, stage, report, options.nodeSlice ?? 2048, isOver);
-    if (!isExcluded) break;
-    report.bound = Math.max(report.bound, boundAbove(prepared, pass.budget));
-    if (!stage.incumbent && pass.budget >= most)
+  const proof = new Portfolio(stage);
+  const slice = options.nodeSlice ?? 2048;
+  while (!isOver() && !proof.isClosed) {
+    const bound = proof.bound;
+    const weight = stage.incumbent?.weight;
+    if (proof.step(slice) === 'exhausted')
       return report.missing(
         explainExhausted(prepared, stage.closest),
         stage.closest?.frequency_Hz ?? null,
         true,
       );
-    yield report.progress('proof');
+    report.bound = proof.bound;
+    report.nodes = proof.nodes;
+    if (bound !== proof.bound || weight !== stage.incumbent?.weight || report.isDue())
+      yield report.progress('proof');
   }
   if (stage.incumbent) return report.found(stage.incumbent);
   const reason = explainTimeout(prepared, report.seconds(), stage.closest);
   return report.missing(reason, stage.closest?.frequency_Hz ?? null, false);
-}
-
-/** One pass to its end; every mix on the way goes to the engine. True: no mix of weight ≤ pass.budget (as it then is) is left. */
-function* runPass(
-  pass: ProofPass,
-  stage: MixStage,
-  report: Reporter,
-  slice: number,
-  isOver: () => boolean,
-): Generator<SearchProgress, boolean, void> {
-  for (;;) {
-    const state = pass.run(slice);
-    report.nodes = pass.nodes;
-    if (state === 'done') return true;
-    if (state === 'found') {
-      const mix = pass.mix();
-      const weight = mix.reduce((sum, n, k) => sum + n * stage.prepared.parts[k].weight, 0);
-      const answer = stage.offer(mix, weight);
-      if (answer === 'grown') pass.setRows(stage.rows);
-      if (answer === 'held') pass.accept(budgetBelow(stage.prepared, weight));
-      else pass.reject();
-      if (answer !== 'held') continue;
-    }
-    if (isOver()) return false;
-    yield report.progress('proof');
-  }
 }
 
 /** Runs a search to its end. */

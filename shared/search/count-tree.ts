@@ -4,7 +4,7 @@ import type { Prepared } from './prepare';
 import { meetsAll, type Rows } from './rows';
 import { SurrogatePool } from './surrogate-pool';
 
-export type PassState = 'more' | 'found' | 'done';
+export type CountState = 'more' | 'found' | 'done';
 
 /**
  * Depth-first branch and bound over the counts, parts by rising self-resonance. A node (i, n_0 … n_i) has settled the parts
@@ -16,7 +16,7 @@ export type PassState = 'more' | 'found' | 'done';
  * The machine keeps the path as counts, so it can stop after any number of nodes, be told a smaller budget, or be given
  * more rows, and go on from where it was. One pass with budget B either finds a mix of weight ≤ B or proves that none exists.
  */
-export class ProofPass {
+export class CountTree {
   nodes = 0;
   budget = 0;
   readonly counts: Int32Array;
@@ -79,9 +79,10 @@ export class ProofPass {
   }
 
   /** Works on `limit` nodes at most. After 'found' (`mix()` holds on all rows) say `accept` or `reject`, then go on. */
-  run(limit: number): PassState {
+  run(limit: number): CountState {
     const last = this.counts.length - 1;
-    for (let k = 0; k < limit; k++) {
+    const end = this.nodes + limit;
+    while (this.nodes < end) {
       const i = this.level;
       let pruned = this.next === 'cut';
       if (this.next === 'test') {
@@ -100,6 +101,11 @@ export class ProofPass {
   accept(budget: number): void {
     this.budget = budget;
     this.next = 'cut';
+  }
+
+  /** A lighter mix is known from elsewhere. */
+  lower(budget: number): void {
+    this.budget = Math.min(this.budget, budget);
   }
 
   /** The engine refused the mix found (after `setRows`, if it named frequencies): its completions may still hold. */
