@@ -71,7 +71,8 @@ function parseDecimal(text: string, unit: UnitSymbol): Parsed {
 }
 
 function suffixExponent(suffix: string, unit: UnitSymbol): number | null {
-  if (suffix === '' || SPELLINGS[unit].includes(suffix)) return 0;
+  // `1R` and `1F`: the letter of the decimal point with nothing behind it.
+  if (suffix === '' || SPELLINGS[unit].includes(suffix) || POINT_LETTERS[unit]?.includes(suffix)) return 0;
   if (PLAIN.has(unit)) return null;
   const exponent = prefixExponent(suffix[0]);
   if (exponent === null) return null;

@@ -1,0 +1,66 @@
+import { admittanceOver, BankSum } from '@shared/engine/bank-sum';
+import { lineBranch } from '@shared/engine/branch';
+import { compileRail, railImpedance, scratch } from '@shared/engine/rail';
+import { memberShares } from '@shared/engine/shares';
+import Complex from 'complex.js';
+import fc from 'fast-check';
+import { describe, expect, it } from 'vitest';
+import { complexImpedance } from '../helpers/complex-model';
+import { frequency, railNetwork } from '../helpers/random-network';
+
+/** Against complex.js, an open library of complex numbers, summing the rail's definition branch by branch. */
+describe('the engine against an independent complex sum', () => {
+  it('agrees to 1e-9 of |Z| on 2000 random rails', () => {
+    const out = scratch();
+    let worst = 0;
+    fc.assert(
+      fc.property(railNetwork, frequency, (network, f) => {
+        railImpedance(compileRail(network), f, out);
+        const expected = complexImpedance(network, f);
+        const error = Math.hypot(out[0] - expected.re, out[1] - expected.im) / expected.abs();
+        worst = Math.max(worst, error);
+        expect(error).toBeLessThan(1e-9);
+      }),
+      { numRuns: 2000, seed: 11 },
+    );
+    expect(worst).toBeGreaterThan(0);
+  });
+
+  it('has shares that sum to the whole load current, as complex numbers', () => {
+    fc.assert(
+      fc.property(railNetwork, frequency, (network, f) => {
+        const shares = memberShares(compileRail(network), [f]);
+        const sum = shares.reduce((s, one) => s.add(new Complex(one.re[0], one.im[0])), new Complex(0, 0));
+        const scale = shares.reduce((s, one) => s + Math.hypot(one.re[0], one.im[0]), 1);
+        expect(sum.sub(1).abs() / scale).toBeLessThan(1e-12);
+      }),
+      { numRuns: 500, seed: 12 },
+    );
+  });
+
+  it('keeps an incrementally changed bank equal to a new sum', () => {
+    const omega = Float64Array.from({ length: 50 }, (_, i) => 2 * Math.PI * 1e4 * 10 ** (i / 12));
+    const inverse = omega.map((w) => 1 / w);
+    const units = [1e-4, 1e-6, 1e-8].map((capacitance_F, i) =>
+      admittanceOver(
+        lineBranch({ id: String(i), count: 1, esr_ohm: 0.01, capacitance_F, inductance_H: 1e-9 }, 'line'),
+        omega,
+        inverse,
+      ),
+    );
+    const bank = new BankSum(units, [1, 2, 3], omega.length);
+    fc.assert(
+      fc.property(fc.integer({ min: 0, max: 2 }), fc.integer({ min: 0, max: 50 }), (k, count) => {
+        bank.setCount(k, count);
+      }),
+      { numRuns: 5000, seed: 13 },
+    );
+    const before = [Array.from(bank.total.g), Array.from(bank.total.b)];
+    bank.resum();
+    before[0].forEach((g, i) => {
+      const scale = Math.hypot(bank.total.g[i], bank.total.b[i]) + 1;
+      expect(Math.abs(g - bank.total.g[i]) / scale).toBeLessThan(1e-12);
+      expect(Math.abs(before[1][i] - bank.total.b[i]) / scale).toBeLessThan(1e-12);
+    });
+  });
+});
