@@ -52,16 +52,17 @@ function isKink(s: Sampled, i: number): boolean {
 function bisect(samples: Sampled, low: number, high: number): Maximum {
   let a = low;
   let b = high;
-  let best = { u: a, value: Number.NEGATIVE_INFINITY };
+  let value = Number.NEGATIVE_INFINITY;
   for (let k = 0; k < 60 && b - a > 1e-14 * Math.max(1, Math.abs(a)); k++) {
     const u = 0.5 * (a + b);
-    const { value, slope } = samples.at(u);
-    if (value > best.value) best = { u, value };
-    if (slope > 0) a = u;
+    const here = samples.at(u);
+    value = Math.max(value, here.value);
+    if (here.slope > 0) a = u;
     else b = u;
   }
-  const end = samples.at(a);
-  return end.value > best.value ? { u: a, value: end.value, edge: null } : { ...best, edge: null };
+  // The place is the slope's zero; the top is flat to rounding there, so its value is the highest seen on the way.
+  const u = 0.5 * (a + b);
+  return { u, value: Math.max(value, samples.at(u).value), edge: null };
 }
 
 /**
