@@ -3,8 +3,8 @@ import type { BankLine, SearchSettings } from '@shared/schemas/rail.schema';
 import { type EntityManager, Not } from 'typeorm';
 import { RailEntity } from '../db/entities/rail.entity';
 import { RailPartEntity } from '../db/entities/rail-part.entity';
+import { partsById } from '../db/repositories/part.repository';
 import { invalid } from '../errors/problems';
-import { partsById } from './part-list.service';
 
 export const nameKey = (name: string): string => name.normalize('NFC').toLowerCase();
 

@@ -7,7 +7,7 @@ import type { EntityManager } from 'typeorm';
 import type { Context } from '../context';
 import { RailEntity } from '../db/entities/rail.entity';
 import { RailPartEntity } from '../db/entities/rail-part.entity';
-import { partsById } from './part-list.service';
+import { partsById } from '../db/repositories/part.repository';
 
 /** The stored result of a rail, with its verdict in a column of its own for lists that count. */
 export function railResult(

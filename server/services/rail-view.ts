@@ -1,10 +1,9 @@
 import type { Part } from '@shared/schemas/part.schema';
 import type { Rail, RailList, RailWithParts } from '@shared/schemas/rail.schema';
 import type { EntityManager } from 'typeorm';
-import { PartEntity } from '../db/entities/part.entity';
 import { RailEntity } from '../db/entities/rail.entity';
+import { findParts } from '../db/repositories/part.repository';
 import { notFound } from '../errors/problems';
-import { partView } from './part-view';
 import { personRef } from './person.service';
 
 export function railView(rail: RailEntity): Rail {
@@ -32,19 +31,14 @@ export async function loadRail(manager: EntityManager, boardId: string, railId: 
 }
 
 /** All parts that the rails name, whatever their count. `whose` is a fixed piece of SQL over `rp` and `r`. */
-async function usedParts(manager: EntityManager, whose: string, value: string): Promise<Part[]> {
-  const parts = await manager
-    .createQueryBuilder(PartEntity, 'p')
-    .leftJoin('p.updatedBy', 'u')
-    .addSelect(['u.id', 'u.name'])
-    .where(
-      `p.id IN (SELECT rp.part_id FROM rail_part rp JOIN rail r ON r.id = rp.rail_id WHERE ${whose} = :value)`,
-      { value },
-    )
-    .orderBy('p.partNumber', 'ASC')
-    .addOrderBy('p.id', 'ASC')
-    .getMany();
-  return parts.map(partView);
+function usedParts(manager: EntityManager, whose: string, value: string): Promise<Part[]> {
+  return findParts(manager, {
+    conditions: [
+      `p.id IN (SELECT rp.part_id FROM rail_part rp JOIN rail r ON r.id = rp.rail_id WHERE ${whose} = ?)`,
+    ],
+    parameters: [value],
+    tail: 'ORDER BY p.part_number, p.id',
+  });
 }
 
 export async function railWithParts(

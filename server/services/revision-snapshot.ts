@@ -7,8 +7,8 @@ import type { PersonRef } from '@shared/schemas/common.schema';
 import type { RevisionRail } from '@shared/schemas/revision.schema';
 import type { EntityManager } from 'typeorm';
 import { RailEntity } from '../db/entities/rail.entity';
+import { partsById } from '../db/repositories/part.repository';
 import { canonicalJson } from './canonical-json';
-import { partsById } from './part-list.service';
 
 /** Everything a revision says, in the order-free form that its hash is taken over. */
 export interface Snapshot {
