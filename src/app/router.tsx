@@ -3,18 +3,26 @@ import { SiteLayout } from './layouts/site-layout';
 import { requireSession } from './require-session';
 import { RouteError } from './route-error';
 
+/** Nothing is shown while the first page's module is on its way. */
+const HydrateFallback = () => null;
+
 /** A route module is fetched when it is first visited; each exports its page as `Component`. */
 export const router = createBrowserRouter([
-  { path: '/sign-in', lazy: () => import('./routes/sign-in'), ErrorBoundary: RouteError },
-  { path: '/invitation/:token', lazy: () => import('./routes/invitation'), ErrorBoundary: RouteError },
-  { path: '/reset', lazy: () => import('./routes/forgotten'), ErrorBoundary: RouteError },
-  { path: '/reset/:token', lazy: () => import('./routes/reset'), ErrorBoundary: RouteError },
+  { path: '/sign-in', lazy: () => import('./routes/sign-in'), HydrateFallback, ErrorBoundary: RouteError },
+  {
+    path: '/invitation/:token',
+    lazy: () => import('./routes/invitation'),
+    HydrateFallback,
+    ErrorBoundary: RouteError,
+  },
+  { path: '/reset', lazy: () => import('./routes/forgotten'), HydrateFallback, ErrorBoundary: RouteError },
+  { path: '/reset/:token', lazy: () => import('./routes/reset'), HydrateFallback, ErrorBoundary: RouteError },
   {
     path: '/',
     Component: SiteLayout,
     loader: requireSession,
     ErrorBoundary: RouteError,
-    HydrateFallback: () => null,
+    HydrateFallback,
     children: [
       {
         ErrorBoundary: RouteError,

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { alignDecimal } from './align-decimal';
+import { alignDecimal, fractionRoom } from './align-decimal';
 
 const shown = (text: string) => text.replace(/\u00a0/g, '_');
 
@@ -19,5 +19,11 @@ describe('alignDecimal', () => {
 
   it('keeps the typeset minus with its number', () => {
     expect(shown(alignDecimal('−2.75\u00a0dB', { fraction: 3, unit: 2 }))).toBe('−2.75_dB');
+  });
+
+  it('finds the room that a column needs', () => {
+    expect(fractionRoom(['4.7\u00a0µF', '470\u00a0nF', '0.85\u00a0V'])).toBe(3);
+    expect(fractionRoom(['900\u00a0pH', '—'])).toBe(0);
+    expect(fractionRoom([])).toBe(0);
   });
 });

@@ -20,3 +20,8 @@ export function alignDecimal(text: string, room: DecimalRoom): string {
   const unit = rest.join(NBSP).padEnd(room.unit, NBSP);
   return room.unit > 0 ? `${whole}${fraction}${NBSP}${unit}` : whole + fraction;
 }
+
+/** Characters that the longest fraction of a column needs, its point included; 0 where there is none. */
+export function fractionRoom(texts: readonly string[]): number {
+  return Math.max(0, ...texts.map((text) => /\.\d+/.exec(text)?.[0].length ?? 0));
+}

@@ -2,6 +2,7 @@ import { useQuery } from '@tanstack/react-query';
 import { Link, useLocation, useParams } from 'react-router-dom';
 import { paths } from '@/config/paths';
 import { boardQuery } from '@/features/boards/api/boards';
+import { partQuery } from '@/features/parts/api/part';
 import { railsQuery } from '@/features/rails/api/rails';
 
 const PAGES: Record<string, string> = {
@@ -28,6 +29,7 @@ export function Breadcrumbs() {
     ...railsQuery(boardId ?? ''),
     enabled: boardId !== undefined && railId !== undefined,
   });
+  const part = useQuery({ ...partQuery(partId ?? ''), enabled: partId !== undefined });
   const crumbs: Crumb[] = [];
   if (pathname === '/' || pathname.startsWith('/boards')) crumbs.push({ text: 'Boards', to: paths.boards() });
   if (boardId) crumbs.push({ text: board.data?.name ?? '…', to: paths.board(boardId) });
@@ -41,7 +43,7 @@ export function Breadcrumbs() {
     crumbs.push({ text: 'Revisions', to: paths.revisions(boardId) });
   else if (PAGES[last]) crumbs.push({ text: PAGES[last] });
   if (letter) crumbs.push({ text: letter });
-  if (partId) crumbs.push({ text: 'part' });
+  if (partId) crumbs.push({ text: part.data?.partNumber ?? '…' });
   if (last === 'new') crumbs.push({ text: 'new' });
   return (
     <nav aria-label="where you are" className="min-w-0 truncate">

@@ -12,7 +12,7 @@ export function Table({
   children: ReactNode;
 }) {
   return (
-    <div className="overflow-x-auto">
+    <div className="relative overflow-x-auto">
       <table className="w-full border-collapse">
         <caption className="sr-only">{caption}</caption>
         <thead>

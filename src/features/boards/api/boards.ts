@@ -46,10 +46,8 @@ export function useDeleteBoard(boardId: string) {
   const client = useQueryClient();
   return useMutation({
     mutationFn: (version: number) => command('DELETE', `/boards/${boardId}?version=${version}`),
-    onSuccess: () => {
-      client.removeQueries({ queryKey: ['boards', boardId] });
-      return client.invalidateQueries({ queryKey: boardsQuery.queryKey, exact: true });
-    },
+    // The board itself is left in the cache: its page is still open, and would only ask for what is gone.
+    onSuccess: () => client.invalidateQueries({ queryKey: boardsQuery.queryKey, exact: true }),
   });
 }
 

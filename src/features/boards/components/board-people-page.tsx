@@ -30,7 +30,7 @@ export function BoardPeoplePage({ boardId, onDeleted }: { boardId: string; onDel
     >
       <MembersTable board={board} />
       {manage && (
-        <Section title="add a person" className="border-t pt-5">
+        <Section title="add a person">
           <AddMember board={board} />
         </Section>
       )}

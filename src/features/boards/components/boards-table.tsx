@@ -32,9 +32,7 @@ function Row({ board }: { board: BoardSummary }) {
           {board.name}
         </TextLink>
         {board.description && (
-          <span className="mt-0.5 block max-w-[44ch] truncate text-small text-stone">
-            {board.description}
-          </span>
+          <span className="mt-0.5 line-clamp-2 max-w-[52ch] text-small text-stone">{board.description}</span>
         )}
       </Td>
       <Td>

@@ -1,6 +1,7 @@
 import type { Part } from '@shared/schemas/part.schema';
 import { formatLetterCode, formatQuantity } from '@shared/units/format';
 import { Facts } from '@/components/ui/facts';
+import { formatCost } from '@/lib/format-cost';
 import { dayAndTime } from '@/lib/time';
 import { resonance_Hz } from '../lib/part-curve';
 import { toleranceText } from '../lib/tolerance';
@@ -18,7 +19,7 @@ export function PartFacts({ part }: { part: Part }) {
         ['case', part.caseSize],
         [
           'capacitance',
-          `${formatQuantity(part.capacitance_F, 'F', { trim: true })} (${formatLetterCode(part.capacitance_F, 'F')})`,
+          `${formatQuantity(part.capacitance_F, 'F', { trim: true })} (${formatLetterCode(Number(part.capacitance_F.toPrecision(12)), 'F')})`,
         ],
         ['tolerance', `${toleranceText(part.tolerance, part.capacitance_F)} (${part.tolerance})`],
         ['rated voltage', formatQuantity(part.rated_voltage_V, 'V', { trim: true })],
@@ -29,7 +30,7 @@ export function PartFacts({ part }: { part: Part }) {
         ['height', part.height_mm === null ? '—' : formatQuantity(part.height_mm, 'mm', { trim: true })],
         ['area', part.area_mm2 === null ? '—' : formatQuantity(part.area_mm2, 'mm²', { trim: true })],
         ['termination', part.termination],
-        ['price each', part.unit_cost === null ? '—' : part.unit_cost.toFixed(3)],
+        ['price each', formatCost(part.unit_cost, 3)],
         ['updated', `${dayAndTime(part.updatedAt)}${part.updatedBy ? `, ${part.updatedBy.name}` : ''}`],
       ]}
     />

@@ -40,11 +40,7 @@ export function PartForm({ initial, label, busy, save, onCancel, children }: Pro
   return (
     <form noValidate onSubmit={submit} className="flex max-w-4xl flex-col gap-6">
       <div className="grid gap-x-6 gap-y-4 sm:grid-cols-2 lg:grid-cols-3">
-        <Field
-          label="part number"
-          hint="Letters, digits and . _ / + -; the same in every list."
-          error={errors.partNumber?.message}
-        >
+        <Field label="part number" hint="Letters, digits and . _ / + -" error={errors.partNumber?.message}>
           {(field) => <Input {...field} {...register('partNumber')} />}
         </Field>
         <div className="lg:col-span-2">
@@ -61,14 +57,10 @@ export function PartForm({ initial, label, busy, save, onCancel, children }: Pro
             </Select>
           )}
         </Field>
-        <Field
-          label="dielectric (ceramics)"
-          hint="EIA code, e.g. X7R or C0G."
-          error={errors.dielectric?.message}
-        >
+        <Field label="dielectric (ceramics)" hint="e.g. X7R, C0G" error={errors.dielectric?.message}>
           {(field) => <Input {...field} {...register('dielectric')} />}
         </Field>
-        <Field label="case" hint="Inch code, e.g. 0402; polymers e.g. 7343." error={errors.caseSize?.message}>
+        <Field label="case" hint="e.g. 0402, 7343" error={errors.caseSize?.message}>
           {(field) => <Input {...field} {...register('caseSize')} />}
         </Field>
       </div>
@@ -139,7 +131,7 @@ export function PartForm({ initial, label, busy, save, onCancel, children }: Pro
           {...quantity}
           name="unit_cost"
           label="price each (may stay empty)"
-          hint="in the currency of your site"
+          hint="in €"
           error={errors.unit_cost?.message}
         />
         <Field label="termination" error={errors.termination?.message}>

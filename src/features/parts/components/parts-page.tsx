@@ -1,4 +1,4 @@
-import { useCallback } from 'react';
+import { useCallback, useState } from 'react';
 import { useSearchParams } from 'react-router-dom';
 import { Button, ButtonLink } from '@/components/ui/button';
 import { Failure } from '@/components/ui/failure';
@@ -24,7 +24,11 @@ export function PartsPage({ mayAdd }: { mayAdd: boolean }) {
       setSearch((now) => writeFilter({ ...readFilter(now), page: 1, ...next }), { replace: true }),
     [setSearch],
   );
-  const clear = () => setSearch({}, { replace: true });
+  const [clearings, setClearings] = useState(0);
+  const clear = () => {
+    setClearings((n) => n + 1);
+    setSearch({}, { replace: true });
+  };
   const sort = (by: PartFilter['sort']) => {
     const isSame = filter.sort === by;
     change({ sort: by, order: isSame && filter.order === 'asc' ? 'desc' : 'asc' });
@@ -35,7 +39,7 @@ export function PartsPage({ mayAdd }: { mayAdd: boolean }) {
       lead="Catalogue values; the curves of Class II dielectrics fall with bias, temperature and age."
       actions={mayAdd && <ButtonLink to={paths.newPart()}>New part</ButtonLink>}
     >
-      <PartsFilter filter={filter} facets={facets.data} onChange={change} onClear={clear} />
+      <PartsFilter key={clearings} filter={filter} facets={facets.data} onChange={change} onClear={clear} />
       {parts.isPending && <Loading what="the parts" />}
       {parts.isError && <Failure error={parts.error} what="the parts" retry={() => parts.refetch()} />}
       {parts.data && parts.data.items.length === 0 && (

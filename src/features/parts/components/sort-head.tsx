@@ -13,6 +13,8 @@ interface Props {
 export function SortHead({ label, sort, filter, numeric, onSort }: Props) {
   const isSorted = filter.sort === sort;
   const isUp = filter.order === 'asc';
+  // Before a column of figures, so that its head stays flush with them.
+  const arrow = <span aria-hidden>{isUp ? '↑' : '↓'}</span>;
   return (
     <Th numeric={numeric} aria-sort={isSorted ? (isUp ? 'ascending' : 'descending') : undefined}>
       <button
@@ -20,10 +22,9 @@ export function SortHead({ label, sort, filter, numeric, onSort }: Props) {
         onClick={() => onSort(sort)}
         className={`underline-offset-4 hover:underline ${isSorted ? 'font-semibold text-ink' : ''}`}
       >
+        {isSorted && numeric && arrow}
         {label}
-        <span aria-hidden className={isSorted ? '' : 'invisible'}>
-          {isSorted && isUp ? '↑' : '↓'}
-        </span>
+        {isSorted && !numeric && arrow}
       </button>
     </Th>
   );

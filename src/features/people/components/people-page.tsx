@@ -84,7 +84,7 @@ export function PeoplePage({ myId }: { myId: string | undefined }) {
           }}
         />
       )}
-      <Section title="what each site role may do" className="border-t pt-5">
+      <Section title="what each site role may do">
         <Facts className="max-w-3xl" rows={SITE_ROLES.map((role) => [role, SITE_ROLE_RIGHTS[role]])} />
       </Section>
       <InviteDialog

@@ -1,6 +1,6 @@
 import type { RevisionRail } from '@shared/schemas/revision.schema';
 import { describe, expect, it } from 'vitest';
-import { layoutCautions, railGroups } from './instance-groups';
+import { layoutCautions, railGroups, sharedReason } from './instance-groups';
 
 const instance = (designator: string, partNumber: string) => ({
   designator,
@@ -66,5 +66,12 @@ describe('placement by rail', () => {
 
   it('names each part to be careful with once, and only parts that are placed', () => {
     expect(layoutCautions(results)).toEqual({ cracks: ['BIG'], polarised: ['POL'] });
+  });
+
+  it('says a remark once only where it holds for all', () => {
+    const short = { ...instance('C1', 'A'), farthestReason: 'the rail is short as planned' };
+    expect(sharedReason({ instances: [short, { ...short, designator: 'C2' }] })).toBe(short.farthestReason);
+    expect(sharedReason({ instances: [short, { ...short, farthest_m: 0.01 }] })).toBeNull();
+    expect(sharedReason({ instances: [short, instance('C2', 'A')] })).toBeNull();
   });
 });

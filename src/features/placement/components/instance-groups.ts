@@ -14,6 +14,17 @@ export function railGroups(results: readonly RevisionRail[]): RailGroup[] {
     .map(({ railId, document, instances }) => ({ railId, rail: document.rail.name, instances }));
 }
 
+/** The one remark on the farthest distance that holds for every capacitor of a rail, so that it is said once. */
+export function sharedReason({ instances }: Pick<RailGroup, 'instances'>): string | null {
+  const [first] = instances;
+  const isShared = instances.every(
+    (one) =>
+      one.farthestReason === first.farthestReason &&
+      (one.farthest_m === null) === (first.farthest_m === null),
+  );
+  return isShared ? first.farthestReason : null;
+}
+
 export interface LayoutCautions {
   /** Part numbers of large ceramics with an ordinary termination. */
   cracks: string[];

@@ -1,8 +1,8 @@
 import type { Instance } from '@shared/schemas/revision.schema';
 import { formatFixed } from '@shared/units/format';
-import { Decimal } from '@/components/ui/decimal';
+import { Decimal, decimalRoom } from '@/components/ui/decimal';
 import { Table, Td, Th } from '@/components/ui/table';
-import type { RailGroup } from './instance-groups';
+import { type RailGroup, sharedReason } from './instance-groups';
 
 const COLUMNS = 9;
 const HEAD = (
@@ -15,57 +15,81 @@ const HEAD = (
     <Th>rail</Th>
     <Th numeric>mount</Th>
     <Th numeric>planned distance</Th>
-    <Th>farthest distance</Th>
+    <Th className="pl-6">farthest distance</Th>
   </>
 );
 
 const millimetres = (metres: number) => `${formatFixed(metres * 1000, 1)}\u00a0mm`;
 
-function Farthest({ one }: { one: Instance }) {
+function Farthest({ one, reasonIsAbove }: { one: Instance; reasonIsAbove: boolean }) {
   if (one.farthest_m === null)
-    return <span className="text-brass">! none: {one.farthestReason ?? 'not computed'}</span>;
+    return reasonIsAbove ? (
+      <span className="text-stone">none</span>
+    ) : (
+      <span className="text-brass">! none: {one.farthestReason ?? 'not computed'}</span>
+    );
   return (
     <>
       <span className="font-semibold">{millimetres(one.farthest_m)}</span>
-      {one.farthestReason && <span className="text-stone"> {one.farthestReason}</span>}
+      {one.farthestReason && !reasonIsAbove && <span className="text-stone"> {one.farthestReason}</span>}
     </>
   );
 }
 
-function Group({ group }: { group: RailGroup }) {
+function GroupHead({ group, reason }: { group: RailGroup; reason: string | null }) {
+  const isNone = group.instances.every((one) => one.farthest_m === null);
+  return (
+    <tr>
+      <th colSpan={COLUMNS} scope="rowgroup" className="border-b pt-5 pb-1 text-left font-semibold">
+        {group.rail}
+        <span className="font-normal text-stone">
+          {' '}
+          {group.instances.length} {group.instances.length === 1 ? 'part' : 'parts'}
+        </span>
+        {reason &&
+          (isNone ? (
+            <span className="font-normal text-brass"> · ! no farthest distance: {reason}</span>
+          ) : (
+            <span className="font-normal text-stone"> · {reason}</span>
+          ))}
+      </th>
+    </tr>
+  );
+}
+
+function Row({ one, reasonIsAbove, room }: { one: Instance; reasonIsAbove: boolean; room: number }) {
+  return (
+    <tr className="hover:bg-wash/50">
+      <Td className="font-semibold">{one.designator}</Td>
+      <Td className="whitespace-nowrap">{one.partNumber}</Td>
+      <Td className="whitespace-nowrap">{one.value}</Td>
+      <Td>{one.caseSize || '—'}</Td>
+      <Td>{one.side}</Td>
+      <Td className="whitespace-nowrap text-stone">{one.rail}</Td>
+      <Td numeric>
+        <Decimal value={one.mount_H} unit="H" fraction={room} />
+      </Td>
+      <Td numeric>
+        {one.distance_m === null ? (
+          <span className="text-stone">not planned</span>
+        ) : (
+          millimetres(one.distance_m)
+        )}
+      </Td>
+      <Td className="min-w-36 pl-6">
+        <Farthest one={one} reasonIsAbove={reasonIsAbove} />
+      </Td>
+    </tr>
+  );
+}
+
+function Group({ group, room }: { group: RailGroup; room: number }) {
+  const reason = sharedReason(group);
   return (
     <>
-      <tr>
-        <th colSpan={COLUMNS} scope="rowgroup" className="border-b pt-5 pb-1 text-left font-semibold">
-          {group.rail}
-          <span className="font-normal text-stone">
-            {' '}
-            {group.instances.length} {group.instances.length === 1 ? 'part' : 'parts'}
-          </span>
-        </th>
-      </tr>
+      <GroupHead group={group} reason={reason} />
       {group.instances.map((one) => (
-        <tr key={one.designator} className="hover:bg-wash/50">
-          <Td className="font-semibold">{one.designator}</Td>
-          <Td className="whitespace-nowrap">{one.partNumber}</Td>
-          <Td className="whitespace-nowrap">{one.value}</Td>
-          <Td>{one.caseSize || '—'}</Td>
-          <Td>{one.side}</Td>
-          <Td className="whitespace-nowrap text-stone">{one.rail}</Td>
-          <Td numeric>
-            <Decimal value={one.mount_H} unit="H" />
-          </Td>
-          <Td numeric>
-            {one.distance_m === null ? (
-              <span className="text-stone">not planned</span>
-            ) : (
-              millimetres(one.distance_m)
-            )}
-          </Td>
-          <Td className="min-w-48">
-            <Farthest one={one} />
-          </Td>
-        </tr>
+        <Row key={one.designator} one={one} reasonIsAbove={reason !== null} room={room} />
       ))}
     </>
   );
@@ -73,10 +97,14 @@ function Group({ group }: { group: RailGroup }) {
 
 /** One row a capacitor, under the rail it belongs to. */
 export function PlacementTable({ groups }: { groups: readonly RailGroup[] }) {
+  const room = decimalRoom(
+    groups.flatMap((group) => group.instances.map((one) => one.mount_H)),
+    'H',
+  );
   return (
     <Table caption="placement list by rail" head={HEAD}>
       {groups.map((group) => (
-        <Group key={group.railId} group={group} />
+        <Group key={group.railId} group={group} room={room} />
       ))}
     </Table>
   );

@@ -1,6 +1,6 @@
 import type { RevisionPeak } from '@shared/schemas/revision.schema';
 import { formatDecibel } from '@shared/units/format';
-import { Decimal } from '@/components/ui/decimal';
+import { Decimal, decimalRoom } from '@/components/ui/decimal';
 import { Table, Td, Th } from '@/components/ui/table';
 
 const HEAD = (
@@ -27,19 +27,29 @@ function Against({ peak: { impedance_ohm, target_ohm } }: { peak: RevisionPeak }
 /** Anti-resonances of the rail, each with the two members that make it. */
 export function PeaksTable({ rail, peaks }: { rail: string; peaks: readonly RevisionPeak[] }) {
   if (peaks.length === 0) return <p className="text-stone">No peaks in the band.</p>;
+  const rooms = {
+    frequency: decimalRoom(
+      peaks.map((peak) => peak.frequency_Hz),
+      'Hz',
+    ),
+    impedance: decimalRoom(
+      peaks.flatMap((peak) => [peak.impedance_ohm, peak.target_ohm]),
+      'Ω',
+    ),
+  };
   return (
     <Table caption={`peaks of ${rail}`} head={HEAD}>
       {peaks.map((peak, i) => (
         <tr key={peak.frequency_Hz}>
           <Td numeric>{i + 1}</Td>
           <Td numeric>
-            <Decimal value={peak.frequency_Hz} unit="Hz" />
+            <Decimal value={peak.frequency_Hz} unit="Hz" fraction={rooms.frequency} />
           </Td>
           <Td numeric>
-            <Decimal value={peak.impedance_ohm} unit="Ω" />
+            <Decimal value={peak.impedance_ohm} unit="Ω" fraction={rooms.impedance} />
           </Td>
           <Td numeric>
-            <Decimal value={peak.target_ohm} unit="Ω" />
+            <Decimal value={peak.target_ohm} unit="Ω" fraction={rooms.impedance} />
           </Td>
           <Td className="whitespace-nowrap">
             <Against peak={peak} />

@@ -1,17 +1,18 @@
 import type { RevisionRail } from '@shared/schemas/revision.schema';
 import { formatQuantity } from '@shared/units/format';
-import { Decimal } from '@/components/ui/decimal';
+import { Decimal, decimalRoom } from '@/components/ui/decimal';
 import { HeadroomSign } from '@/components/ui/headroom-sign';
 import { Table, Td, Th } from '@/components/ui/table';
 import { LINK } from '@/components/ui/text-link';
+import { formatCost } from '@/lib/format-cost';
 
 const HEAD = (
   <>
     <Th>rail</Th>
+    <Th>tightest headroom</Th>
     <Th numeric>voltage</Th>
     <Th numeric>target there</Th>
     <Th numeric>impedance</Th>
-    <Th>tightest headroom</Th>
     <Th numeric>parts</Th>
     <Th numeric>kinds</Th>
     <Th numeric>cost</Th>
@@ -35,6 +36,20 @@ function Headroom({ summary }: Pick<RevisionRail, 'summary'>) {
 }
 
 export function RailResultsTable({ rails }: { rails: readonly RevisionRail[] }) {
+  const rooms = {
+    voltage: decimalRoom(
+      rails.map(({ document }) => document.rail.voltage_V),
+      'V',
+    ),
+    impedance: decimalRoom(
+      rails.flatMap(({ summary }) => [summary.tightest?.target_ohm, summary.tightest?.impedance_ohm]),
+      'Ω',
+    ),
+    area: decimalRoom(
+      rails.map(({ summary }) => summary.area_mm2),
+      'mm²',
+    ),
+  };
   return (
     <Table caption="rails of this revision and their results" head={HEAD}>
       {rails.map(({ railId, document, summary }) => (
@@ -44,23 +59,23 @@ export function RailResultsTable({ rails }: { rails: readonly RevisionRail[] }) 
               {document.rail.name}
             </a>
           </Td>
-          <Td numeric>
-            <Decimal value={document.rail.voltage_V} unit="V" />
-          </Td>
-          <Td numeric>
-            <Decimal value={summary.tightest?.target_ohm} unit="Ω" />
-          </Td>
-          <Td numeric>
-            <Decimal value={summary.tightest?.impedance_ohm} unit="Ω" />
-          </Td>
           <Td className="min-w-56">
             <Headroom summary={summary} />
           </Td>
+          <Td numeric>
+            <Decimal value={document.rail.voltage_V} unit="V" fraction={rooms.voltage} />
+          </Td>
+          <Td numeric>
+            <Decimal value={summary.tightest?.target_ohm} unit="Ω" fraction={rooms.impedance} />
+          </Td>
+          <Td numeric>
+            <Decimal value={summary.tightest?.impedance_ohm} unit="Ω" fraction={rooms.impedance} />
+          </Td>
           <Td numeric>{summary.parts}</Td>
           <Td numeric>{summary.kinds}</Td>
-          <Td numeric>{summary.cost === null ? '—' : summary.cost.toFixed(2)}</Td>
+          <Td numeric>{formatCost(summary.cost)}</Td>
           <Td numeric>
-            <Decimal value={summary.area_mm2} unit="mm²" />
+            <Decimal value={summary.area_mm2} unit="mm²" fraction={rooms.area} />
           </Td>
         </tr>
       ))}

@@ -6,6 +6,7 @@ import { Failure } from '@/components/ui/failure';
 import { Loading, Page } from '@/components/ui/page';
 import { RailTally } from '@/components/ui/rail-tally';
 import { paths } from '@/config/paths';
+import { formatCost } from '@/lib/format-cost';
 import { dayAndTime } from '@/lib/time';
 import { usePageTitle } from '@/lib/use-page-title';
 import { useRevision } from '../api/revision';
@@ -20,7 +21,7 @@ function Header({ revision }: { revision: RevisionDetail }) {
         ['cut by', `${revision.createdBy.name}, ${dayAndTime(revision.createdAt)}`],
         ['rails', <RailTally key="rails" rails={revision.rails} />],
         ['parts', String(revision.parts)],
-        ['cost', revision.cost === null ? '— (a part has no price)' : revision.cost.toFixed(2)],
+        ['cost', revision.cost === null ? '— (a part has no price)' : formatCost(revision.cost)],
         [
           'area',
           revision.area_mm2 === null ? '— (a part has no area)' : formatQuantity(revision.area_mm2, 'mm²'),

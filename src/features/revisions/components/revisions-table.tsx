@@ -1,9 +1,10 @@
 import type { Revision } from '@shared/schemas/revision.schema';
-import { Decimal } from '@/components/ui/decimal';
+import { Decimal, decimalRoom } from '@/components/ui/decimal';
 import { RailTally } from '@/components/ui/rail-tally';
 import { Table, Td, Th } from '@/components/ui/table';
 import { TextLink } from '@/components/ui/text-link';
 import { paths } from '@/config/paths';
+import { formatCost } from '@/lib/format-cost';
 import { dayAndTime } from '@/lib/time';
 
 const HEAD = (
@@ -22,6 +23,10 @@ const HEAD = (
 
 /** The revisions of a board, newest first. */
 export function RevisionsTable({ boardId, revisions }: { boardId: string; revisions: readonly Revision[] }) {
+  const room = decimalRoom(
+    revisions.map((one) => one.area_mm2),
+    'mm²',
+  );
   return (
     <Table caption="revisions, newest first" head={HEAD}>
       {revisions.map((one) => (
@@ -44,9 +49,9 @@ export function RevisionsTable({ boardId, revisions }: { boardId: string; revisi
             <RailTally rails={one.rails} />
           </Td>
           <Td numeric>{one.parts}</Td>
-          <Td numeric>{one.cost === null ? '—' : one.cost.toFixed(2)}</Td>
+          <Td numeric>{formatCost(one.cost)}</Td>
           <Td numeric>
-            <Decimal value={one.area_mm2} unit="mm²" />
+            <Decimal value={one.area_mm2} unit="mm²" fraction={room} />
           </Td>
           <Td className="text-stone" title={one.hash}>
             {one.hash.slice(0, 8)}

@@ -1,6 +1,6 @@
 import { targetFromStep } from '@shared/engine/target';
 import type { RailSpec, Source } from '@shared/schemas/rail-spec.schema';
-import { formatLength, formatQuantity } from '@shared/units/format';
+import { formatLength, formatQuantity, formatVolts } from '@shared/units/format';
 import type { UnitSymbol } from '@shared/units/quantity';
 
 const q = (value: number, unit: UnitSymbol) => formatQuantity(value, unit, { trim: true });
@@ -77,7 +77,7 @@ function stepRows({ load_step: step }: RailSpec): [string, string][] {
 /** A rail's specification in words and figures, as rows of label and value. */
 export function specFacts(spec: RailSpec): [string, string][] {
   return [
-    ['rail', q(spec.voltage_V, 'V')],
+    ['rail', formatVolts(spec.voltage_V)],
     ...targetRows(spec),
     ['band', `${q(spec.band_Hz[0], 'Hz')} – ${q(spec.band_Hz[1], 'Hz')}`],
     ['source', sourceText(spec.source)],

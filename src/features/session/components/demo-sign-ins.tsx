@@ -7,9 +7,14 @@ export function DemoSignIns({ onSignedIn }: { onSignedIn: () => void }) {
   const { data: site } = useSite();
   const signIn = useSignIn();
   if (!site?.demo || site.demoPeople.length === 0) return null;
+  const passwords = new Set(site.demoPeople.map((person) => person.password));
+  const shared = passwords.size === 1 ? site.demoPeople[0].password : null;
   return (
     <section className="border-t pt-6">
-      <h2 className="section-head mb-2">or look around as one of the demo’s people</h2>
+      <h2 className="section-head mb-2">
+        or look around as one of the demo’s people
+        {shared && <>, all with the password “{shared}”</>}
+      </h2>
       <ul>
         {site.demoPeople.map(({ email, password, role }) => (
           <li key={email} className="border-b last:border-b-0">
@@ -21,7 +26,6 @@ export function DemoSignIns({ onSignedIn }: { onSignedIn: () => void }) {
             >
               <span className="font-semibold text-deep underline-offset-4 group-hover:underline">{role}</span>
               <span className="text-small text-stone">{email}</span>
-              <span className="w-full text-small text-stone">password {password}</span>
             </button>
           </li>
         ))}

@@ -20,7 +20,7 @@ export function DoorLayout({
           Millpond
         </p>
         <Pond className="hidden w-full max-w-[60rem] self-center lg:block" />
-        <div className="max-w-[44rem]">
+        <div className="max-w-[52rem]">
           <p className="text-large font-semibold">
             A millpond is a small local reservoir with a flat, quiet surface.
           </p>

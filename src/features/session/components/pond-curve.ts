@@ -19,7 +19,7 @@ export const POND_TARGET_OHM = 8.5e-3;
 /** The waterline ends where the band of this rail ends. */
 export const POND_END_Hz = 4e7;
 
-const STEPS = 240;
+const STEPS = 480;
 
 /** Points [Hz, ohm] of a network over the picture's axis. */
 function points(rail: ReturnType<typeof compileRail>): [number, number][] {
