@@ -1,3 +1,4 @@
+import path from 'node:path';
 import { type ParseArgsConfig, parseArgs } from 'node:util';
 import { BadInput } from './bad-input';
 
@@ -15,3 +16,6 @@ export function oneFile(positionals: string[], command: string): string {
   if (positionals.length !== 1) throw new BadInput(`${command} takes one file: ${command} FILE`);
   return positionals[0];
 }
+
+/** A path as the person meant it: npm runs scripts in the project's folder and says where it was called. */
+export const userPath = (file: string): string => path.resolve(process.env.INIT_CWD ?? process.cwd(), file);

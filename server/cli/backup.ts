@@ -2,14 +2,14 @@ import { chmodSync, existsSync, renameSync, rmSync, statSync } from 'node:fs';
 import path from 'node:path';
 import Database from 'better-sqlite3';
 import { databaseFile } from '../db/database-file';
-import { oneFile, readArguments } from './arguments';
+import { oneFile, readArguments, userPath } from './arguments';
 import { BadInput } from './bad-input';
 import { commandConfig } from './settings';
 
 /** A consistent copy while the server runs; the file appears under its name only when it is whole. */
 export async function run(args: string[]): Promise<number> {
   const { values, positionals } = readArguments(args, { force: { type: 'boolean', default: false } });
-  const target = path.resolve(oneFile(positionals, 'backup'));
+  const target = userPath(oneFile(positionals, 'backup'));
   const source = databaseFile(commandConfig().dataFolder);
   if (!existsSync(source)) throw new BadInput(`there is no database yet in ${path.dirname(source)}`);
   if (!existsSync(path.dirname(target))) throw new BadInput(`${target}: its folder does not exist`);

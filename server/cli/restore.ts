@@ -3,7 +3,7 @@ import path from 'node:path';
 import Database from 'better-sqlite3';
 import { databaseFile } from '../db/database-file';
 import { migrationNames } from '../db/migrations';
-import { oneFile, readArguments } from './arguments';
+import { oneFile, readArguments, userPath } from './arguments';
 import { BadInput } from './bad-input';
 import { checkBackup } from './check-backup';
 import { commandConfig } from './settings';
@@ -11,7 +11,7 @@ import { commandConfig } from './settings';
 /** Puts a backup in the database's place and keeps what stood there aside. */
 export async function run(args: string[]): Promise<number> {
   const { positionals } = readArguments(args, {});
-  const backup = path.resolve(oneFile(positionals, 'restore'));
+  const backup = userPath(oneFile(positionals, 'restore'));
   const target = databaseFile(commandConfig().dataFolder);
   if (backup === target) throw new BadInput(`${backup}: is the database itself`);
   checkBackup(backup, migrationNames);
