@@ -8,6 +8,8 @@ export class Bank {
   readonly y: Float64Array;
   weight: number;
   kinds: number;
+  /** When set, only these parts may be added, and the number of kinds is the caller's business. */
+  allowed: ReadonlySet<number> | null = null;
   private readonly prepared: Prepared;
   private readonly rows: Rows;
 
@@ -25,7 +27,17 @@ export class Bank {
   /** True when one more of part k keeps within its maximum and the number of kinds. */
   canAdd(k: number): boolean {
     if (this.counts[k] >= this.prepared.parts[k].max) return false;
+    if (this.allowed) return this.allowed.has(k);
     return this.counts[k] > 0 || this.kinds < this.prepared.maxKinds;
+  }
+
+  /** Parts with a count above zero. */
+  used(): number[] {
+    return Array.from(this.counts.keys()).filter((k) => this.counts[k] > 0);
+  }
+
+  clear(k: number): void {
+    this.change(k, this.prepared.parts[k].min - this.counts[k]);
   }
 
   canRemove(k: number): boolean {

@@ -24,16 +24,18 @@ const STRIDE = 1 / 3;
 /**
  * The next budget of the deepening: the bound plus a third of the gap to the incumbent (the passes far below are over at once
  * and tell little), but for whole weights at least the bound itself, and never past what would still be an improvement.
- * `most` is the weight of everything at its maximum, which ends the search when there is no incumbent.
+ * `most` is the weight of everything at its maximum, which ends the search when there is no incumbent; `scale` is then a guess
+ * at the order of size, or 0.
  */
 export function nextBudget(
   prepared: Prepared,
   bound: number,
   incumbent: number | null,
   most: number,
+  scale: number,
 ): number {
   const top = incumbent === null ? most : budgetBelow(prepared, incumbent);
-  const gap = incumbent === null ? Math.max(0.9 * bound, 0.06 * most) : incumbent - bound;
+  const gap = incumbent === null ? Math.max(0.9 * bound, scale > 0 ? scale : 0.06 * most) : incumbent - bound;
   if (prepared.step === 1)
     return Math.min(top, Math.floor(bound) + Math.max(0, Math.floor(STRIDE * gap) - 1));
   const least = 0.01 * (incumbent ?? most);

@@ -25,6 +25,8 @@ export class MixStage {
   incumbent: Incumbent | null = null;
   /** The attempt that came closest while nothing holds. */
   closest: Tightest | null = null;
+  /** What a mix without a limit on the kinds weighs, a guess at the order of size; 0 when unknown. */
+  scale = 0;
   private grid: number[];
   private drift: Int32Array | null = null;
   private readonly random: () => number;
@@ -71,6 +73,35 @@ export class MixStage {
       if (answer !== 'grown') return answer === 'held';
     }
     return false;
+  }
+
+  /**
+   * Where the number of kinds is limited: a mix of as many kinds as it takes, then without one kind after the other, each time
+   * the one that is missed least. (Greedy from nothing spends its kinds before it knows what it needs.) Yields between trials.
+   */
+  *eliminateKinds(): Generator<void, void, void> {
+    const { prepared, rows, random } = this;
+    let best = new Bank(prepared, rows);
+    best.allowed = new Set(prepared.parts.keys());
+    if (growGreedily(prepared, rows, best, Number.POSITIVE_INFINITY, 0, random) > 0) return;
+    prunePieces(prepared, rows, best, random);
+    this.scale = best.weight;
+    while (best.kinds > prepared.maxKinds) {
+      let next: Bank | null = null;
+      for (const k of best.used().filter((used) => prepared.parts[used].min === 0)) {
+        const bank = new Bank(prepared, rows, best.counts);
+        bank.clear(k);
+        bank.allowed = new Set(bank.used());
+        const limit = next?.weight ?? Number.POSITIVE_INFINITY;
+        yield;
+        if (growGreedily(prepared, rows, bank, limit, 0, random) > 0) continue;
+        prunePieces(prepared, rows, bank, random);
+        if (!next || bank.weight < next.weight) next = bank;
+      }
+      if (!next) return;
+      best = next;
+    }
+    if (!this.incumbent || best.weight < this.incumbent.weight) this.offer(best.counts, best.weight);
   }
 
   /** One round of destroy and repair from the incumbent, or from an equally light mix that it drifted to. */

@@ -6,6 +6,9 @@ import { SectorTree } from './sector-tree';
 /** Turns: nodes of the counts' tree and of the sectors' tree that take about the same time (some 8 ms). */
 const COUNT_TURN = 2048;
 const SECTOR_TURN = 256;
+/** Every so many turns the mix gets some rounds of destroy and repair: about a tenth of the time. */
+const IMPROVE_EVERY = 8;
+const IMPROVE_ROUNDS = 16;
 /** A pass of the counts' tree this long is a sign of a large bank: the sectors' tree joins in. */
 const JOIN_AFTER = 40_000;
 /** Turns that the tree which closed the last budget gets for each one of the other. */
@@ -73,7 +76,9 @@ export class Portfolio {
 
   private startPass(): void {
     const { prepared, incumbent } = this.stage;
-    this.count.start(nextBudget(prepared, this.bound, incumbent?.weight ?? null, this.most));
+    this.count.start(
+      nextBudget(prepared, this.bound, incumbent?.weight ?? null, this.most, this.stage.scale),
+    );
     this.passStart = this.count.nodes;
     this.isRunning = true;
     this.isJoined = false;
@@ -95,9 +100,21 @@ export class Portfolio {
   }
 
   private nextTurn(): void {
+    if (this.turn % IMPROVE_EVERY === IMPROVE_EVERY - 1)
+      for (let round = 0; round < IMPROVE_ROUNDS; round++) if (this.stage.improve()) this.afterImprovement();
     if (!this.isJoined && this.count.nodes - this.passStart > JOIN_AFTER) this.join();
     this.turn++;
     this.turnLeft = this.isSectorTurn() ? SECTOR_TURN : COUNT_TURN;
+  }
+
+  /** Destroy and repair found a lighter mix while the trees were at work. */
+  private afterImprovement(): void {
+    const { incumbent, prepared } = this.stage;
+    if (!incumbent) return;
+    const budget = budgetBelow(prepared, incumbent.weight);
+    if (budget >= this.count.budget) return;
+    this.count.lower(budget);
+    if (this.isJoined) this.join();
   }
 
   /** Brings a mix that holds on the rows to the engine and tells both trees. */

@@ -34,6 +34,8 @@ export function* searchMix(
   }
   stage.growFirst(0);
   yield report.progress('mix');
+  if (prepared.maxKinds < prepared.parts.length)
+    for (const _ of stage.eliminateKinds()) if (report.isDue()) yield report.progress('mix');
   const rounds = Math.min(FIRST_ROUNDS, FIRST_WORK / (stage.rows.size * prepared.parts.length * 200));
   for (let round = 0; round < rounds && !isOver(); round++)
     if (stage.improve() || report.isDue()) yield report.progress('mix');
