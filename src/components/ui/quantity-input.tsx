@@ -41,10 +41,12 @@ interface QuantityInputProps extends Base {
   value: number | null;
   /** Called on Enter or when the field is left, with a value that was understood; null when emptied. */
   onCommit: (value: number | null) => void;
+  /** Says under the field what was not understood, where there is room for it. */
+  showFault?: boolean;
 }
 
 /** A quantity edited in place: commits on Enter or blur, Escape puts the old value back, what is wrong stays and says so. */
-export function QuantityInput({ unit, value, onCommit, ...rest }: QuantityInputProps) {
+export function QuantityInput({ unit, value, onCommit, showFault = false, ...rest }: QuantityInputProps) {
   const [draft, setDraft] = useState<string | null>(null);
   const shown = draft ?? (value === null ? '' : writeQuantity(value, unit));
   const parsed: Parsed | null = draft === null || draft.trim() === '' ? null : readQuantity(draft, unit);
@@ -56,7 +58,7 @@ export function QuantityInput({ unit, value, onCommit, ...rest }: QuantityInputP
     setDraft(null);
   };
   const fault = parsed && !parsed.ok ? parsed.reason : undefined;
-  return (
+  const input = (
     <UnitInput
       {...rest}
       unit={unit}
@@ -71,5 +73,16 @@ export function QuantityInput({ unit, value, onCommit, ...rest }: QuantityInputP
         event.stopPropagation();
       }}
     />
+  );
+  if (!showFault) return input;
+  return (
+    <>
+      {input}
+      {fault && (
+        <span role="alert" className="text-small text-kingfisher">
+          ▲ {fault}
+        </span>
+      )}
+    </>
   );
 }

@@ -22,9 +22,9 @@ function Row({ member: { person, role }, isOwner, mayManage, busy, onSet }: RowP
       <Td className="min-w-40">
         <span className="font-semibold">{person.name}</span>
         {person.disabled && <span className="text-brass"> ! disabled</span>}
+        <span className="block text-stone">{person.email}</span>
       </Td>
-      <Td className="text-stone">{person.email}</Td>
-      <Td className="min-w-36">
+      <Td className="min-w-32">
         {mayChange ? (
           <Select
             aria-label={`role of ${person.name}`}
@@ -72,8 +72,7 @@ export function MembersTable({ board }: { board: BoardDetail }) {
         caption="people on this board"
         head={
           <>
-            <Th>name</Th>
-            <Th>e-mail</Th>
+            <Th>person</Th>
             <Th>role</Th>
             {mayManage && (
               <Th>

@@ -13,7 +13,7 @@ export function Pager({ page, perPage, total, onPage }: Props) {
   const last = Math.min(total, page * perPage);
   return (
     <nav aria-label="pages of the list" className="flex items-center gap-4">
-      <span className="text-stone">
+      <span aria-live="polite" className="text-stone">
         {first}–{last} of {total}
       </span>
       {total > perPage && (

@@ -83,8 +83,8 @@ interface Props {
 
 export function PartsFilter({ filter, facets, onChange, onClear }: Props) {
   return (
-    <search className="grid grid-cols-2 items-end gap-x-4 gap-y-3 sm:grid-cols-4 xl:grid-cols-[minmax(12rem,2fr)_repeat(4,minmax(7rem,1fr))_repeat(3,6.5rem)_auto]">
-      <div className="col-span-2 xl:col-span-1">
+    <search className="grid grid-cols-2 items-start gap-x-4 gap-y-3 sm:grid-cols-4 min-[1400px]:grid-cols-[minmax(12rem,2fr)_repeat(4,minmax(7rem,1fr))_repeat(3,6.5rem)_3rem]">
+      <div className="col-span-2 sm:col-span-1">
         <TextFilter value={filter.q ?? ''} onChange={(q) => onChange({ q: q || undefined })} />
       </div>
       <ChoiceField
@@ -115,6 +115,7 @@ export function PartsFilter({ filter, facets, onChange, onClear }: Props) {
         {(control) => (
           <QuantityInput
             {...control}
+            showFault
             unit="V"
             value={filter.min_rated_V ?? null}
             onCommit={(value) => onChange({ min_rated_V: value ?? undefined })}
@@ -125,6 +126,7 @@ export function PartsFilter({ filter, facets, onChange, onClear }: Props) {
         {(control) => (
           <QuantityInput
             {...control}
+            showFault
             unit="F"
             value={filter.min_F ?? null}
             onCommit={(value) => onChange({ min_F: value ?? undefined })}
@@ -135,15 +137,18 @@ export function PartsFilter({ filter, facets, onChange, onClear }: Props) {
         {(control) => (
           <QuantityInput
             {...control}
+            showFault
             unit="F"
             value={filter.max_F ?? null}
             onCommit={(value) => onChange({ max_F: value ?? undefined })}
           />
         )}
       </Field>
-      <Button variant="plain" className={isFiltered(filter) ? '' : 'invisible'} onClick={onClear}>
-        Clear
-      </Button>
+      <div className={isFiltered(filter) ? 'min-[1400px]:mt-6' : 'hidden'}>
+        <Button variant="plain" onClick={onClear}>
+          Clear
+        </Button>
+      </div>
     </search>
   );
 }

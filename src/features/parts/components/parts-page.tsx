@@ -40,8 +40,10 @@ export function PartsPage({ mayAdd }: { mayAdd: boolean }) {
       actions={mayAdd && <ButtonLink to={paths.newPart()}>New part</ButtonLink>}
     >
       <PartsFilter key={clearings} filter={filter} facets={facets.data} onChange={change} onClear={clear} />
-      {parts.isPending && <Loading what="the parts" />}
-      {parts.isError && <Failure error={parts.error} what="the parts" retry={() => parts.refetch()} />}
+      <div className="-mx-6 empty:hidden">
+        {parts.isPending && <Loading what="the parts" />}
+        {parts.isError && <Failure error={parts.error} what="the parts" retry={() => parts.refetch()} />}
+      </div>
       {parts.data && parts.data.items.length === 0 && (
         <EmptyState
           title={

@@ -67,8 +67,10 @@ export function PeoplePage({ myId }: { myId: string | undefined }) {
         </p>
       )}
       {failure && <Notice tone="error">{refusal(failure)}</Notice>}
-      {people.isPending && <Loading what="the people" />}
-      {people.isError && <Failure error={people.error} what="the people" retry={() => people.refetch()} />}
+      <div className="-mx-6 empty:hidden">
+        {people.isPending && <Loading what="the people" />}
+        {people.isError && <Failure error={people.error} what="the people" retry={() => people.refetch()} />}
+      </div>
       {people.data?.items.length === 0 && (
         <EmptyState title={`Nobody here is called “${q}”`}>Invite them by e-mail.</EmptyState>
       )}

@@ -7,8 +7,7 @@ import { asSiteRole, SITE_ROLES } from './site-role-words';
 
 const HEAD = (
   <>
-    <Th>name</Th>
-    <Th>e-mail</Th>
+    <Th>person</Th>
     <Th>site role</Th>
     <Th>state</Th>
     <Th>since</Th>
@@ -38,8 +37,8 @@ function Row({ person, isMe, actions }: { person: Person; isMe: boolean; actions
       <Td className="min-w-40">
         <span className="font-semibold">{person.name}</span>
         {isMe && <span className="text-stone"> (you)</span>}
+        <span className="block text-stone">{person.email}</span>
       </Td>
-      <Td className="text-stone">{person.email}</Td>
       <Td className="min-w-36">
         <Select
           aria-label={`site role of ${person.name}`}

@@ -1,4 +1,3 @@
-import { Loading } from '@/components/ui/page';
 import { TextLink } from '@/components/ui/text-link';
 import { paths } from '@/config/paths';
 import { dayAndTime } from '@/lib/time';
@@ -15,7 +14,9 @@ export function InvitationPage({ token, onAccepted }: { token: string; onAccepte
   if (invitation.isPending)
     return (
       <DoorLayout title="Invitation">
-        <Loading what="your invitation" />
+        <p role="status" className="text-stone">
+          checking your invitation …
+        </p>
       </DoorLayout>
     );
   if (invitation.isError)

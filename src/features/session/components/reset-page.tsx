@@ -1,4 +1,3 @@
-import { Loading } from '@/components/ui/page';
 import { TextLink } from '@/components/ui/text-link';
 import { paths } from '@/config/paths';
 import { usePageTitle } from '@/lib/use-page-title';
@@ -23,7 +22,9 @@ export function ResetPage({ token }: { token: string }) {
   if (reset.isPending)
     return (
       <DoorLayout title="New password">
-        <Loading what="your link" />
+        <p role="status" className="text-stone">
+          checking your link …
+        </p>
       </DoorLayout>
     );
   const failure = reset.error ?? save.error;
