@@ -83,7 +83,7 @@ interface Props {
 
 export function PartsFilter({ filter, facets, onChange, onClear }: Props) {
   return (
-    <search className="grid grid-cols-2 items-start gap-x-4 gap-y-3 sm:grid-cols-4 min-[1400px]:grid-cols-[minmax(12rem,2fr)_repeat(4,minmax(7rem,1fr))_repeat(3,6.5rem)_3rem]">
+    <search className="grid grid-cols-2 items-start gap-x-4 gap-y-3 sm:grid-cols-4 min-[87.5rem]:grid-cols-[minmax(12rem,2fr)_repeat(4,minmax(7rem,1fr))_repeat(3,6.5rem)_3rem]">
       <div className="col-span-2 sm:col-span-1">
         <TextFilter value={filter.q ?? ''} onChange={(q) => onChange({ q: q || undefined })} />
       </div>
@@ -144,7 +144,7 @@ export function PartsFilter({ filter, facets, onChange, onClear }: Props) {
           />
         )}
       </Field>
-      <div className={isFiltered(filter) ? 'min-[1400px]:mt-6' : 'hidden'}>
+      <div className={isFiltered(filter) ? 'min-[87.5rem]:mt-6' : 'hidden'}>
         <Button variant="plain" onClick={onClear}>
           Clear
         </Button>

@@ -16,7 +16,7 @@ export function RailSection({ rail: { railId, document, summary, peaks } }: { ra
     <article
       id={railAnchor(railId)}
       aria-label={rail.name}
-      className="grid scroll-mt-4 gap-x-10 gap-y-5 border-t pt-5 min-[1400px]:grid-cols-[19rem_minmax(0,1fr)]"
+      className="grid scroll-mt-4 gap-x-10 gap-y-5 border-t pt-5 min-[87.5rem]:grid-cols-[19rem_minmax(0,1fr)]"
     >
       <div className="flex flex-col gap-5">
         <div>
