@@ -18,7 +18,8 @@ export function useAcceptInvitation(token: string) {
     mutationFn: (body: { name: string; password: string }) =>
       request('POST', `/invitations/${token}`, sessionSchema, { body, quietUnauthorised: true }),
     onSuccess: (session) => {
-      client.clear();
+      // All but this link's own query: its page is still open and would ask for a link that is used up.
+      client.removeQueries({ predicate: ({ queryKey }) => queryKey[0] !== 'invitation' });
       client.setQueryData(sessionQuery.queryKey, session);
     },
   });

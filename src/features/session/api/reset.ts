@@ -19,6 +19,7 @@ export function useSetPassword(token: string) {
   return useMutation({
     mutationFn: (body: { password: string }) =>
       command('POST', `/password-resets/${token}`, { body, quietUnauthorised: true }),
-    onSuccess: () => client.clear(),
+    // All but this link's own query: its page is still open and would ask for a link that is used up.
+    onSuccess: () => client.removeQueries({ predicate: ({ queryKey }) => queryKey[0] !== 'reset' }),
   });
 }
