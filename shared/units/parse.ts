@@ -23,8 +23,8 @@ const SPELLINGS: Readonly<Record<UnitSymbol, readonly string[]>> = {
   '': [],
 };
 
-/** Letters that stand for the decimal point without scaling (IEC 60062): R in general, F for farads. */
-const POINT_LETTERS: Partial<Record<UnitSymbol, string>> = { Ω: 'R', F: 'RF', H: 'R' };
+/** Letters that stand for the decimal point without scaling: R in general, F for farads (IEC 60062), V as in `6V3` (common practice). */
+const POINT_LETTERS: Partial<Record<UnitSymbol, string>> = { Ω: 'R', F: 'RF', H: 'R', V: 'V' };
 
 /** Units that are never written with a prefix here. */
 const PLAIN: ReadonlySet<UnitSymbol> = new Set(['%', 'dB', '', 'mm', 'mm²']);

@@ -41,6 +41,7 @@ describe('reading quantities', () => {
     ['3 %', '%', 3],
     ['.5', 'V', 0.5],
     ['1F5', 'F', 1.5],
+    ['6V3', 'V', 6.3],
   ] as const)('%s in %s', (text, unit, expected) => {
     expect(value(text, unit)).toBe(expected);
   });

@@ -26,6 +26,9 @@ const scales: [limit: number, factor: number, letter: string][] = [
   [1, 1e6, 'U'],
 ];
 
+/** `100 * 1e-9` is not the double nearest to 1e-7: the part's page would show the noise. */
+const exact = (value: number): number => Number(value.toPrecision(12));
+
 /** 1e-7 → 100N, 2.2e-6 → 2U2. */
 export function valueCode(capacitance_F: number): string {
   const [, factor, letter] = scales.find(([limit]) => capacitance_F < limit * 0.9999) ?? scales[2];
@@ -57,7 +60,7 @@ export function ceramic(
     technology: 'ceramic',
     dielectric,
     caseSize,
-    capacitance_F,
+    capacitance_F: exact(capacitance_F),
     tolerance: dielectric === 'C0G' ? 'J' : capacitance_F >= 10e-6 ? 'M' : 'K',
     rated_voltage_V,
     esr_ohm: ceramicEsr(capacitance_F, dielectric),
@@ -85,7 +88,7 @@ export function bulk(
     technology,
     dielectric: '',
     caseSize,
-    capacitance_F,
+    capacitance_F: exact(capacitance_F),
     tolerance: 'M',
     rated_voltage_V,
     esr_ohm,

@@ -11,6 +11,8 @@ export interface DemoRail {
   bank: DemoLine[];
   /** What the bank was when revision A was cut, where it differs. */
   firstBank?: DemoLine[];
+  /** Parts that the search may use, where the engineer has made a choice. */
+  candidates?: string[];
 }
 
 const metres = (millimetres: number): number => millimetres / 1000;
@@ -74,6 +76,23 @@ export const demoRails: DemoRail[] = [
       observe: 'pins',
       load_step: { before_A: 2, step_A: 10, rise_s: 29e-9, hold_s: 60e-6, fall_s: 29e-9 },
     },
+    candidates: [
+      'AB-P7343-470U-2V5-6M',
+      'AB-P7343-330U-4-7M',
+      'AB-C1210-X5R-100U-6V3',
+      'AB-C0805-X5R-47U-6V3',
+      'AB-C0603-X6S-22U-4',
+      'AB-C0603-X6S-10U-6V3',
+      'AB-C0402-X5R-10U-4',
+      'AB-C0402-X5R-4U7-6V3',
+      'AB-C0402-X6S-2U2-6V3',
+      'AB-C0402-X6S-1U-10',
+      'AB-C0402-X7R-470N-10',
+      'AB-C0402-X7R-220N-16',
+      'AB-C0402-X7R-100N-16',
+      'AB-C0201-X6S-1U-4',
+      'AB-C0201-X5R-470N-6V3',
+    ],
     bank: [
       line('AB-P7343-470U-2V5-6M', 4, 24, 'top'),
       line('AB-C0603-X6S-22U-4', 2, 14),

@@ -110,7 +110,9 @@ async function seedRails(manager: EntityManager, now: string, first: boolean): P
         position,
         spec: rail.spec,
         nameKey: nameKey(rail.spec.name),
-        search: searchSettingsSchema.parse({}),
+        search: searchSettingsSchema.parse({
+          candidateIds: rail.candidates?.map((number) => demoId('part', number)) ?? null,
+        }),
         createdAt: now,
         ...stored,
       });

@@ -13,7 +13,9 @@ interface Props {
 export function HeadroomSign({ holds, headroom_dB, words = false, className }: Props) {
   if (holds === null || headroom_dB === null)
     return <span className={cx('text-stone', className)}>– no result</span>;
-  const decibels = formatFixed(Math.abs(headroom_dB), 1);
+  const size = Math.abs(headroom_dB);
+  // A rail that holds by a hair should not read as holding by nothing.
+  const decibels = formatFixed(size, size < 0.095 ? 2 : 1);
   return (
     <span className={cx('whitespace-nowrap', holds ? 'text-reed' : 'text-kingfisher', className)}>
       <span aria-hidden>{holds ? '▽' : '▲'} </span>

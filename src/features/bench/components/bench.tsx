@@ -13,7 +13,7 @@ import { useBench } from '../hooks/use-bench';
 import { useBenchKeys } from '../hooks/use-bench-keys';
 import { mixIn, useMixSearch } from '../hooks/use-mix-search';
 import { type DraftLine, isSameLine, keyed } from '../lib/bank-history';
-import { cautionsFor } from '../lib/cautions';
+import { benchCautions } from '../lib/cautions';
 import { bankOfMix } from '../lib/mix';
 import { BenchFacts } from './bench-facts';
 import { PartPicker } from './part-picker';
@@ -110,7 +110,7 @@ export function Bench({ server, personId, canEdit, editTo, onSaved, renderStatus
     add: () => canEdit && setPicking(true),
     lines: () => setShowLines((on) => !on),
   });
-  const cautions = cautionsFor(spec, shownLines, known, shown.analysis?.cavity_Hz ?? []);
+  const cautions = benchCautions(spec, shownLines, known, shown.analysis?.cavity_Hz ?? []);
   return (
     <div className="flex min-w-0 flex-col xl:flex-row">
       {renderStatus(<SaveStatus save={bench.save} />)}

@@ -4,7 +4,7 @@ import { useState } from 'react';
 import { Button } from '@/components/ui/button';
 import { Dialog } from '@/components/ui/dialog';
 import { Checkbox } from '@/components/ui/input';
-import { moneyText } from '../lib/mix';
+import { formatCost } from '@/lib/format-cost';
 import { partName } from '../lib/part-name';
 
 interface CandidatesDialogProps {
@@ -41,7 +41,7 @@ export function CandidatesDialog({ open, parts, chosen, onChoose, onClose }: Can
         {parts.map((part) => (
           <li key={part.id} className="break-inside-avoid border-b py-1">
             <Checkbox
-              label={`${partName(part)} · ${formatQuantity(part.esr_ohm, 'Ω')} · ${moneyText(part.unit_cost)}`}
+              label={`${partName(part)} · ${formatQuantity(part.esr_ohm, 'Ω')} · ${formatCost(part.unit_cost, 3)}`}
               checked={picked.has(part.id)}
               onChange={() => toggle(part.id)}
             />

@@ -3,7 +3,7 @@ import type { BenchAnalysis } from '@workers/analysis/analysis.interface';
 import type { ReactNode } from 'react';
 import { Section } from '@/components/ui/page';
 import { cx } from '@/lib/class-names';
-import { moneyText } from '../lib/mix';
+import { formatCost } from '@/lib/format-cost';
 
 interface SidePanelProps {
   analysis: BenchAnalysis | null;
@@ -31,7 +31,10 @@ export function SidePanel({ analysis, error, nameOf, children }: SidePanelProps)
               aria-live="polite"
               className={cx('text-figure font-bold', analysis.holds ? 'text-reed' : 'text-kingfisher')}
             >
-              {formatDecibel(analysis.tightest.headroom_dB)}
+              {formatDecibel(
+                analysis.tightest.headroom_dB,
+                Math.abs(analysis.tightest.headroom_dB) < 0.095 ? 2 : 1,
+              )}
             </p>
             <p className="text-stone">
               {analysis.holds ? 'holds' : 'short'}: {formatQuantity(analysis.tightest.impedance_ohm, 'Ω')} at{' '}
@@ -46,7 +49,7 @@ export function SidePanel({ analysis, error, nameOf, children }: SidePanelProps)
                 {analysis.figures.parts} · {analysis.figures.kinds}
               </dd>
               <dt>cost</dt>
-              <dd className="text-right">{moneyText(analysis.figures.cost)}</dd>
+              <dd className="text-right">{formatCost(analysis.figures.cost)}</dd>
               <dt>area</dt>
               <dd className="text-right">{formatQuantity(analysis.figures.area_mm2, 'mm²')}</dd>
             </dl>

@@ -1,6 +1,7 @@
 import type { Part } from '@shared/schemas/part.schema';
 import type { MixEntry, Objective } from '@shared/search/problem';
-import { formatFixed, formatQuantity } from '@shared/units/format';
+import { formatQuantity } from '@shared/units/format';
+import { formatCost } from '@/lib/format-cost';
 import type { DraftLine } from './bank-history';
 import { keyed } from './bank-history';
 
@@ -32,7 +33,7 @@ export function bankOfMix(
 export function weightText(objective: Objective, weight: number | null): string {
   if (weight === null || !Number.isFinite(weight)) return '—';
   if (objective === 'parts') return `${Math.round(weight)} part${Math.round(weight) === 1 ? '' : 's'}`;
-  if (objective === 'cost') return moneyText(weight);
+  if (objective === 'cost') return formatCost(weight);
   return formatQuantity(weight, 'mm²');
 }
 
@@ -41,10 +42,4 @@ export function boundText(objective: Objective, bound: number): string {
   if (objective === 'parts') return weightText('parts', Math.ceil(bound - 1e-9));
   const step = objective === 'cost' ? 100 : 10;
   return weightText(objective, Math.floor(bound * step + 1e-9) / step);
-}
-
-/** Prices as the library has them: three decimals below a tenth, else two. */
-export function moneyText(value: number | null): string {
-  if (value === null) return '—';
-  return `${formatFixed(value, Math.abs(value) < 0.1 && value !== 0 ? 3 : 2)}\u00a0€`;
 }

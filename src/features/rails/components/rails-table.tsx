@@ -1,10 +1,11 @@
 import { targetFromStep } from '@shared/engine/target';
 import type { Rail } from '@shared/schemas/rail.schema';
-import { formatFixed, formatQuantity, formatVolts } from '@shared/units/format';
+import { formatQuantity, formatVolts } from '@shared/units/format';
 import { Link } from 'react-router-dom';
 import { HeadroomSign } from '@/components/ui/headroom-sign';
 import { Table, Td, Th } from '@/components/ui/table';
 import { paths } from '@/config/paths';
+import { formatCost } from '@/lib/format-cost';
 
 const trim = { trim: true };
 
@@ -62,7 +63,7 @@ export function RailsTable({ rails }: { rails: readonly Rail[] }) {
             <Td numeric>
               {summary.parts} · {summary.kinds}
             </Td>
-            <Td numeric>{summary.cost === null ? '—' : `${formatFixed(summary.cost, 2)}\u00a0€`}</Td>
+            <Td numeric>{formatCost(summary.cost)}</Td>
             <Td numeric>{formatQuantity(summary.area_mm2, 'mm²')}</Td>
             <Td numeric>{summary.tightest ? formatQuantity(summary.tightest.frequency_Hz, 'Hz') : '—'}</Td>
             <Td numeric>
