@@ -1,20 +1,22 @@
 import type { Prepared } from './prepare';
 
+type Stepped = Pick<Prepared, 'step'>;
+
 /** Two real weights closer than this (relative) count as equal. */
 const SAME = 1e-9;
 
 /** The largest budget that excludes weight `weight`: one unit less, or for real weights a hair less. */
-export function budgetBelow({ step }: Prepared, weight: number): number {
+export function budgetBelow({ step }: Stepped, weight: number): number {
   return step === 1 ? weight - 1 : weight * (1 - SAME);
 }
 
 /** The bound after all mixes of weight ≤ `budget` are excluded. */
-export function boundAbove({ step }: Prepared, budget: number): number {
+export function boundAbove({ step }: Stepped, budget: number): number {
   return step === 1 ? Math.floor(budget) + 1 : budget;
 }
 
 /** True when no weight is left between bound and incumbent. */
-export function isClosed(prepared: Prepared, bound: number, weight: number): boolean {
+export function isClosed(prepared: Stepped, bound: number, weight: number): boolean {
   return bound > budgetBelow(prepared, weight) || bound >= weight * (1 - 2 * SAME);
 }
 
@@ -28,7 +30,7 @@ const STRIDE = 1 / 3;
  * at the order of size, or 0.
  */
 export function nextBudget(
-  prepared: Prepared,
+  prepared: Stepped,
   bound: number,
   incumbent: number | null,
   most: number,

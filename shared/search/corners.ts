@@ -36,11 +36,10 @@ export class Corners {
     return this.left / this.weights[k];
   }
 
-  /** The row with the smallest φ at the mix `t`, and that φ (0 and −1 when none is below zero). */
-  worstRow(rows: Rows, t: Float64Array): { row: number; measure: number } {
+  /** φ of every convex row at the mix `t` into `out` (by row number); returns the smallest. */
+  measure(rows: Rows, t: Float64Array, out: Float64Array): number {
     const m = this.count;
-    let row = -1;
-    let measure = 0;
+    let least = Number.POSITIVE_INFINITY;
     for (let j = 0; j < rows.convex.length; j++) {
       const f = rows.convex[j];
       let x = 0;
@@ -49,12 +48,9 @@ export class Corners {
         x += t[c] * this.x[at];
         y += t[c] * this.y[at];
       }
-      const phi = rowMeasure(rows, f, x, y);
-      if (phi < measure) {
-        measure = phi;
-        row = f;
-      }
+      out[f] = rowMeasure(rows, f, x, y);
+      if (out[f] < least) least = out[f];
     }
-    return { row, measure };
+    return least;
   }
 }

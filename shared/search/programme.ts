@@ -24,7 +24,8 @@ export class Programme {
   private readonly inverse: Float64Array;
   private readonly value: Float64Array;
   private readonly column: Float64Array;
-  private total = 0;
+  /** Σ x_j at present: above 1/SHIFT nothing meets all conditions; the nearer, the tighter. */
+  total = 0;
 
   constructor(corners: number) {
     this.corners = corners;
@@ -195,4 +196,4 @@ export class Programme {
 }
 
 /** Above the largest deficit (1), so that every coefficient is above zero and the programme is bounded. */
-const SHIFT = 1.001;
+export const SHIFT = 1.001;

@@ -7,9 +7,9 @@ import { explainExhausted, explainReach, explainTimeout } from './reason';
 import { Reporter } from './report';
 
 /** Rounds of destroy and repair before the proof begins, and at most after each pass. */
-const FIRST_ROUNDS = 60;
+const FIRST_ROUNDS = 150;
 /** Row evaluations that the first rounds may cost together: about 0.2 s. */
-const FIRST_WORK = 4e7;
+const FIRST_WORK = 1e8;
 
 /**
  * Searches for the lightest mix and proves it (portfolio.ts). A generator, so that a worker can look for a

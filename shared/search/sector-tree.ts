@@ -1,6 +1,7 @@
 import { Corners } from './corners';
 import type { Prepared } from './prepare';
-import { Programme } from './programme';
+import { Programme, SHIFT } from './programme';
+import { PseudoCost } from './pseudo-cost';
 import { type Rows, rowMeasure } from './rows';
 import { directionRange, type Sector, sectorWorth, splitSector, towards } from './sector';
 
@@ -16,12 +17,17 @@ interface Frame {
   branches: Branch[];
   next: number;
   replaced: Sector | null;
+  /** What was branched on, for the pseudo-costs: its number and by how much it was violated. */
+  thing: number;
+  violation: number;
 }
 
 /** First sectors are no wider than this, later ones are halves (measured: 45° and 90° take about twice the nodes on case 4). */
 const WIDEST = Math.PI / 3;
 /** A row is split while the mix misses it by more than this (relative to the target); then counts are made whole. */
 const VIOLATED = 1e-6;
+/** Rows violated at least this share of the worst are considered for splitting. */
+const CONSIDERED = 0.05;
 /** A sector is not cut below this; the tree then gives up rather than go round in rounding noise. */
 const NARROWEST = 1e-6;
 
@@ -30,9 +36,9 @@ const NARROWEST = 1e-6;
  * programme over the simplex of mixes of weight ≤ budget (corners.ts, programme.ts) with
  *   – for every row the interpolation bound of surrogate-prune.ts, Σ t_c·φ(V_c) ≥ 0, and
  *   – for rows that have been split the three conditions of their sector (sector.ts).
- * If it is cut, no mix within the budget takes these sectors. Otherwise its best mix is looked at: the row it misses by most is
- * split into sectors; if it misses none, the count furthest from whole is branched on, at most ⌊n⌋ or at least ⌊n⌋ + 1. Every child
- * covers its share of the parent's mixes, so an empty tree proves that no mix of weight ≤ budget exists. The tree needs few
+ * If it is cut, no mix within the budget takes these sectors. Otherwise its best mix is looked at: of the rows that it misses
+ * the one whose splitting promises most (pseudo-cost.ts) is split into sectors; if it misses none, a count that is not whole is
+ * branched on, at most ⌊n⌋ or at least ⌊n⌋ + 1. The children cover all of the parent's mixes, so an empty tree proves that no mix of weight ≤ budget exists. The tree needs few
  * nodes where many pieces share the work (fractions cost little) and many where few do: there the counts' tree wins.
  */
 export class SectorTree {
@@ -49,6 +55,11 @@ export class SectorTree {
   private readonly worth: Float64Array;
   private readonly mixture: Float64Array;
   private readonly found: Int32Array;
+  private measures = new Float64Array(0);
+  /** Rows count twice: never split yet, and split already; then the parts. */
+  private costs = new PseudoCost(0);
+  private thing = 0;
+  private violation = 1;
 
   constructor(prepared: Prepared, rows: Rows) {
     const k = prepared.parts.length;
@@ -67,6 +78,10 @@ export class SectorTree {
     this.budget = budget;
     this.corners = new Corners(this.prepared, rows, budget);
     this.sectors = new Array<Sector | null>(rows.size).fill(null);
+    if (this.measures.length !== rows.size) {
+      this.measures = new Float64Array(rows.size);
+      this.costs = new PseudoCost(2 * rows.size + this.found.length);
+    }
     this.programme.reset();
     const { worth, corners } = this;
     for (const f of rows.convex) {
@@ -96,7 +111,13 @@ export class SectorTree {
         }
       }
       this.nodes++;
-      if (this.programme.solve() === 'cut') continue;
+      const before = this.programme.total;
+      const isCut = this.programme.solve() === 'cut';
+      if (this.depth >= 0) {
+        const { thing, violation } = this.frames[this.depth];
+        this.costs.learn(thing, violation, (isCut ? 1 / SHIFT : this.programme.total) - before);
+      }
+      if (isCut) continue;
       const branches = this.branch();
       if (!branches) return this.isWhole() ? 'found' : 'stuck';
       this.push(branches);
@@ -125,12 +146,15 @@ export class SectorTree {
     const { programme } = this;
     let frame = this.frames[this.depth];
     if (!frame) {
-      frame = { size: 0, state: new Float64Array(programme.stateSize), branches, next: 0, replaced: null };
+      const state = new Float64Array(programme.stateSize);
+      frame = { size: 0, state, branches, next: 0, replaced: null, thing: 0, violation: 1 };
       this.frames[this.depth] = frame;
     }
     frame.size = programme.size;
     frame.branches = branches;
     frame.next = 0;
+    frame.thing = this.thing;
+    frame.violation = this.violation;
     programme.save(frame.state);
   }
 
@@ -167,24 +191,53 @@ export class SectorTree {
     let total = 0;
     for (let c = 0; c < corners.count; c++) total += Math.max(0, programme.price[c]);
     for (let c = 0; c < corners.count; c++) mixture[c] = Math.max(0, programme.price[c]) / total;
-    const worst = corners.worstRow(this.rows, mixture);
-    if (worst.measure < -VIOLATED) return this.splitRow(worst.row);
-    let part = -1;
-    let most = 1e-6;
-    for (let k = 0; k < this.found.length; k++) {
-      const count = mixture[k + 1] * corners.most(k);
-      const fraction = Math.abs(count - Math.round(count));
-      if (fraction > most) {
-        most = fraction;
-        part = k;
-      }
-    }
-    if (part < 0) return worst.row < 0 || this.isWhole() ? null : this.splitRow(worst.row);
+    const least = corners.measure(this.rows, mixture, this.measures);
+    if (least < -VIOLATED) return this.splitRow(this.mostPromisingRow(least));
+    const part = this.mostPromisingPart();
+    if (part < 0) return this.isWhole() ? null : this.splitRow(this.mostPromisingRow(least));
     const limit = Math.floor(mixture[part + 1] * corners.most(part));
     return [
       { part, limit, isLeast: false },
       { part, limit: limit + 1, isLeast: true },
     ];
+  }
+
+  private mostPromisingRow(least: number): number {
+    const { rows, measures, costs, sectors } = this;
+    let row = -1;
+    let most = 0;
+    for (let j = 0; j < rows.convex.length; j++) {
+      const f = rows.convex[j];
+      if (!(measures[f] < CONSIDERED * least)) continue;
+      const thing = 2 * f + (sectors[f] ? 1 : 0);
+      const promise = -measures[f] * costs.expect(thing);
+      if (row >= 0 && promise <= most) continue;
+      most = promise;
+      row = f;
+      this.thing = thing;
+      this.violation = -measures[f];
+    }
+    return row;
+  }
+
+  /** −1 when all counts of the best mix are whole. */
+  private mostPromisingPart(): number {
+    const { corners, mixture, rows, costs } = this;
+    let part = -1;
+    let most = 0;
+    for (let k = 0; k < this.found.length; k++) {
+      const count = mixture[k + 1] * corners.most(k);
+      const fraction = Math.abs(count - Math.round(count));
+      if (fraction <= 1e-6) continue;
+      const thing = 2 * rows.size + k;
+      const promise = fraction * costs.expect(thing);
+      if (part >= 0 && promise <= most) continue;
+      most = promise;
+      part = k;
+      this.thing = thing;
+      this.violation = fraction;
+    }
+    return part;
   }
 
   /** Rounds the best mix to whole counts; true when that is a mix within budget and kinds that meets all rows. */
@@ -210,6 +263,7 @@ export class SectorTree {
   }
 
   private splitRow(row: number): Branch[] | null {
+    if (row < 0) return null;
     const known = this.sectors[row];
     if (known && known.to - known.from < NARROWEST) return null;
     if (known) return splitSector(known, Math.PI).map((sector) => ({ row, sector }));

@@ -42,6 +42,20 @@ describe('the published cases', () => {
   });
 });
 
+describe('few kinds and other weights', () => {
+  it.each([
+    [1, 'parts', 4, 14],
+    [1, 'cost', 4, 0.904],
+    [2, 'area', 4, 37.62],
+    [3, 'cost', 3, 4.322],
+    [4, 'area', 3, 623.04],
+  ] as const)('case %i by %s with %i kinds: %d, proven', (number, minimise, maxKinds, weight) => {
+    const result = runSearch({ ...searchCase(number), minimise, maxKinds }, { seconds: 20 });
+    expect(result).toMatchObject({ found: true, proven: true, kinds: maxKinds });
+    expect(result.found && result.weight).toBeCloseTo(weight, 9);
+  });
+});
+
 describe('repeatable and fair', () => {
   it('gives the same answer for the same seed, however it is sliced', () => {
     const problem = smallSearch(41, { kinds: 6, max: 12 });
