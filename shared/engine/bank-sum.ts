@@ -7,34 +7,46 @@ export interface AdmittanceArray {
 }
 
 /**
- * Admittance of one branch over a grid. `omega` is 2πf. For a series branch: one division an element,
- * Y = (R − jX)/(R² + X²) with X = ωL − D/ω, 1/ω taken from the caller so that it is divided once per grid.
+ * Adds `count` times the admittance of one branch over a grid to `total`. `omega` is 2πf. For a series branch: one division an
+ * element, Y = (R − jX)/(R² + X²) with X = ωL − D/ω; 1/ω comes from the caller, so that it is divided once per grid.
  */
-export function admittanceOver(
+export function addAdmittance(
   branch: Branch,
+  count: number,
   omega: Float64Array,
   inverseOmega: Float64Array,
-  out: AdmittanceArray = { g: new Float64Array(omega.length), b: new Float64Array(omega.length) },
-): AdmittanceArray {
-  const { g, b } = out;
+  total: AdmittanceArray,
+): void {
+  const { g, b } = total;
   const n = omega.length;
   if (branch.kind === 'series') {
     const { r, l, d } = branch;
     const r2 = r * r;
+    const nr = count * r;
     for (let i = 0; i < n; i++) {
       const x = omega[i] * l - d * inverseOmega[i];
       const q = 1 / (r2 + x * x);
-      g[i] = r * q;
-      b[i] = -x * q;
+      g[i] += nr * q;
+      b[i] -= count * x * q;
     }
-    return out;
+    return;
   }
   const y = new Float64Array(4);
   for (let i = 0; i < n; i++) {
     branchAdmittance(branch, omega[i] / (2 * Math.PI), y);
-    g[i] = y[0];
-    b[i] = y[1];
+    g[i] += count * y[0];
+    b[i] += count * y[1];
   }
+}
+
+/** Admittance of one branch over a grid, as `addAdmittance` to nothing. */
+export function admittanceOver(
+  branch: Branch,
+  omega: Float64Array,
+  inverseOmega: Float64Array,
+): AdmittanceArray {
+  const out = { g: new Float64Array(omega.length), b: new Float64Array(omega.length) };
+  addAdmittance(branch, 1, omega, inverseOmega, out);
   return out;
 }
 

@@ -1,7 +1,8 @@
 import { sweepCurve } from '../engine/curve';
 import { holds, type Tightest, tightestHeadroom } from '../engine/headroom';
+import { impedanceOver } from '../engine/impedance-over';
 import { findPeaks } from '../engine/peaks';
-import { compileRail, railImpedance, scratch } from '../engine/rail';
+import { type CompiledRail, compileRail } from '../engine/rail';
 import type { RailDocument } from '../schemas/rail-document.schema';
 import { networkOf } from './network';
 import { targetMask } from './target-mask';
@@ -47,19 +48,12 @@ function spanOf(list: readonly number[]): [number, number] {
 
 type Points = Pick<Analysis, 'frequency_Hz' | 're_ohm' | 'im_ohm'>;
 
-function impedanceAt(rail: ReturnType<typeof compileRail>, frequencies: readonly number[]): Points {
-  const out = scratch();
-  const points: Points = { frequency_Hz: [], re_ohm: [], im_ohm: [] };
-  for (const f of frequencies) {
-    railImpedance(rail, f, out);
-    points.frequency_Hz.push(f);
-    points.re_ohm.push(out[0]);
-    points.im_ohm.push(out[1]);
-  }
-  return points;
+function impedanceAt(rail: CompiledRail, frequencies: readonly number[]): Points {
+  const { re_ohm, im_ohm } = impedanceOver(rail, frequencies);
+  return { frequency_Hz: [...frequencies], re_ohm: Array.from(re_ohm), im_ohm: Array.from(im_ohm) };
 }
 
-function impedanceOfSweep(rail: ReturnType<typeof compileRail>, band: readonly [number, number]): Points {
+function impedanceOfSweep(rail: CompiledRail, band: readonly [number, number]): Points {
   const curve = sweepCurve(rail, band[0], band[1]);
   return {
     frequency_Hz: Array.from(curve.frequency_Hz),

@@ -1,5 +1,6 @@
 import { admittanceOver, BankSum } from '@shared/engine/bank-sum';
 import { lineBranch } from '@shared/engine/branch';
+import { impedanceOver } from '@shared/engine/impedance-over';
 import { compileRail, railImpedance, scratch } from '@shared/engine/rail';
 import { memberShares } from '@shared/engine/shares';
 import Complex from 'complex.js';
@@ -24,6 +25,23 @@ describe('the engine against an independent complex sum', () => {
       { numRuns: 2000, seed: 11 },
     );
     expect(worst).toBeGreaterThan(0);
+  });
+
+  it('agrees over lists of frequencies with its own value at each of them', () => {
+    const out = scratch();
+    fc.assert(
+      fc.property(railNetwork, fc.array(frequency, { minLength: 1, maxLength: 20 }), (network, list) => {
+        const rail = compileRail(network);
+        const { re_ohm, im_ohm } = impedanceOver(rail, list);
+        list.forEach((f, i) => {
+          railImpedance(rail, f, out);
+          expect(
+            Math.hypot(re_ohm[i] - out[0], im_ohm[i] - out[1]) / Math.hypot(out[0], out[1]),
+          ).toBeLessThan(1e-11);
+        });
+      }),
+      { numRuns: 500, seed: 14 },
+    );
   });
 
   it('has shares that sum to the whole load current, as complex numbers', () => {

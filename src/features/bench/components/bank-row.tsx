@@ -72,14 +72,12 @@ export function BankRow(props: BankRowProps) {
             className="min-w-0 text-left"
             title={part?.partNumber}
           >
-            <span className="block truncate font-semibold">
-              {line.locked && <span title="the mix search leaves it as it is">locked · </span>}
-              {name}
-            </span>
+            <span className="block truncate font-semibold">{name}</span>
             <span className="block truncate text-small text-stone">
               {formatQuantity(strip?.inductance_H, 'H')}
               {line.distance_m !== null && ` · ${formatLength(line.distance_m)}`}
               {line.side === 'bottom' && ' · bottom'}
+              {line.locked && ' · locked'}
             </span>
           </button>
           <CountStepper

@@ -187,6 +187,7 @@ export function Bench({ server, personId, canEdit, editTo, onSaved, renderStatus
                 candidates={candidates.data}
                 candidatesError={candidates.isError ? messageOf(candidates.error) : null}
                 state={search.state}
+                locked={bench.lines.reduce((sum, line) => (line.locked ? sum + line.count : sum), 0)}
                 previewing={isPreview}
                 readOnly={!canEdit}
                 onSettings={bench.setSearch}

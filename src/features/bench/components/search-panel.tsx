@@ -18,6 +18,8 @@ interface SearchPanelProps {
   candidates: readonly Part[] | undefined;
   candidatesError: string | null;
   state: MixSearchState;
+  /** Capacitors on locked lines: they stay and are not counted in the mix. */
+  locked: number;
   previewing: boolean;
   readOnly: boolean;
   onSettings: (settings: SearchSettings) => void;
@@ -55,7 +57,7 @@ export function SearchPanel(props: SearchPanelProps) {
           </button>
         </>
       )}
-      <Outcome state={state} objective={settings.minimise} />
+      <Outcome state={state} objective={settings.minimise} locked={props.locked} />
       {state.kind === 'failed' && <Notice tone="error">{state.message}</Notice>}
       {props.candidatesError && <Notice tone="error">{props.candidatesError}</Notice>}
       {candidates?.length === 0 && (
@@ -109,7 +111,15 @@ export function SearchPanel(props: SearchPanelProps) {
   );
 }
 
-function Outcome({ state, objective }: { state: MixSearchState; objective: SearchSettings['minimise'] }) {
+function Outcome({
+  state,
+  objective,
+  locked,
+}: {
+  state: MixSearchState;
+  objective: SearchSettings['minimise'];
+  locked: number;
+}) {
   if (state.kind === 'done' && !state.result.found)
     return (
       <Notice tone="caution" title={state.result.impossible ? '▲ no mix can hold' : '! none found'}>
@@ -128,7 +138,7 @@ function Outcome({ state, objective }: { state: MixSearchState; objective: Searc
             : '! time is up: a smaller mix is not ruled out'}
         </p>
         <p className="text-small text-stone">
-          {result.parts} parts, {result.kinds} kinds · headroom{' '}
+          {result.parts} parts, {result.kinds} kinds{locked > 0 && `, beside ${locked} locked`} · headroom{' '}
           {formatDecibel(result.tightest.headroom_dB, 2)} · {result.seconds.toFixed(1)} s ·{' '}
           {result.nodes.toLocaleString('en-GB')} nodes
         </p>

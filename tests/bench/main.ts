@@ -1,0 +1,19 @@
+import { benchApi } from './api';
+import { benchChart } from './chart';
+import { benchEngine } from './engine';
+import { benchSearch } from './search';
+
+const BENCHES: Record<string, () => string | Promise<string>> = {
+  engine: benchEngine,
+  search: benchSearch,
+  api: benchApi,
+  chart: benchChart,
+};
+
+// All of them, or those named: npm run bench -- engine search
+const wanted = process.argv.slice(2);
+for (const [name, bench] of Object.entries(BENCHES)) {
+  if (wanted.length > 0 && !wanted.includes(name)) continue;
+  console.log(`\n— ${name}`);
+  console.log(await bench());
+}
