@@ -4,6 +4,9 @@ import type { Prepared } from './prepare';
 import { meetsAll, type Rows } from './rows';
 import { SurrogatePool } from './surrogate-pool';
 
+/** So many points sorted into hulls are enough for one call of `run` (some 10 ms); the tables are made as levels are reached. */
+const MOST_BUILT = 30_000;
+
 export type CountState = 'more' | 'found' | 'done';
 
 /**
@@ -33,6 +36,7 @@ export class CountTree {
   private readonly pool: SurrogatePool;
   private level = 0;
   private firstNode = 1;
+  private built = 0;
   /** After 'found': 'cut' the node (its completions weigh more), or look 'below' it (the engine refused the mix itself). */
   private next: 'test' | 'cut' | 'below' = 'test';
 
@@ -82,7 +86,8 @@ export class CountTree {
   run(limit: number): CountState {
     const last = this.counts.length - 1;
     const end = this.nodes + limit;
-    while (this.nodes < end) {
+    this.built = 0;
+    while (this.nodes < end && this.built < MOST_BUILT) {
       const i = this.level;
       let pruned = this.next === 'cut';
       if (this.next === 'test') {
@@ -202,7 +207,9 @@ export class CountTree {
   private hullsOf(list: number): HullTable {
     const known = this.hulls[list];
     if (known) return known;
-    const made = buildHulls(this.rows, this.weights, this.openParts(list));
+    const parts = this.openParts(list);
+    const made = buildHulls(this.rows, this.weights, parts);
+    this.built += parts.length * this.rows.size;
     this.hulls[list] = made;
     return made;
   }

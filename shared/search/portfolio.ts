@@ -9,6 +9,9 @@ const SECTOR_TURN = 256;
 /** Every so many turns the mix gets some rounds of destroy and repair: about a tenth of the time. */
 const IMPROVE_EVERY = 8;
 const IMPROVE_ROUNDS = 16;
+/** The size of problem for which the numbers above are meant. */
+const USUAL_PARTS = 16;
+const USUAL_ROWS = 190;
 /** A pass of the counts' tree this long is a sign of a large bank: the sectors' tree joins in. */
 const JOIN_AFTER = 40_000;
 /** Turns that the tree which closed the last budget gets for each one of the other. */
@@ -60,7 +63,9 @@ export class Portfolio {
     const isSector = this.isSectorTurn();
     const tree = isSector ? this.sector : this.count;
     const before = tree.nodes;
-    const state = tree.run(Math.min(slice, this.turnLeft));
+    const state = tree.run(
+      Math.max(1, Math.min(slice, this.turnLeft, this.paced(isSector ? SECTOR_TURN : COUNT_TURN))),
+    );
     this.turnLeft -= tree.nodes - before;
     if (state === 'found') this.take(tree);
     if (state === 'stuck') {
@@ -99,12 +104,25 @@ export class Portfolio {
     return isFavoured === (this.favourite === 'sector');
   }
 
+  /** A number of nodes or rounds, fewer where each takes longer, so that a step stays within some 10 ms. */
+  private paced(count: number): number {
+    const { rows, prepared } = this.stage;
+    return Math.max(
+      1,
+      Math.round(count * Math.min(1, (USUAL_PARTS * USUAL_ROWS) / (prepared.parts.length * rows.size))),
+    );
+  }
+
   private nextTurn(): void {
+    const parts = this.stage.prepared.parts.length;
     if (this.turn % IMPROVE_EVERY === IMPROVE_EVERY - 1)
-      for (let round = 0; round < IMPROVE_ROUNDS; round++) if (this.stage.improve()) this.afterImprovement();
+      for (let round = 0; round < this.paced(IMPROVE_ROUNDS); round++)
+        if (this.stage.improve()) this.afterImprovement();
     if (!this.isJoined && this.count.nodes - this.passStart > JOIN_AFTER) this.join();
     this.turn++;
-    this.turnLeft = this.isSectorTurn() ? SECTOR_TURN : COUNT_TURN;
+    this.turnLeft = this.isSectorTurn()
+      ? Math.ceil(SECTOR_TURN * Math.min(1, USUAL_PARTS / parts))
+      : COUNT_TURN;
   }
 
   /** Destroy and repair found a lighter mix while the trees were at work. */

@@ -49,10 +49,22 @@ export function reachAt(prepared: Prepared, rows: Rows, row: number): Reach {
   return reach;
 }
 
+/** Everything at its maximum is enough there: the usual case, told at once. */
+function isReachedByAll({ parts }: Prepared, rows: Rows, row: number): boolean {
+  let x = rows.y0x[row];
+  let y = rows.y0y[row];
+  parts.forEach((part, k) => {
+    x += (part.max - part.min) * rows.yx[k][row];
+    y += (part.max - part.min) * rows.yy[k][row];
+  });
+  return rowQuadratic(rows, row, x, y) >= 0;
+}
+
 /** The row that the candidates miss by most though all are at their maximum; null when each frequency is within reach. */
 export function outOfReach(prepared: Prepared, rows: Rows): Reach | null {
   let worst: Reach | null = null;
   for (const row of rows.convex) {
+    if (isReachedByAll(prepared, rows, row)) continue;
     const reach = reachAt(prepared, rows, row);
     if (reach.best < -rows.margin[row] && (!worst || reach.best < worst.best)) worst = reach;
   }

@@ -1,4 +1,4 @@
-import { type Condition, quadratic } from './condition';
+import type { Condition } from './condition';
 
 const DIRECTIONS = 24;
 
@@ -30,11 +30,4 @@ export function tangentRows(c: Condition): Condition[] {
     add(-c.px / c.a + radius * Math.cos(angle), -c.py / c.a + radius * Math.sin(angle));
   }
   return rows;
-}
-
-/** True when some passive admittance (Re Y ≥ 0) meets the condition at all. */
-export function isPassivelyReachable(c: Condition): boolean {
-  if (c.a >= 0) return true;
-  // The disk's point furthest to the right: Y = (−p + Zt·(−1 … direction +x for a < 0))/a
-  return -c.px / c.a + c.zt / Math.abs(c.a) >= 0 || quadratic(c, 0, -c.py / c.a) >= 0;
 }
