@@ -1,101 +1,92 @@
 import { type Branch, branchAdmittance } from './branch';
 
-/** Admittance over a grid, siemens: conductance `g` and susceptance `b` per frequency. */
-export interface AdmittanceArray {
+/** Admittance over a grid, siemens: conductance `g`, susceptance `b`, and their derivatives by ln f. */
+export interface SampledAdmittance {
   g: Float64Array;
   b: Float64Array;
+  dg: Float64Array;
+  db: Float64Array;
 }
 
-/**
- * Adds `count` times the admittance of one branch over a grid to `total`. `omega` is 2πf. For a series branch: one division an
- * element, Y = (R − jX)/(R² + X²) with X = ωL − D/ω; 1/ω comes from the caller, so that it is divided once per grid.
- */
-export function addAdmittance(
+/** Admittance of one branch over a grid. */
+export function sampleAdmittance(
   branch: Branch,
-  count: number,
-  omega: Float64Array,
-  inverseOmega: Float64Array,
-  total: AdmittanceArray,
-): void {
-  const { g, b } = total;
-  const n = omega.length;
-  if (branch.kind === 'series') {
-    const { r, l, d } = branch;
-    const r2 = r * r;
-    const nr = count * r;
-    for (let i = 0; i < n; i++) {
-      const x = omega[i] * l - d * inverseOmega[i];
-      const q = 1 / (r2 + x * x);
-      g[i] += nr * q;
-      b[i] -= count * x * q;
-    }
-    return;
-  }
+  frequency_Hz: Float64Array,
+  field?: string,
+): SampledAdmittance {
+  const out = blankSamples(frequency_Hz.length);
   const y = new Float64Array(4);
-  for (let i = 0; i < n; i++) {
-    branchAdmittance(branch, omega[i] / (2 * Math.PI), y);
-    g[i] += count * y[0];
-    b[i] += count * y[1];
+  for (let i = 0; i < frequency_Hz.length; i++) {
+    branchAdmittance(branch, frequency_Hz[i], y, field);
+    out.g[i] = y[0];
+    out.b[i] = y[1];
+    out.dg[i] = y[2];
+    out.db[i] = y[3];
   }
-}
-
-/** Admittance of one branch over a grid, as `addAdmittance` to nothing. */
-export function admittanceOver(
-  branch: Branch,
-  omega: Float64Array,
-  inverseOmega: Float64Array,
-): AdmittanceArray {
-  const out = { g: new Float64Array(omega.length), b: new Float64Array(omega.length) };
-  addAdmittance(branch, 1, omega, inverseOmega, out);
   return out;
 }
 
+const blankSamples = (n: number): SampledAdmittance => ({
+  g: new Float64Array(n),
+  b: new Float64Array(n),
+  dg: new Float64Array(n),
+  db: new Float64Array(n),
+});
+
+/** After so many changes the total is summed anew, so that rounding never piles up beyond about 1e-12. */
+const RESUM_AFTER = 1024;
+
 /**
- * Total admittance of a bank over a grid that answers a changed count with one multiply-add an element instead of
- * a new sum. After 4096 changes the total is summed anew, so that rounding never piles up beyond 1e-12.
+ * Total admittance of a node over a grid that answers a changed count with one multiply-add an element instead of a new
+ * sum of all members.
  */
 export class BankSum {
-  readonly total: AdmittanceArray;
-  private readonly units: AdmittanceArray[];
+  readonly frequency_Hz: Float64Array;
+  readonly units: readonly SampledAdmittance[];
+  readonly total: SampledAdmittance;
   private readonly counts: number[];
   private changes = 0;
 
-  constructor(units: AdmittanceArray[], counts: readonly number[], size: number) {
+  constructor(frequency_Hz: Float64Array, units: readonly SampledAdmittance[], counts: readonly number[]) {
+    this.frequency_Hz = frequency_Hz;
     this.units = units;
     this.counts = [...counts];
-    this.total = { g: new Float64Array(size), b: new Float64Array(size) };
+    this.total = blankSamples(frequency_Hz.length);
     this.resum();
   }
 
-  /** Sets the count of member `index`; costs one pass over the grid. */
+  /** Sets all counts; only what differs is touched. */
+  setCounts(counts: readonly number[]): void {
+    counts.forEach((count, index) => {
+      this.setCount(index, count);
+    });
+  }
+
+  /** Sets the count of one member: one pass over the grid. */
   setCount(index: number, count: number): void {
     const delta = count - this.counts[index];
     if (delta === 0) return;
     this.counts[index] = count;
-    if (++this.changes % 4096 === 0) {
-      this.resum();
-      return;
-    }
-    const { g, b } = this.total;
-    const unit = this.units[index];
-    for (let i = 0; i < g.length; i++) {
-      g[i] += delta * unit.g[i];
-      b[i] += delta * unit.b[i];
-    }
+    if (++this.changes % RESUM_AFTER === 0) this.resum();
+    else this.add(index, delta);
   }
 
   /** Sums all members from scratch. */
   resum(): void {
-    const { g, b } = this.total;
-    g.fill(0);
-    b.fill(0);
-    this.units.forEach((unit, k) => {
-      const count = this.counts[k];
-      if (count === 0) return;
-      for (let i = 0; i < g.length; i++) {
-        g[i] += count * unit.g[i];
-        b[i] += count * unit.b[i];
-      }
+    for (const array of Object.values(this.total)) array.fill(0);
+    this.counts.forEach((count, index) => {
+      if (count !== 0) this.add(index, count);
     });
+  }
+
+  private add(index: number, times: number): void {
+    const unit = this.units[index];
+    const { g, b, dg, db } = this.total;
+    for (let i = 0; i < g.length; i++) {
+      g[i] += times * unit.g[i];
+      b[i] += times * unit.b[i];
+      dg[i] += times * unit.dg[i];
+      db[i] += times * unit.db[i];
+    }
   }
 }

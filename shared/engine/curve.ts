@@ -1,6 +1,7 @@
+import { BankSum, sampleAdmittance } from './bank-sum';
 import { selfResonance_Hz } from './branch';
 import { EngineError } from './errors';
-import { type CompiledRail, railImpedance, scratch } from './rail';
+import { type CompiledRail, railImpedance, scratch, seenImpedance } from './rail';
 
 /** A refined sweep: parallel arrays over rising frequency. `slope` is d ln|Z| / d ln f. */
 export interface Curve {
@@ -9,6 +10,8 @@ export interface Curve {
   im_ohm: Float64Array;
   logMagnitude: Float64Array;
   slope: Float64Array;
+  /** Place in the samples that the sweep was made from (`sampleRail`); −1 for a point put in between. */
+  sample: Int32Array;
 }
 
 export interface CurveOptions {
@@ -18,6 +21,8 @@ export interface CurveOptions {
   tolerance_Np?: number;
   /** Frequencies that must be among the points, e.g. the corners of a target mask. */
   include_Hz?: readonly number[];
+  /** Samples made before by `sampleRail` for the same members and span, with this rail's counts set. */
+  samples?: BankSum;
 }
 
 const MAX_DEPTH = 24;
@@ -41,17 +46,30 @@ export function sweepCurve(
   const tolerance = options.tolerance_Np ?? 5e-4;
   const out = scratch();
   const points: number[][] = [];
-  const at = (u: number, f: number): number[] => {
-    railImpedance(rail, f, out);
+  const point = (f: number, sample: number): number[] => {
     const m2 = out[0] * out[0] + out[1] * out[1];
     const slope = (out[0] * out[2] + out[1] * out[3]) / m2;
-    return [u, f, out[0], out[1], 0.5 * Math.log(m2), slope];
+    return [Math.log(f), f, out[0], out[1], 0.5 * Math.log(m2), slope, sample];
   };
-  const refine = (a: number[], b: number[], depth: number): void => {
+  const at = (u: number): number[] => {
+    const f = Math.exp(u);
+    railImpedance(rail, f, out);
+    return point(f, -1);
+  };
+  const samples = options.samples ?? sampleRail(rail, low_Hz, high_Hz, options);
+  const sampled = (i: number): number[] => {
+    const { frequency_Hz, total } = samples;
+    out[0] = total.g[i];
+    out[1] = total.b[i];
+    out[2] = total.dg[i];
+    out[3] = total.db[i];
+    seenImpedance(rail, frequency_Hz[i], out);
+    return point(frequency_Hz[i], i);
+  };
+  const refine = (a: number[], b: number[], depth: number, middle?: number[]): void => {
     const h = b[0] - a[0];
     if (depth < MAX_DEPTH && h > 1e-9) {
-      const u = 0.5 * (a[0] + b[0]);
-      const mid = at(u, Math.exp(u));
+      const mid = middle ?? at(0.5 * (a[0] + b[0]));
       const cubic = 0.5 * (a[4] + b[4]) + (h / 8) * (a[5] - b[5]);
       if (Math.abs(mid[4] - cubic) > tolerance || turnsTwice(a, mid, b)) {
         refine(a, mid, depth + 1);
@@ -60,12 +78,11 @@ export function sweepCurve(
       }
     }
   };
-  const grid = startGrid(rail, low_Hz, high_Hz, options);
-  let previous = at(Math.log(grid[0]), grid[0]);
+  let previous = sampled(0);
   points.push(previous);
-  for (let i = 1; i < grid.length; i++) {
-    const next = at(Math.log(grid[i]), grid[i]);
-    refine(previous, next, 0);
+  for (let i = 2; i < samples.frequency_Hz.length; i += 2) {
+    const next = sampled(i);
+    refine(previous, next, 0, sampled(i - 1));
     points.push(next);
     previous = next;
   }
@@ -76,7 +93,31 @@ export function sweepCurve(
     im_ohm: column(3),
     logMagnitude: column(4),
     slope: column(5),
+    sample: Int32Array.from(points, (p) => p[6]),
   };
+}
+
+/**
+ * The members' admittances over the points that a sweep of [low_Hz, high_Hz] starts from, and between each two their middle
+ * in ln f. Does not depend on counts: with `setCounts` the same samples serve a bank whose counts have changed.
+ */
+export function sampleRail(
+  rail: CompiledRail,
+  low_Hz: number,
+  high_Hz: number,
+  options: Omit<CurveOptions, 'samples'> = {},
+): BankSum {
+  const grid = startGrid(rail, low_Hz, high_Hz, options);
+  const frequency_Hz = new Float64Array(2 * grid.length - 1);
+  grid.forEach((f, i) => {
+    frequency_Hz[2 * i] = f;
+    if (i > 0) frequency_Hz[2 * i - 1] = Math.sqrt(grid[i - 1] * f);
+  });
+  return new BankSum(
+    frequency_Hz,
+    rail.members.map((member) => sampleAdmittance(member.branch, frequency_Hz, member.id)),
+    rail.members.map((member) => member.count),
+  );
 }
 
 /** Both ends slope one way and the middle the other: two extrema hide between the ends. */
@@ -92,8 +133,13 @@ function startGrid(rail: CompiledRail, low_Hz: number, high_Hz: number, options:
   for (let i = 1; i < steps; i++) grid.push(low_Hz * (high_Hz / low_Hz) ** (i / steps));
   grid.push(high_Hz);
   for (const member of rail.members) {
-    const f = member.count > 0 ? selfResonance_Hz(member.branch) : null;
-    if (f !== null && f > low_Hz && f < high_Hz) grid.push(f);
+    const f = selfResonance_Hz(member.branch);
+    if (f !== null) {
+      // Without any resistance the branch's impedance is zero right there, which has no admittance: pass it on both sides.
+      const isLossless = member.branch.kind === 'series' && member.branch.r === 0;
+      const places = isLossless ? [f * (1 - 1e-7), f * (1 + 1e-7)] : [f];
+      for (const place of places) if (place > low_Hz && place < high_Hz) grid.push(place);
+    }
     if (member.branch.kind === 'table')
       for (const u of member.branch.table.u) {
         const knot = Math.exp(u);
@@ -103,4 +149,51 @@ function startGrid(rail: CompiledRail, low_Hz: number, high_Hz: number, options:
   for (const f of options.include_Hz ?? []) if (f > low_Hz && f < high_Hz) grid.push(f);
   grid.sort((a, b) => a - b);
   return grid.filter((f, i) => i === 0 || f > grid[i - 1]);
+}
+
+/** The stretch of a curve inside [low_Hz, high_Hz], whose ends must be among its points. */
+export function partOf(curve: Curve, [low_Hz, high_Hz]: readonly [number, number]): Curve {
+  const from = curve.frequency_Hz.findIndex((f) => f >= low_Hz);
+  let to = curve.frequency_Hz.length;
+  while (to > 0 && curve.frequency_Hz[to - 1] > high_Hz) to--;
+  if (from < 0 || curve.frequency_Hz[from] !== low_Hz || curve.frequency_Hz[to - 1] !== high_Hz)
+    throw new EngineError('band_Hz', 'the band’s ends are not among the points of the sweep');
+  return {
+    frequency_Hz: curve.frequency_Hz.subarray(from, to),
+    re_ohm: curve.re_ohm.subarray(from, to),
+    im_ohm: curve.im_ohm.subarray(from, to),
+    logMagnitude: curve.logMagnitude.subarray(from, to),
+    slope: curve.slope.subarray(from, to),
+    sample: curve.sample.subarray(from, to),
+  };
+}
+
+/** The curve with more points, computed exactly, e.g. its refined peaks. Frequencies that it has already are left alone. */
+export function withPoints(rail: CompiledRail, curve: Curve, more_Hz: readonly number[]): Curve {
+  const has = new Set(curve.frequency_Hz);
+  const out = scratch();
+  const rows = Array.from(curve.frequency_Hz, (f, i) => [
+    f,
+    curve.re_ohm[i],
+    curve.im_ohm[i],
+    curve.logMagnitude[i],
+    curve.slope[i],
+    curve.sample[i],
+  ]);
+  for (const f of new Set(more_Hz)) {
+    if (has.has(f)) continue;
+    railImpedance(rail, f, out);
+    const m2 = out[0] * out[0] + out[1] * out[1];
+    rows.push([f, out[0], out[1], 0.5 * Math.log(m2), (out[0] * out[2] + out[1] * out[3]) / m2, -1]);
+  }
+  rows.sort((a, b) => a[0] - b[0]);
+  const column = (k: number) => Float64Array.from(rows, (row) => row[k]);
+  return {
+    frequency_Hz: column(0),
+    re_ohm: column(1),
+    im_ohm: column(2),
+    logMagnitude: column(3),
+    slope: column(4),
+    sample: Int32Array.from(rows, (row) => row[5]),
+  };
 }

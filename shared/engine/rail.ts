@@ -102,6 +102,11 @@ export function railImpedance(rail: CompiledRail, frequency_Hz: number, out: Flo
   if (!(frequency_Hz > 0) || !Number.isFinite(frequency_Hz))
     throw new EngineError('frequency_Hz', 'frequency must be above 0 Hz and finite', frequency_Hz);
   nodeAdmittance(rail, frequency_Hz, out);
+  seenImpedance(rail, frequency_Hz, out);
+}
+
+/** Turns the node's admittance in `out` (value and derivative) into the impedance that the load sees, in place. */
+export function seenImpedance(rail: CompiledRail, frequency_Hz: number, out: Float64Array): void {
   const view = rail.view;
   const nothing = out[0] === 0 && out[1] === 0;
   if (nothing && !view?.die)

@@ -71,6 +71,13 @@ describe('where the engine says no', () => {
     expect(refused(() => railImpedance(ideal, 1 / (2 * Math.PI), scratch()))).toBe('ideal');
   });
 
+  it('sweeps past the resonance of a capacitor without resistance', () => {
+    const lossless = compileRail({ ...rail, lines: [{ ...line, esr_ohm: 0 }] });
+    const { logMagnitude } = sweepCurve(lossless, 1e4, 1e9);
+    expect(logMagnitude.every(Number.isFinite)).toBe(true);
+    expect(Number.isFinite(tightestHeadroom(lossless, [1e4, 1e9], flatTarget(1)).headroom_dB)).toBe(true);
+  });
+
   it('keeps a line of count zero in its place without counting it', () => {
     const out = scratch();
     railImpedance(compileRail({ ...rail, lines: [{ ...line, count: 0 }] }), 1e6, out);

@@ -1,5 +1,5 @@
 import { branchAdmittance } from './branch';
-import { type CompiledRail, nodeAdmittance, scratch } from './rail';
+import { type CompiledRail, scratch } from './rail';
 
 /** Current of each member of the node for 1 A drawn by the load: complex, per frequency. */
 export interface MemberShare {
@@ -7,24 +7,44 @@ export interface MemberShare {
   member: number;
   re: Float64Array;
   im: Float64Array;
+  /** |Z| of all of the member's branches together, ohm; Infinity at count 0. */
+  impedance_ohm: Float64Array;
 }
+
+/** Gives the admittance of one branch of a member at a point of the list, value in `out[0..1]`. */
+export type UnitAdmittance = (member: number, point: number, out: Float64Array) => void;
 
 /**
  * Share of the load current by member over frequency (1 = all of it). The complex shares sum to 1; a single magnitude
  * may exceed 1 where two members pass current back and forth (anti-resonance). Looked at from the die, what the die's
  * capacitance carries itself does not reach the board: share = n·Y_k/Y_node · Y_b/(Y_b + Y_die), Y_b = 1/(Z_package + 1/Y_node).
  */
-export function memberShares(rail: CompiledRail, frequency_Hz: ArrayLike<number>): MemberShare[] {
+export function memberShares(
+  rail: CompiledRail,
+  frequency_Hz: ArrayLike<number>,
+  unit: UnitAdmittance = (member, point, out) =>
+    branchAdmittance(rail.members[member].branch, frequency_Hz[point], out),
+): MemberShare[] {
   const n = frequency_Hz.length;
   const shares = rail.members.map((_, member) => blank(member, n));
   const die = rail.view?.die ? blank(-1, n) : null;
-  const y = scratch();
   const one = scratch();
   for (let i = 0; i < n; i++) {
     const f = frequency_Hz[i];
-    nodeAdmittance(rail, f, y);
-    const nodeRe = y[0];
-    const nodeIm = y[1];
+    let nodeRe = 0;
+    let nodeIm = 0;
+    rail.members.forEach((member, k) => {
+      if (member.count === 0) {
+        shares[k].impedance_ohm[i] = Number.POSITIVE_INFINITY;
+        return;
+      }
+      unit(k, i, one);
+      // Kept here until the node's sum is known.
+      shares[k].re[i] = member.count * one[0];
+      shares[k].im[i] = member.count * one[1];
+      nodeRe += shares[k].re[i];
+      nodeIm += shares[k].im[i];
+    });
     const node2 = nodeRe * nodeRe + nodeIm * nodeIm;
     if (node2 === 0) {
       if (die) die.re[i] = 1;
@@ -49,14 +69,14 @@ export function memberShares(rail: CompiledRail, frequency_Hz: ArrayLike<number>
       kIm = kRe * bIm + kIm * bRe;
       kRe = re;
     }
-    rail.members.forEach((member, k) => {
-      if (member.count === 0) return;
-      branchAdmittance(member.branch, f, one);
-      const yRe = member.count * one[0];
-      const yIm = member.count * one[1];
-      shares[k].re[i] = yRe * kRe - yIm * kIm;
-      shares[k].im[i] = yRe * kIm + yIm * kRe;
-    });
+    for (const { re, im, impedance_ohm } of shares) {
+      if (impedance_ohm[i] === Number.POSITIVE_INFINITY) continue;
+      const yRe = re[i];
+      const yIm = im[i];
+      impedance_ohm[i] = 1 / Math.hypot(yRe, yIm);
+      re[i] = yRe * kRe - yIm * kIm;
+      im[i] = yRe * kIm + yIm * kRe;
+    }
   }
   return die ? [...shares, die] : shares;
 }
@@ -65,4 +85,5 @@ const blank = (member: number, n: number): MemberShare => ({
   member,
   re: new Float64Array(n),
   im: new Float64Array(n),
+  impedance_ohm: new Float64Array(n),
 });

@@ -1,6 +1,6 @@
 import { spawnSync } from 'node:child_process';
 import { performance } from 'node:perf_hooks';
-import { admittanceOver, BankSum } from '@shared/engine/bank-sum';
+import { BankSum, sampleAdmittance } from '@shared/engine/bank-sum';
 import { lineBranch } from '@shared/engine/branch';
 import { impedanceOver } from '@shared/engine/impedance-over';
 import { compileRail } from '@shared/engine/rail';
@@ -19,7 +19,6 @@ const lines = Array.from({ length: LINES }, (_, i) => ({
 }));
 const branches = lines.map((line) => lineBranch(line, 'line'));
 const omega = Float64Array.from({ length: POINTS }, (_, i) => 2 * Math.PI * 1e4 * 1e4 ** (i / (POINTS - 1)));
-const inverse = omega.map((w) => 1 / w);
 const jw = Array.from(omega, (w) => new Complex(0, w));
 
 /** Median time of one run in microseconds, after a warm-up. */
@@ -33,7 +32,6 @@ function microseconds(work: () => void, runs: number): number {
   return times[runs >> 1] * 1000;
 }
 
-const units = branches.map((branch) => admittanceOver(branch, omega, inverse));
 const z = new Float64Array(POINTS);
 let sink = 0;
 
@@ -91,9 +89,9 @@ export function benchEngine(): string {
   const floor = microseconds(divisions, 400);
   const ours = microseconds(sweep, 400);
   const bank = new BankSum(
-    units,
+    frequency,
+    branches.map((branch) => sampleAdmittance(branch, frequency)),
     lines.map((line) => line.count),
-    POINTS,
   );
   let count = 0;
   const step = microseconds(() => bank.setCount(12, ++count % 9), 2000);
@@ -119,7 +117,14 @@ export function benchEngine(): string {
     })),
   };
   const whole = microseconds(() => {
-    sink += analyseBench(request).tightest.impedance_ohm;
+    sink += analyseBench(request, null).analysis.tightest.impedance_ohm;
+  }, 60);
+  let samples = analyseBench(request, null).samples;
+  const again = microseconds(() => {
+    const changed = request.lines.map((line, i) => (i === 12 ? { ...line, count: ++count % 9 } : line));
+    const answer = analyseBench({ ...request, lines: changed }, samples);
+    samples = answer.samples;
+    sink += answer.analysis.tightest.impedance_ohm;
   }, 60);
   const row = (name: string, time: number | null, note: string) =>
     `${name.padEnd(46)} ${time === null ? '–'.padStart(10) : time.toFixed(1).padStart(10)}  ${note}`;
@@ -133,6 +138,7 @@ export function benchEngine(): string {
     row('an object a complex number (complex.js)', object, `${times(object)} (aim ≥ 40)`),
     row('one changed count, incrementally', step, `${(resum / step).toFixed(1)} times faster than a new sum`),
     row('the bench’s whole analysis of 25 lines', whole, 'refined sweep, peaks, shares, headroom'),
+    row('the same after a changed count', again, 'samples kept'),
     sink === 0 ? 'nothing was computed' : '',
   ].join('\n');
 }

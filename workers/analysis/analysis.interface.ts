@@ -26,7 +26,7 @@ export interface BenchMember {
   id: string;
   /** Index into the request's lines; −1 for the others. */
   line: number;
-  /** |Z| of all capacitors of the line together, ohm; null for the die. */
+  /** |Z| of all capacitors of the line together, ohm; null for the die and for a line of count 0. */
   magnitude_ohm: Float64Array | null;
   /** |share| of the load current. */
   share: Float64Array;

@@ -30,7 +30,7 @@ const request: BenchRequest = {
 
 describe('the analysis of a bench', () => {
   it('keeps lines of count zero in place, with no share', () => {
-    const { members, figures } = analyseBench(request);
+    const { members, figures } = analyseBench(request, null).analysis;
     const line = (k: number) => members.find((member) => member.line === k);
     expect(members.map((member) => member.line)).toEqual([-1, 0, 1, 2]);
     expect(line(1)?.share.every((share) => share === 0)).toBe(true);
@@ -39,7 +39,10 @@ describe('the analysis of a bench', () => {
   });
 
   it('has the band’s edges and every place that breaks the surface among its points, worst first', () => {
-    const { frequency_Hz, magnitude_ohm, target_ohm, breaks, tightest, holds } = analyseBench(request);
+    const { frequency_Hz, magnitude_ohm, target_ohm, breaks, tightest, holds } = analyseBench(
+      request,
+      null,
+    ).analysis;
     expect(holds).toBe(false);
     expect(breaks[0]).toMatchObject({ frequency_Hz: tightest.frequency_Hz });
     for (const one of breaks) {
@@ -50,6 +53,31 @@ describe('the analysis of a bench', () => {
     }
     const inBand = frequency_Hz.filter((_, i) => !Number.isNaN(target_ohm[i]));
     expect([inBand[0], inBand[inBand.length - 1]]).toEqual([1e4, 3e7]);
+  });
+
+  it('is the same from kept samples as from nothing, whatever the counts were before', () => {
+    const counted = (counts: number[]) => ({
+      ...request,
+      lines: request.lines.map((line, i) => ({ ...line, count: counts[i] })),
+    });
+    let { samples } = analyseBench(request, null);
+    for (const counts of [
+      [1, 2, 3],
+      [0, 0, 9],
+      [40, 1, 0],
+      [2, 0, 5],
+    ]) {
+      const kept = analyseBench(counted(counts), samples);
+      samples = kept.samples;
+      const { analysis: fresh } = analyseBench(counted(counts), null);
+      expect(kept.analysis.tightest.impedance_ohm / fresh.tightest.impedance_ohm).toBeCloseTo(1, 12);
+      expect(kept.analysis.frequency_Hz).toEqual(fresh.frequency_Hz);
+      kept.analysis.members.forEach((member, k) => {
+        member.share.forEach((share, i) => {
+          expect(share).toBeCloseTo(fresh.members[k].share[i], 10);
+        });
+      });
+    }
   });
 
   it('answers what the engine refuses as data that names the field', async () => {

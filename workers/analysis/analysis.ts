@@ -1,10 +1,11 @@
+import type { BankSum } from '@shared/engine/bank-sum';
 import { branchAdmittance } from '@shared/engine/branch';
-import { type Curve, sweepCurve } from '@shared/engine/curve';
+import { type Curve, partOf, sampleRail, sweepCurve, withPoints } from '@shared/engine/curve';
 import { HOLD_TOLERANCE, holds, surfaceMaxima, type Tightest } from '@shared/engine/headroom';
 import { peaksOfCurve } from '@shared/engine/peaks';
 import { cavityResonances } from '@shared/engine/plane';
 import { type CompiledRail, compileRail } from '@shared/engine/rail';
-import { memberShares } from '@shared/engine/shares';
+import { memberShares, type UnitAdmittance } from '@shared/engine/shares';
 import { isExtrapolated } from '@shared/engine/table';
 import { targetAt } from '@shared/engine/target';
 import { bankFigures } from '@shared/rail/bank-figures';
@@ -16,13 +17,29 @@ import type { AnalysisApi, BenchAnalysis, BenchBreak, BenchMember, BenchRequest 
 
 /** Everything the bench shows of a rail, computed in one pass. Plain class: runs in a worker or in the same process. */
 export class Analysis implements AnalysisApi {
+  private samples: KeptSamples | null = null;
+
   async analyse(request: BenchRequest) {
-    return guard(() => analyseBench(request));
+    return guard(() => {
+      const { analysis, samples } = analyseBench(request, this.samples);
+      this.samples = samples;
+      return analysis;
+    });
   }
 }
 
-export function analyseBench({ spec, lines, span_Hz }: BenchRequest): BenchAnalysis {
+/** Admittances over the sweep's starting points, good for every bank that differs in its counts alone. */
+export interface KeptSamples {
+  key: string;
+  bank: BankSum;
+}
+
+export function analyseBench(
+  request: BenchRequest,
+  kept: KeptSamples | null,
+): { analysis: BenchAnalysis; samples: KeptSamples } {
   const start = performance.now();
+  const { spec, lines, span_Hz } = request;
   const models = lines.map((line) =>
     lineModel(spec, line.part, {
       count: line.count,
@@ -33,23 +50,27 @@ export function analyseBench({ spec, lines, span_Hz }: BenchRequest): BenchAnaly
   const rail = compileRail(networkWith(spec, models));
   const target = targetMask(spec);
   const band = spec.band_Hz;
-  const corners = Array.from(target.frequency_Hz);
-  const surface = surfaceMaxima(rail, band, target);
+  const samples = samplesFor(rail, request, [...band, ...target.frequency_Hz], kept);
+  const sweep = sweepCurve(rail, span_Hz[0], span_Hz[1], { samples: samples.bank });
+  const surface = surfaceMaxima(rail, band, target, partOf(sweep, band));
   const tightest = surface.reduce((worst, next) => (next.headroom_dB < worst.headroom_dB ? next : worst));
-  const include = [...band, ...corners, ...surface.map((m) => m.frequency_Hz)];
-  const curve = sweepCurve(rail, span_Hz[0], span_Hz[1], { include_Hz: include });
-  const frequency_Hz = curve.frequency_Hz;
-  const peaks = peaksOfCurve(rail, curve).map((peak) => describedPeak(peak, rail, target, band));
+  const exact = peaksOfCurve(rail, sweep);
+  const curve = withPoints(
+    rail,
+    sweep,
+    [...surface, ...exact].map((one) => one.frequency_Hz),
+  );
+  const { frequency_Hz } = curve;
   const geometry = spec.plane?.geometry;
   const cavities = geometry
     ? cavityResonances(geometry.length_m, geometry.width_m, geometry.relative_permittivity)
     : [];
-  return {
+  const analysis: BenchAnalysis = {
     frequency_Hz,
     magnitude_ohm: curve.logMagnitude.map(Math.exp),
     target_ohm: frequency_Hz.map((f) => (f >= band[0] && f <= band[1] ? targetAt(target, f) : Number.NaN)),
-    members: membersOver(rail, frequency_Hz, models),
-    peaks,
+    members: membersOver(rail, curve, samples.bank, models),
+    peaks: exact.map((peak) => describedPeak(peak, rail, target, band)),
     breaks: breaksOf(rail, surface),
     tightest,
     holds: holds(tightest),
@@ -61,29 +82,44 @@ export function analyseBench({ spec, lines, span_Hz }: BenchRequest): BenchAnaly
     extrapolated: continuesTable(rail, curve),
     elapsed_ms: performance.now() - start,
   };
+  return { analysis, samples };
+}
+
+/** The kept samples with this bank's counts, or new ones where anything but a count has changed. */
+function samplesFor(
+  rail: CompiledRail,
+  { spec, lines, span_Hz }: BenchRequest,
+  include_Hz: readonly number[],
+  kept: KeptSamples | null,
+): KeptSamples {
+  const key = JSON.stringify([spec, span_Hz, lines.map((line) => ({ ...line, count: 0 }))]);
+  if (kept?.key !== key) return { key, bank: sampleRail(rail, span_Hz[0], span_Hz[1], { include_Hz }) };
+  kept.bank.setCounts(rail.members.map((member) => member.count));
+  return kept;
 }
 
 function membersOver(
   rail: CompiledRail,
-  frequency_Hz: Float64Array,
+  curve: Curve,
+  samples: BankSum,
   models: readonly { inductance_H: number }[],
 ): BenchMember[] {
-  const y = new Float64Array(4);
-  return memberShares(rail, frequency_Hz).map(({ member, re, im }) => {
+  const unit: UnitAdmittance = (member, point, out) => {
+    const sample = curve.sample[point];
+    if (sample < 0) return branchAdmittance(rail.members[member].branch, curve.frequency_Hz[point], out);
+    out[0] = samples.units[member].g[sample];
+    out[1] = samples.units[member].b[sample];
+  };
+  return memberShares(rail, curve.frequency_Hz, unit).map(({ member, re, im, impedance_ohm }) => {
     const share = re.map((value, i) => Math.hypot(value, im[i]));
     if (member < 0)
       return { role: 'die', id: 'die', line: -1, magnitude_ohm: null, share, inductance_H: null };
-    const { role, id, line, branch, count } = rail.members[member];
-    const each = Math.max(count, 1);
-    const magnitude_ohm = frequency_Hz.map((f) => {
-      branchAdmittance(branch, f, y, id);
-      return 1 / (each * Math.hypot(y[0], y[1]));
-    });
+    const { role, id, line, count } = rail.members[member];
     return {
       role,
       id,
       line,
-      magnitude_ohm,
+      magnitude_ohm: count > 0 ? impedance_ohm : null,
       share,
       inductance_H: line < 0 ? null : models[line].inductance_H,
     };
