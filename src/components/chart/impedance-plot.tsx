@@ -108,19 +108,26 @@ function trace(curve: PlotCurve, line: { color: string; width: number; dash?: st
   };
 }
 
-/** Many thin lines as one trace with gaps: the library's cost is by trace, not by point. */
+/** Points of a thin line at least this far apart, as a share of its span: about two pixels. */
+const THIN = 1 / 320;
+
+/** Many thin lines as one trace with gaps: the library's cost is by trace and by point. Their lowest points are kept. */
 function joined(curves: readonly PlotCurve[], color: string): Data {
-  const size = curves.reduce((sum, curve) => sum + curve.frequency_Hz.length + 1, 0);
-  const x = new Float64Array(size);
-  const y = new Float64Array(size);
-  let at = 0;
-  for (const curve of curves) {
-    x.set(curve.frequency_Hz, at);
-    y.set(curve.magnitude_ohm, at);
-    at += curve.frequency_Hz.length;
-    x[at] = Number.NaN;
-    y[at] = Number.NaN;
-    at++;
+  const x: (number | null)[] = [];
+  const y: (number | null)[] = [];
+  for (const { frequency_Hz: f, magnitude_ohm: z } of curves) {
+    const last = f.length - 1;
+    const ratio = (f[last] / f[0]) ** THIN;
+    let next = 0;
+    for (let i = 0; i <= last; i++) {
+      const isTurn = i > 0 && i < last && z[i] < z[i - 1] && z[i] <= z[i + 1];
+      if (f[i] < next && !isTurn && i < last) continue;
+      next = f[i] * ratio;
+      x.push(f[i]);
+      y.push(z[i]);
+    }
+    x.push(null);
+    y.push(null);
   }
   return {
     type: 'scatter',
