@@ -8,7 +8,7 @@ export default defineConfig({
   plugins: [react(), tailwindcss()],
   resolve: { tsconfigPaths: true },
   worker: { format: 'es' },
-  build: { outDir: 'dist', sourcemap: false, chunkSizeWarningLimit: 1500 },
+  build: { outDir: 'dist', sourcemap: false, chunkSizeWarningLimit: 5000 },
   server: { proxy: { '/api': `http://127.0.0.1:${apiPort}` } },
   test: {
     include: ['{src,server,workers,shared}/**/*.test.{ts,tsx}', 'tests/**/*.test.ts'],

@@ -1,5 +1,5 @@
 import type { DocumentPart, RailDocument } from '../schemas/rail-document.schema';
-import { formatQuantity } from '../units/format';
+import { formatQuantity, formatVolts } from '../units/format';
 
 export interface Caution {
   kind: 'voltage' | 'rating' | 'cracks' | 'losses' | 'polarity' | 'inrush';
@@ -54,7 +54,7 @@ export function railCautions(document: Pick<RailDocument, 'rail' | 'parts' | 'ba
     cautions.push({
       kind: 'rating',
       title: 'rated below the rail',
-      text: `${names(under)}: rated for less than ${formatQuantity(voltage_V, 'V', { trim: true })}. Do not fit.`,
+      text: `${names(under)}: rated for less than ${formatVolts(voltage_V)}. Do not fit.`,
     });
   const large = parts.filter(isLargeCeramic);
   if (large.length > 0)
@@ -81,7 +81,7 @@ export function railCautions(document: Pick<RailDocument, 'rail' | 'parts' | 'ba
     cautions.push({
       kind: 'inrush',
       title: 'inrush at start-up',
-      text: `Charging ${formatQuantity(capacitance_F, 'F')} to ${formatQuantity(voltage_V, 'V', { trim: true })} in 1 ms takes ${formatQuantity((capacitance_F * voltage_V) / RAMP_s, 'A')} on average; check the regulator’s limit and soft start.`,
+      text: `Charging ${formatQuantity(capacitance_F, 'F')} to ${formatVolts(voltage_V)} in 1 ms takes ${formatQuantity((capacitance_F * voltage_V) / RAMP_s, 'A')} on average; check the regulator’s limit and soft start.`,
     });
   return cautions;
 }

@@ -5,7 +5,7 @@ import { Loading } from '@/components/ui/page';
 import { paths } from '@/config/paths';
 import { Bench } from '@/features/bench/components/bench';
 import { useBoard } from '@/features/boards/api/boards';
-import { cacheRail, useRail } from '@/features/rails/api/rails';
+import { cacheRail, cacheResult, useRail } from '@/features/rails/api/rails';
 import { useSession } from '@/features/session/api/session';
 import { HeaderStatus } from '../layouts/status-slot';
 
@@ -32,6 +32,7 @@ export function Component() {
         cacheRail(client, answer);
         void client.invalidateQueries({ queryKey: ['boards'], exact: true });
       }}
+      onResult={(result) => cacheResult(client, boardId, railId, result)}
       renderStatus={(status) => (
         <HeaderStatus>
           {rights.edit ? (latestRevision ? `draft after ${latestRevision.letter}` : 'draft') : 'read only'} ·{' '}

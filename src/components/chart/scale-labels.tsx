@@ -15,6 +15,15 @@ function labelled(low: number, high: number): number[] {
   return inside.length >= 2 ? inside : [low, high];
 }
 
+/** Room that a frequency's label takes with some air, px. */
+const LABEL_WIDTH = 72;
+
+/** Every label where there is room, else every second or third one, the first always. */
+function thinned(labels: readonly number[], width: number): number[] {
+  const step = Math.max(1, Math.ceil((LABEL_WIDTH * (labels.length - 1)) / Math.max(width, 1)));
+  return labels.filter((_, i) => i % step === 0);
+}
+
 /** The numbers of both scales: the outermost ones of the frequency axis stay inside its ends. */
 export function ScaleLabels({ x, y }: { x: FrequencyAxis; y: ImpedanceAxis }) {
   const trim = { trim: true, digits: 3 };
@@ -25,7 +34,7 @@ export function ScaleLabels({ x, y }: { x: FrequencyAxis; y: ImpedanceAxis }) {
       height={y.height}
       className="pointer-events-none absolute top-0 left-0 overflow-visible"
     >
-      {labelled(x.low_Hz, x.high_Hz).map((f) => {
+      {thinned(labelled(x.low_Hz, x.high_Hz), x.width).map((f) => {
         const px = xOf(x, f);
         const anchor = px < 24 ? 'start' : px > x.width - 24 ? 'end' : 'middle';
         return (

@@ -17,7 +17,11 @@ export function Dialog({ title, open, onClose, firm = false, wide = false, child
   useEffect(() => {
     const dialog = ref.current;
     if (!dialog) return;
-    if (open && !dialog.open) dialog.showModal();
+    if (open && !dialog.open) {
+      dialog.showModal();
+      // What one came to fill in, rather than the close button that stands first.
+      dialog.querySelector<HTMLElement>('input:not([type="hidden"]), select, textarea')?.focus();
+    }
     if (!open && dialog.open) dialog.close();
   }, [open]);
   return (

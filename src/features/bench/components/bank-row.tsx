@@ -80,13 +80,16 @@ export function BankRow(props: BankRowProps) {
               {line.locked && ' · locked'}
             </span>
           </button>
-          <CountStepper
-            count={line.count}
-            before={before}
-            readOnly={readOnly}
-            name={name}
-            onCount={onCount}
-          />
+          <div className="flex shrink-0 flex-col items-end">
+            <CountStepper
+              count={line.count}
+              before={before}
+              readOnly={readOnly}
+              name={name}
+              onCount={onCount}
+            />
+            {cursorShare !== null && <CursorShare share={cursorShare} />}
+          </div>
         </div>
         <div className="relative flex items-end max-lg:ml-[var(--score-left)]">
           {strip && (
@@ -98,7 +101,6 @@ export function BankRow(props: BankRowProps) {
               label={`share of the load current of ${name} over frequency`}
             />
           )}
-          {cursorShare !== null && <CursorShare share={cursorShare} />}
         </div>
       </div>
       {open && part && !readOnly && (
@@ -110,11 +112,8 @@ export function BankRow(props: BankRowProps) {
 
 /** The share under the pointer, in per cent. */
 export function CursorShare({ share }: { share: number }) {
-  return (
-    <span className="pointer-events-none absolute top-0 right-0 bg-paper/80 px-1 text-small text-stone">
-      {share >= 0.0005 ? `${formatQuantity(share * 100, '', { digits: share < 0.1 ? 2 : 3 })} %` : '0 %'}
-    </span>
-  );
+  const percent = share < 0.0005 ? '0' : formatQuantity(share * 100, '', { digits: share < 0.1 ? 2 : 3 });
+  return <span className="text-small whitespace-nowrap text-stone">{percent} %</span>;
 }
 
 interface StepperProps {

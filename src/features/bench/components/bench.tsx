@@ -2,7 +2,8 @@ import { newPartDistance_m, railDocument } from '@shared/rail/document';
 import type { Part } from '@shared/schemas/part.schema';
 import type { RailWithParts } from '@shared/schemas/rail.schema';
 import { useQuery } from '@tanstack/react-query';
-import { type ReactNode, useCallback, useMemo, useState } from 'react';
+import type { BenchAnalysis } from '@workers/analysis/analysis.interface';
+import { type ReactNode, useCallback, useEffect, useMemo, useRef, useState } from 'react';
 import { Button } from '@/components/ui/button';
 import { Notice } from '@/components/ui/notice';
 import { Section } from '@/components/ui/page';
@@ -29,12 +30,14 @@ interface BenchProps {
   /** Address of the specification form, for who may edit. */
   editTo: string | null;
   onSaved: (answer: RailWithParts) => void;
+  /** The bank as it stands on the bench has a new result, saved or not. */
+  onResult: (result: Pick<BenchAnalysis, 'holds' | 'tightest'>) => void;
   /** Puts the save state where the page wants it (the header). */
   renderStatus: (status: ReactNode) => ReactNode;
 }
 
 /** The working screen of one rail. Mounted anew for each rail (by key). */
-export function Bench({ server, personId, canEdit, editTo, onSaved, renderStatus }: BenchProps) {
+export function Bench({ server, personId, canEdit, editTo, onSaved, onResult, renderStatus }: BenchProps) {
   const { spec } = server.rail;
   const bench = useBench({ server, personId, onSaved });
   const [picking, setPicking] = useState(false);
@@ -57,6 +60,11 @@ export function Bench({ server, personId, canEdit, editTo, onSaved, renderStatus
   );
   const present = useAnalysis('bench', spec, bench.lines, known, whole);
   const found = useAnalysis('preview', spec, mixLines, known, whole);
+  const tell = useRef(onResult);
+  tell.current = onResult;
+  useEffect(() => {
+    if (present.analysis) tell.current(present.analysis);
+  }, [present.analysis]);
   const isPreview = previewing && mixLines !== null;
   const shown = isPreview ? found : present;
   const shownLines = isPreview ? mixLines : bench.lines;

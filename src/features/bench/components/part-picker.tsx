@@ -28,7 +28,6 @@ export function PartPicker({ open, voltage_V, onPick, onClose }: PartPickerProps
         {(control) => (
           <Input
             {...control}
-            autoFocus
             value={text}
             placeholder="part number, dielectric or case, e.g. X7R 0402"
             onChange={(event) => setText(event.target.value)}

@@ -209,9 +209,12 @@ function FixedRow({
       className="min-h-[46px] border-b py-1.5 lg:grid"
       style={{ gridTemplateColumns: 'var(--score-left) minmax(0, 1fr)' }}
     >
-      <div>
-        <span className="block font-semibold">{name}</span>
-        <span className="block text-small text-stone">{note}</span>
+      <div className="flex items-end justify-between gap-2 pr-3">
+        <span className="min-w-0">
+          <span className="block font-semibold">{name}</span>
+          <span className="block truncate text-small text-stone">{note}</span>
+        </span>
+        {cursorShare !== null && <CursorShare share={cursorShare} />}
       </div>
       <div className="relative flex items-end max-lg:ml-[var(--score-left)]">
         {analysis && (
@@ -223,7 +226,6 @@ function FixedRow({
             label={`share of the load current of the ${name} over frequency`}
           />
         )}
-        {cursorShare !== null && <CursorShare share={cursorShare} />}
       </div>
     </div>
   );

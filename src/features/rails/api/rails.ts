@@ -1,5 +1,6 @@
 import {
   type RailList,
+  type RailSummary,
   type RailWithParts,
   railListSchema,
   railWithPartsSchema,
@@ -35,6 +36,21 @@ export function cacheRail(client: QueryClient, answer: RailWithParts): void {
       ? list.rails.map((one) => (one.id === rail.id ? rail : one))
       : [...list.rails, rail];
     return { rails, parts: [...known.values()] };
+  });
+}
+
+/** Shows a result in the board's lists before the save that brings it has been answered. */
+export function cacheResult(
+  client: QueryClient,
+  boardId: string,
+  railId: string,
+  result: Pick<RailSummary, 'holds' | 'tightest'>,
+): void {
+  client.setQueryData(railsQuery(boardId).queryKey, (list: RailList | undefined) => {
+    const rail = list?.rails.find((one) => one.id === railId);
+    if (!list || !rail) return list;
+    const summary = { ...rail.summary, holds: result.holds, tightest: result.tightest, error: null };
+    return { ...list, rails: list.rails.map((one) => (one.id === railId ? { ...one, summary } : one)) };
   });
 }
 

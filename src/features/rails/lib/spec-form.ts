@@ -1,4 +1,3 @@
-import { C0_M_PER_S } from '@shared/engine/constants';
 import { cavityResonances, planeCapacitance } from '@shared/engine/plane';
 import { kneeFrequency, targetFromStep } from '@shared/engine/target';
 import { formatPath } from '@shared/schemas/common.schema';
@@ -289,6 +288,5 @@ export function planeSentence(form: SpecForm): string {
   if (!(a.value > 0 && b.value > 0 && h.value > 0 && er.value >= 1)) return '';
   const c = planeCapacitance(a.value, b.value, h.value, er.value);
   const [fa, fb] = cavityResonances(a.value, b.value, er.value);
-  const speed = C0_M_PER_S / Math.sqrt(er.value);
-  return `${formatQuantity(c, 'F')}; first cavity resonances ${formatQuantity(fa, 'Hz')} and ${formatQuantity(fb, 'Hz')} (waves at ${formatQuantity(speed, 'm')}/s)`;
+  return `${formatQuantity(c, 'F')}; first cavity resonances ${formatQuantity(fa, 'Hz')} and ${formatQuantity(fb, 'Hz')}`;
 }

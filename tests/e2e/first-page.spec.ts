@@ -1,0 +1,33 @@
+import { gzipSync } from 'node:zlib';
+import { expect, test } from '@playwright/test';
+import { demoEmail, openBench, signIn } from './people';
+
+test('the first page is light, and nothing is fetched from elsewhere', async ({ page, baseURL }) => {
+  const outside: string[] = [];
+  const faults: string[] = [];
+  let scripts = 0;
+  page.on('request', (request) => {
+    const url = request.url();
+    if (!url.startsWith(baseURL ?? '') && !url.startsWith('blob:') && !url.startsWith('data:'))
+      outside.push(url);
+  });
+  page.on('console', (message) => {
+    if (message.type() === 'error') faults.push(message.text());
+  });
+  page.on('pageerror', (error) => faults.push(error.message));
+  page.on('response', async (response) => {
+    if (!new URL(response.url()).pathname.endsWith('.js')) return;
+    scripts += gzipSync(await response.body().catch(() => Buffer.alloc(0))).length;
+  });
+  await signIn(page, demoEmail('engineer'));
+  await expect(page.getByText('Tide gateway').first()).toBeVisible();
+  await page.waitForLoadState('networkidle');
+  expect(scripts).toBeGreaterThan(50_000);
+  expect(scripts).toBeLessThan(200_000);
+  await openBench(page, 'VDD_CORE');
+  await expect(page.locator('.js-plotly-plot .nsewdrag')).toBeAttached();
+  await page.waitForLoadState('networkidle');
+  expect(outside).toEqual([]);
+  // The first look at the session answers 401 before signing in: the browser reports that as an error of its own.
+  expect(faults.filter((text) => !text.includes('401'))).toEqual([]);
+});
