@@ -88,7 +88,7 @@ export function BankRow(props: BankRowProps) {
               name={name}
               onCount={onCount}
             />
-            {cursorShare !== null && <CursorShare share={cursorShare} />}
+            <CursorShare share={cursorShare} />
           </div>
         </div>
         <div className="relative flex items-end max-lg:ml-[var(--score-left)]">
@@ -110,11 +110,17 @@ export function BankRow(props: BankRowProps) {
   );
 }
 
-/** The share under the pointer, in per cent. */
-export function CursorShare({ share }: { share: number }) {
-  const percent = share < 0.0005 ? '0' : formatQuantity(share * 100, '', { digits: share < 0.1 ? 2 : 3 });
-  return <span className="text-small whitespace-nowrap text-stone">{percent} %</span>;
+/** The share under the pointer, in per cent; its line is kept when there is none, so that rows do not jump. */
+export function CursorShare({ share }: { share: number | null }) {
+  return (
+    <span className="text-small whitespace-nowrap text-stone">
+      {share === null ? '\u00a0' : percentText(share)}
+    </span>
+  );
 }
+
+const percentText = (share: number): string =>
+  share < 0.0005 ? '0\u00a0%' : formatQuantity(share * 100, '%', { digits: share < 0.1 ? 2 : 3 });
 
 interface StepperProps {
   count: number;
@@ -140,7 +146,7 @@ function CountStepper({ count, before, readOnly, name, onCount }: StepperProps) 
     setTyped(null);
   };
   const step =
-    'flex size-6 items-center justify-center text-base text-deep hover:bg-wash disabled:opacity-40';
+    'flex h-5 w-6 items-center justify-center text-base text-deep hover:bg-wash disabled:opacity-40';
   return (
     <span className="flex shrink-0 items-center">
       <button
@@ -165,7 +171,7 @@ function CountStepper({ count, before, readOnly, name, onCount }: StepperProps) 
           if (event.key === 'Enter') commit();
           if (event.key === 'Escape') setTyped(null);
         }}
-        className="w-8 border-0 bg-transparent text-center font-bold"
+        className="h-5 w-8 border-0 bg-transparent text-center font-bold"
       />
       <button
         type="button"

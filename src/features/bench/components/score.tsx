@@ -214,7 +214,7 @@ function FixedRow({
           <span className="block font-semibold">{name}</span>
           <span className="block truncate text-small text-stone">{note}</span>
         </span>
-        {cursorShare !== null && <CursorShare share={cursorShare} />}
+        <CursorShare share={cursorShare} />
       </div>
       <div className="relative flex items-end max-lg:ml-[var(--score-left)]">
         {analysis && (
