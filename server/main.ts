@@ -25,7 +25,12 @@ async function main(): Promise<void> {
 }
 
 main().catch((error: unknown) => {
-  const reason = error instanceof Error ? error.message : String(error);
+  const inUse = error instanceof Error && 'code' in error && error.code === 'EADDRINUSE';
+  const reason = inUse
+    ? 'another program listens on this port; choose one, e.g. PORT=4781 npm start'
+    : error instanceof Error
+      ? error.message
+      : String(error);
   process.stderr.write(
     error instanceof ConfigError
       ? `Millpond cannot start: wrong setting: ${reason}\n`
