@@ -1,5 +1,5 @@
-import { branchAdmittance } from './branch';
 import { type Curve, type CurveOptions, sweepCurve } from './curve';
+import { makersAt } from './makers';
 import { localMaxima } from './maxima';
 import { type CompiledRail, nodeAdmittance, railImpedance, scratch } from './rail';
 
@@ -9,9 +9,9 @@ export interface Peak {
   impedance_ohm: number;
   /** Set when it is not a resonance but the end of the span, where |Z| rises outwards. */
   edge: 'low' | 'high' | null;
-  /** The members of the node that make it (index into `CompiledRail.members`); null at an edge without a partner. */
-  inductive: number | null;
-  capacitive: number | null;
+  /** The two that make it, by name (makers.ts); null at an edge without a partner. */
+  inductive: string | null;
+  capacitive: string | null;
   /** Q = ω·|dB/dω| / (2G) of the node, from Y = G + jB at the peak; null at an edge. */
   q: number | null;
 }
@@ -56,27 +56,10 @@ function describePeak(rail: CompiledRail, frequency_Hz: number, isEdge: boolean)
   const out = scratch();
   railImpedance(rail, frequency_Hz, out);
   const impedance_ohm = Math.hypot(out[0], out[1]);
-  let inductive: number | null = null;
-  let capacitive: number | null = null;
-  let mostInductive = 0;
-  let mostCapacitive = 0;
-  rail.members.forEach((member, index) => {
-    if (member.count === 0) return;
-    branchAdmittance(member.branch, frequency_Hz, out);
-    const b = member.count * out[1];
-    if (b < mostInductive) {
-      mostInductive = b;
-      inductive = index;
-    }
-    if (b > mostCapacitive) {
-      mostCapacitive = b;
-      capacitive = index;
-    }
-  });
   let q: number | null = null;
   if (!isEdge) {
     nodeAdmittance(rail, frequency_Hz, out);
     q = out[0] > 0 ? Math.abs(out[3]) / (2 * out[0]) : Number.POSITIVE_INFINITY;
   }
-  return { frequency_Hz, impedance_ohm, inductive, capacitive, q };
+  return { frequency_Hz, impedance_ohm, ...makersAt(rail, frequency_Hz), q };
 }

@@ -42,6 +42,20 @@ describe('an impedance table', () => {
     expect(out[1]).toBeCloseTo(omega * 1e-9 - 1 / (omega * 1e-6), 6);
   });
 
+  it('goes on without a step at its ends', () => {
+    const bent = { ...rlc(0.01, 1e-9, 1e-6), re_ohm: frequencies.map((f) => 0.01 + 2e-8 * f) };
+    const table = prepareTable(bent, 'table');
+    const inside = new Float64Array(4);
+    const outside = new Float64Array(4);
+    for (const end of [1e4, 1e8]) {
+      tableImpedance(table, end, inside);
+      tableImpedance(table, end === 1e4 ? end * 0.9999999 : end * 1.0000001, outside);
+      expect(Math.hypot(outside[0] - inside[0], outside[1] - inside[1])).toBeLessThan(
+        1e-5 * Math.hypot(inside[0], inside[1]),
+      );
+    }
+  });
+
   it('refuses what no passive table can hold, naming the row', () => {
     const field = (f: number[], re: number[], im: number[]) => {
       try {

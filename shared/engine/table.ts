@@ -4,7 +4,7 @@ import type { ImpedanceTable } from './network';
 /**
  * A measured or simulated Z(f), made ready for look-up. Between two points ln|Z| and the unwrapped phase run
  * linearly over ln f: exact for a resistor, an inductor or a capacitor alone, and Z = Z_i·exp(m·(u − u_i)) has
- * the derivative m·Z. Outside its range the table is continued by its fitted series R–L–C.
+ * the derivative m·Z. Outside its range the table goes on from its last point as its fitted series R–L–C does.
  */
 export interface PreparedTable {
   u: Float64Array;
@@ -54,9 +54,16 @@ export function tableImpedance(table: PreparedTable, frequency_Hz: number, out: 
   const n = table.u.length;
   if (isExtrapolated(table, frequency_Hz)) {
     const omega = 2 * Math.PI * frequency_Hz;
-    const { resistance_ohm, inductance_H, elastance_perF } = table.fit;
-    out[0] = resistance_ohm;
-    out[1] = omega * inductance_H - elastance_perF / omega;
+    const { inductance_H, elastance_perF } = table.fit;
+    const end = u < table.u[0] ? 0 : n - 1;
+    const magnitude = Math.exp(table.logMagnitude[end]);
+    const endOmega = 2 * Math.PI * Math.exp(table.u[end]);
+    // From the table's last point on as the fit goes: the curve has a bend there, but no step.
+    out[0] = magnitude * Math.cos(table.phase[end]);
+    out[1] =
+      magnitude * Math.sin(table.phase[end]) +
+      (omega - endOmega) * inductance_H -
+      elastance_perF * (1 / omega - 1 / endOmega);
     out[2] = 0;
     out[3] = omega * inductance_H + elastance_perF / omega;
     return;

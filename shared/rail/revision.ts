@@ -1,6 +1,6 @@
 import { EngineError } from '../engine/errors';
 import { findPeaks, type Peak } from '../engine/peaks';
-import { type CompiledRail, compileRail } from '../engine/rail';
+import { compileRail } from '../engine/rail';
 import { type TargetMask, targetAt } from '../engine/target';
 import type { RailDocument } from '../schemas/rail-document.schema';
 import type { Instance, RevisionPeak, RevisionRail } from '../schemas/revision.schema';
@@ -31,7 +31,7 @@ function peaksOf(document: RailDocument): RevisionPeak[] {
     const rail = compileRail(networkOf(document));
     const target = targetMask(document.rail);
     return findPeaks(rail, ...document.rail.band_Hz).map((peak) =>
-      describedPeak(peak, rail, target, document.rail.band_Hz),
+      describedPeak(peak, target, document.rail.band_Hz),
     );
   } catch (error) {
     if (error instanceof EngineError) return [];
@@ -39,21 +39,19 @@ function peaksOf(document: RailDocument): RevisionPeak[] {
   }
 }
 
-/** A peak with its members by name and the target there (null outside the band). */
+/** A peak with the target there (null outside the band). */
 export function describedPeak(
   peak: Peak,
-  rail: CompiledRail,
   target: TargetMask,
   band_Hz: readonly [number, number],
 ): RevisionPeak {
-  const name = (index: number | null) => (index === null ? null : rail.members[index].id);
   const inBand = peak.frequency_Hz >= band_Hz[0] && peak.frequency_Hz <= band_Hz[1];
   return {
     frequency_Hz: peak.frequency_Hz,
     impedance_ohm: peak.impedance_ohm,
     target_ohm: inBand ? targetAt(target, peak.frequency_Hz) : null,
-    inductive: name(peak.inductive),
-    capacitive: name(peak.capacitive),
+    inductive: peak.inductive,
+    capacitive: peak.capacitive,
     q: peak.q !== null && Number.isFinite(peak.q) ? peak.q : null,
   };
 }

@@ -38,9 +38,6 @@ export interface BenchMember {
 export interface BenchBreak extends Tightest {
   inductive: string | null;
   capacitive: string | null;
-  /** Indices into `members`. */
-  inductiveMember: number | null;
-  capacitiveMember: number | null;
 }
 
 export interface BenchAnalysis {

@@ -2,6 +2,7 @@ import type { BankSum } from '@shared/engine/bank-sum';
 import { branchAdmittance } from '@shared/engine/branch';
 import { type Curve, partOf, sampleRail, sweepCurve, withPoints } from '@shared/engine/curve';
 import { HOLD_TOLERANCE, holds, surfaceMaxima, type Tightest } from '@shared/engine/headroom';
+import { makersAt } from '@shared/engine/makers';
 import { peaksOfCurve } from '@shared/engine/peaks';
 import { cavityResonances } from '@shared/engine/plane';
 import { type CompiledRail, compileRail } from '@shared/engine/rail';
@@ -70,7 +71,7 @@ export function analyseBench(
     magnitude_ohm: curve.logMagnitude.map(Math.exp),
     target_ohm: frequency_Hz.map((f) => (f >= band[0] && f <= band[1] ? targetAt(target, f) : Number.NaN)),
     members: membersOver(rail, curve, samples.bank, models),
-    peaks: exact.map((peak) => describedPeak(peak, rail, target, band)),
+    peaks: exact.map((peak) => describedPeak(peak, target, band)),
     breaks: breaksOf(rail, surface),
     tightest,
     holds: holds(tightest),
@@ -127,37 +128,10 @@ function membersOver(
 }
 
 function breaksOf(rail: CompiledRail, surface: readonly Tightest[]): BenchBreak[] {
-  const y = new Float64Array(4);
   return surface
     .filter((point) => point.impedance_ohm > point.target_ohm * (1 + HOLD_TOLERANCE))
     .sort((a, b) => a.headroom_dB - b.headroom_dB)
-    .map((point) => {
-      let inductiveMember: number | null = null;
-      let capacitiveMember: number | null = null;
-      let most = 0;
-      let least = 0;
-      rail.members.forEach((member, k) => {
-        if (member.count === 0) return;
-        branchAdmittance(member.branch, point.frequency_Hz, y);
-        const b = member.count * y[1];
-        if (b > most) {
-          most = b;
-          capacitiveMember = k;
-        }
-        if (b < least) {
-          least = b;
-          inductiveMember = k;
-        }
-      });
-      const id = (k: number | null) => (k === null ? null : rail.members[k].id);
-      return {
-        ...point,
-        inductiveMember,
-        capacitiveMember,
-        inductive: id(inductiveMember),
-        capacitive: id(capacitiveMember),
-      };
-    });
+    .map((point) => ({ ...point, ...makersAt(rail, point.frequency_Hz) }));
 }
 
 function continuesTable(rail: CompiledRail, curve: Curve): boolean {

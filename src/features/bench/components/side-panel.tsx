@@ -89,7 +89,9 @@ function Breaks({
             <p className="text-small text-stone">
               {one.inductive && one.capacitive
                 ? `${nameOf(one.inductive)} against ${nameOf(one.capacitive)}`
-                : `${nameOf(one.inductive ?? one.capacitive)} alone`}
+                : one.inductive || one.capacitive
+                  ? `${nameOf(one.inductive ?? one.capacitive)} alone`
+                  : 'resistance'}
             </p>
           </li>
         ))}
