@@ -1,7 +1,8 @@
 import type { Tightest } from '../engine/headroom';
+import { seenImpedance } from '../engine/rail';
 import type { Prepared } from './prepare';
 import { type Reach, reachAt } from './reach';
-import { type Rows, rowQuadratic } from './rows';
+import type { Rows } from './rows';
 
 const PREFIXES: [number, string][] = [
   [1e9, 'G'],
@@ -14,6 +15,9 @@ const PREFIXES: [number, string][] = [
   [1e-12, 'p'],
 ];
 
+/** A maximum per part below this is worth mentioning as a reason. */
+const FEW = 20;
+
 /** A quantity with three digits and an SI prefix, e.g. 11.6 mΩ. */
 export function engineering(value: number, unit: string): string {
   const size = Math.abs(value);
@@ -21,12 +25,11 @@ export function engineering(value: number, unit: string): string {
   return `${Number((value / scale).toPrecision(3))} ${prefix}${unit}`;
 }
 
-/** |Z| in ohm that row `f` sees at Y = x + jy (|Z|²/Zt² = N/(q + N), see shortfall.ts). */
-function impedanceAt(rows: Rows, f: number, x: number, y: number): number {
-  const re = 1 + rows.zsRe[f] * x - rows.zsIm[f] * y;
-  const im = rows.zsRe[f] * y + rows.zsIm[f] * x;
-  const n = re * re + im * im;
-  return rows.zt[f] * Math.sqrt(n / (rowQuadratic(rows, f, x, y) + n));
+/** |Z| in ohm that the load sees at row `f` with Y = x + jy at the node. */
+function impedanceAt({ rail }: Prepared, rows: Rows, f: number, x: number, y: number): number {
+  const out = Float64Array.of(x, y, 0, 0);
+  seenImpedance(rail, rows.frequency_Hz[f], out);
+  return Math.hypot(out[0], out[1]);
 }
 
 /** Why no mix can meet the row of `reach`: what the best candidate and all together leave there, and what is to blame. */
@@ -43,21 +46,23 @@ export function explainReach(prepared: Prepared, rows: Rows, reach: Reach): stri
     const more = part.max - part.min;
     const x = rows.y0x[exact] + more * rows.yx[k][exact];
     const y = rows.y0y[exact] + more * rows.yy[k][exact];
-    const ohm = impedanceAt(rows, exact, x, y);
+    const ohm = impedanceAt(prepared, rows, exact, x, y);
     if (more > 0 && ohm < best.ohm) best = { ohm, k };
   });
   const together = reachAt(prepared, rows, exact);
-  const all = engineering(impedanceAt(rows, exact, together.x, together.y), 'Ω');
+  const all = engineering(impedanceAt(prepared, rows, exact, together.x, together.y), 'Ω');
   if (best.k < 0) return `${at} what is fixed leaves ${all}, above ${target}, and no candidate may be added.`;
   const part = prepared.parts[best.k];
-  const one = part.max === 1 ? `one ${part.id}` : `${part.max} of ${part.id}`;
+  const some = part.max === 1 ? `one ${part.id}` : `${part.max} of ${part.id}`;
+  const leave = part.max === 1 ? 'leaves' : 'leave';
+  const limit = part.max < FEW ? `; no more than ${part.max} of a part may be used` : '';
   // Z = 1/Y of one piece: its reactance has the sign of −Im Y
   const re = rows.yx[best.k][exact];
   const im = rows.yy[best.k][exact];
   const inductance =
     im < 0 ? 'its inductance with mount and path is too large' : 'its capacitance is too small';
   const cause = Math.abs(im) < re ? 'its ESR is too large' : inductance;
-  return `${at} even ${one}, the best candidate there, leave ${engineering(best.ohm, 'Ω')}, and the best use of all candidates within their maxima ${all}, above ${target}: ${cause}.`;
+  return `${at} even ${some}, the best candidate there, ${leave} ${engineering(best.ohm, 'Ω')}, and the best use of all candidates within their maxima ${all}, above ${target}: ${cause}${limit}.`;
 }
 
 /** Every frequency alone is within reach, but every combination has been tried. */

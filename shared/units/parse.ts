@@ -5,6 +5,9 @@ export type Parsed = { ok: true; value: number } | { ok: false; reason: string }
 
 const no = (reason: string): Parsed => ({ ok: false, reason });
 
+/** What was typed, short enough to be repeated in a sentence. */
+const shortened = (text: string): string => (text.length > 24 ? `${text.slice(0, 24)}…` : text);
+
 const SPELLINGS: Readonly<Record<UnitSymbol, readonly string[]>> = {
   Ω: ['Ω', '\u2126', 'ohm', 'ohms', 'Ohm', 'R'],
   H: ['H'],
@@ -57,17 +60,31 @@ function parseLetterCode(text: string, unit: UnitSymbol): Parsed | null {
 
 function parseDecimal(text: string, unit: UnitSymbol): Parsed {
   const match = /^([+-]?(?:\d+(?:[.,]\d*)?|[.,]\d+)(?:[eE][+-]?\d+)?)\s*(.*)$/u.exec(text);
-  if (!match) return no(`“${text}” is not a number`);
+  if (!match) return no(`“${shortened(text)}” is not a number`);
   const [, number, rest] = match;
-  if (/^[+-]?\d{1,3},\d{3}$/.test(number))
-    return no(`write ${number.replace(',', '.')} or ${number.replace(',', '')}: the comma could mean either`);
+  const comma = commaQuestion(number, rest);
+  if (comma) return no(comma);
+  if (unit === 'Hz' && /^m\s*hz$/.test(rest.trim()))
+    return no('write MHz for megahertz (m stands for milli)');
   const digits = number.replace(',', '.');
   const [mantissa, exponentText] = digits.split(/[eE]/);
   const exponent = suffixExponent(rest.trim(), unit);
   if (exponent === null)
-    return no(unit === '' ? `“${rest}” is not understood` : `“${rest}” is not a unit of ${unit}`);
+    return no(
+      unit === ''
+        ? `“${shortened(rest)}” is not understood`
+        : `“${shortened(rest)}” is not a unit of ${unit}`,
+    );
   const value = scaleDecimal(mantissa, exponent + Number(exponentText ?? 0));
   return Number.isFinite(value) ? { ok: true, value } : no('the number is too large');
+}
+
+/** A comma that could part thousands or decimals is asked about: `1,500`; `0,125` and `4,7` can only be decimals. */
+function commaQuestion(number: string, rest: string): string | null {
+  if (/^[+-]?[1-9]\d{0,2},\d{3}$/.test(number) && !/^,/.test(rest))
+    return `write ${number.replace(',', '.')} or ${number.replace(',', '')}: the comma could mean either`;
+  if (/^(,\d{3})+/.test(rest)) return 'write the number without commas between thousands';
+  return null;
 }
 
 function suffixExponent(suffix: string, unit: UnitSymbol): number | null {
@@ -96,13 +113,16 @@ export function parseLength(text: string): Parsed {
   const match = /^([+-]?(?:\d+(?:[.,]\d*)?|[.,]\d+)(?:[eE][+-]?\d+)?)\s*(\D*)$/u.exec(
     text.trim().replace(/\u2212/g, '-'),
   );
-  if (!match) return no(text.trim() === '' ? 'type a length' : `“${text.trim()}” is not a length`);
+  if (!match) return no(text.trim() === '' ? 'type a length' : `“${shortened(text.trim())}” is not a length`);
+  const comma = commaQuestion(match[1], match[2]);
+  if (comma) return no(comma);
   const number = match[1].replace(',', '.');
   const unit = match[2].trim();
   const inch = INCHES[unit];
   if (inch !== undefined) return { ok: true, value: Number(number) * inch };
   const exponent = unit === '' ? -3 : LENGTHS[unit];
-  if (exponent === undefined) return no(`“${unit}” is not a unit of length: use mm, µm, mil or in`);
+  if (exponent === undefined)
+    return no(`“${shortened(unit)}” is not a unit of length: use mm, µm, mil or in`);
   const [mantissa, exponentText] = number.split(/[eE]/);
   return { ok: true, value: scaleDecimal(mantissa, exponent + Number(exponentText ?? 0)) };
 }

@@ -61,8 +61,21 @@ describe('reading quantities', () => {
     expect(value(text, unit)).toEqual(expect.stringMatching(/.+/));
   });
 
+  it('does not take megahertz in small letters for millihertz', () => {
+    expect(value('30 mhz', 'Hz')).toContain('MHz');
+    expect(value('30mHz', 'Hz')).toBe(0.03);
+    expect(value('x'.repeat(3000), 'V').toString().length).toBeLessThan(60);
+  });
+
   it('asks what a comma means where it could mean either', () => {
     expect(value('1,500', 'Hz')).toContain('1.500 or 1500');
+    expect(value('0,125', 'V')).toBe(0.125);
+    expect(value('1,234,567', 'Hz')).toContain('without commas');
+    expect(parseLength('1,234')).toMatchObject({
+      ok: false,
+      reason: expect.stringContaining('could mean either'),
+    });
+    expect(parseLength('0,25')).toEqual({ ok: true, value: 2.5e-4 });
   });
 
   it('reads lengths, bare ones as millimetres', () => {

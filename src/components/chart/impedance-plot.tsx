@@ -18,8 +18,8 @@ interface ImpedancePlotProps {
   curves: readonly PlotCurve[];
   /** The waterline at the total's frequencies, NaN outside the band: where the total lies above, the gap is filled. */
   target_ohm: Float64Array | null;
-  /** A stretch of the axis was dragged over, or (null) the whole is wanted again. */
-  onZoom: (span_Hz: [number, number] | null) => void;
+  /** A stretch of the axis was dragged over. */
+  onZoom: (span_Hz: [number, number]) => void;
 }
 
 /** Room in px at the left for the scale's numbers and at the bottom for those of the frequency axis. */
@@ -27,7 +27,14 @@ export const SCALE_WIDTH = 64;
 export const TICK_HEIGHT = 26;
 const TOP = 8;
 
-const config = { displayModeBar: false, responsive: false, doubleClick: 'reset' as const, scrollZoom: false };
+/** The page keeps the span itself, so that strips and labels follow; the library only tells what was dragged over. */
+const config = {
+  displayModeBar: false,
+  responsive: false,
+  doubleClick: false as const,
+  scrollZoom: false,
+  showTips: false,
+};
 
 /** The impedance chart: double-logarithmic, margins fixed so that what stands below lines up with it to the pixel. */
 export default function ImpedancePlot({ x, y, curves, target_ohm, onZoom }: ImpedancePlotProps) {
@@ -66,6 +73,7 @@ export default function ImpedancePlot({ x, y, curves, target_ohm, onZoom }: Impe
         range: [Math.log10(y.low_ohm), Math.log10(y.high_ohm)],
         gridcolor: tokens.hairline,
         linecolor: tokens.hairline,
+        minor: { ticks: 'inside', ticklen: 4, tickcolor: tokens.stone, dtick: 'D1', nticks: 9 },
         fixedrange: true,
       },
     }),
@@ -77,10 +85,9 @@ export default function ImpedancePlot({ x, y, curves, target_ohm, onZoom }: Impe
       layout={layout}
       config={config}
       onRelayout={(event: Readonly<Record<string, unknown>>) => {
-        const from = event['xaxis.range[0]'];
-        const to = event['xaxis.range[1]'];
+        const range = event['xaxis.range'];
+        const [from, to] = Array.isArray(range) ? range : [event['xaxis.range[0]'], event['xaxis.range[1]']];
         if (typeof from === 'number' && typeof to === 'number') onZoom([10 ** from, 10 ** to]);
-        else if (event['xaxis.autorange'] === true) onZoom(null);
       }}
     />
   );

@@ -15,6 +15,20 @@ function labelled(low: number, high: number): number[] {
   return inside.length >= 2 ? inside : [low, high];
 }
 
+/** Labels of the impedance scale: decades, and where fewer than three of them show, 2 and 5 of each as well. */
+function impedanceLabels(low: number, high: number): number[] {
+  const whole = decades(low, high);
+  if (whole.length >= 3) return whole;
+  const slack = 1e-9;
+  const found: number[] = [];
+  for (let k = Math.floor(Math.log10(low)); k <= Math.log10(high) + slack; k++)
+    for (const step of [1, 2, 5]) {
+      const value = step * 10 ** k;
+      if (value >= low * (1 - slack) && value <= high * (1 + slack)) found.push(value);
+    }
+  return found;
+}
+
 /** Room that a frequency's label takes with some air, px. */
 const LABEL_WIDTH = 72;
 
@@ -43,7 +57,7 @@ export function ScaleLabels({ x, y }: { x: FrequencyAxis; y: ImpedanceAxis }) {
           </text>
         );
       })}
-      {labelled(y.low_ohm, y.high_ohm).map((z) => (
+      {impedanceLabels(y.low_ohm, y.high_ohm).map((z) => (
         <text
           key={z}
           x={-9}

@@ -16,17 +16,18 @@ export function Dialog({ title, open, onClose, firm = false, wide = false, child
   const heading = useId();
   useEffect(() => {
     const dialog = ref.current;
-    if (!dialog) return;
-    if (open && !dialog.open) {
-      dialog.showModal();
-      // What one came to fill in, rather than the close button that stands first.
-      dialog.querySelector<HTMLElement>('input:not([type="hidden"]), select, textarea')?.focus();
-    }
-    if (!open && dialog.open) dialog.close();
+    if (!dialog || !open) return;
+    if (!dialog.open) dialog.showModal();
+    // What one came to fill in, rather than the button that stands first; else the dialog itself, so that no answer is pre-chosen.
+    const field = dialog.querySelector<HTMLElement>('input:not([type="hidden"]), select, textarea');
+    (field ?? dialog).focus();
+    // Closing gives the focus back to where it was, also when the dialog is taken away as a whole.
+    return () => dialog.close();
   }, [open]);
   return (
     <dialog
       ref={ref}
+      tabIndex={-1}
       aria-labelledby={heading}
       onCancel={(event) => {
         event.preventDefault();

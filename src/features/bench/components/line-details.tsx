@@ -22,7 +22,7 @@ export function LineDetails({ line, part, onChange, onRemove }: LineDetailsProps
   const [refusal, setRefusal] = useState<string | null>(null);
   const change = (patch: Partial<DraftLine>) => setRefusal(onChange(patch));
   return (
-    <div className="mb-3 border-l-2 border-shallow py-1 pl-3">
+    <div className="relative z-10 mb-3 border-l-2 border-shallow bg-paper py-1 pl-3">
       <p className="mb-2 text-small text-stone">
         <Link to={paths.part(part.id)} className="text-deep underline-offset-4 hover:underline">
           {part.partNumber}

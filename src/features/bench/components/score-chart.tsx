@@ -15,6 +15,7 @@ interface ScoreChartProps {
   waterline: readonly (readonly [number, number])[];
   breaks: readonly { frequency_Hz: number; impedance_ohm: number }[];
   cursor_Hz: number | null;
+  /** A stretch of the axis to look at; null: the whole. */
   onZoom: (span_Hz: [number, number] | null) => void;
   summary: string;
 }
@@ -36,7 +37,13 @@ export function ScoreChart({
   summary,
 }: ScoreChartProps) {
   return (
-    <div className="relative" style={{ height: y.height + TOP + 26 }} role="img" aria-label={summary}>
+    <div
+      className="relative"
+      style={{ height: y.height + TOP + 26 }}
+      role="img"
+      aria-label={summary}
+      onDoubleClick={() => onZoom(null)}
+    >
       <div className="absolute top-0" style={{ left: -SCALE }}>
         {x.width > 0 && (
           <Suspense fallback={<p className="p-20 text-stone">fetching the chart …</p>}>

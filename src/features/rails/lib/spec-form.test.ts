@@ -67,6 +67,9 @@ describe('the specification form', () => {
         [1e6, 1e-2],
       ],
     });
+    expect(readPoints('1M, 10m', ['Hz', 'Ω'])).toEqual({ ok: true, rows: [[1e6, 1e-2]] });
+    expect(readPoints('1e6,0.01,0.02', ['Hz', 'Ω', 'Ω'])).toEqual({ ok: true, rows: [[1e6, 0.01, 0.02]] });
+    expect(readPoints('', ['Hz', 'Ω', 'Ω'])).toMatchObject({ reason: expect.stringContaining('10k 3m 5m') });
     expect(readPoints('10k 3m\n1M', ['Hz', 'Ω'])).toMatchObject({
       ok: false,
       reason: expect.stringContaining('line 2'),

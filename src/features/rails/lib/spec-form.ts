@@ -188,14 +188,14 @@ export function readSpec(form: SpecForm): { spec: RailSpec } | { errors: SpecErr
       hold_s: q('stepHold', 's'),
       fall_s: q('stepFall', 's'),
     };
-  if (Object.keys(errors).length > 0) return { errors };
   const checked = railSpecSchema.safeParse(spec);
-  if (checked.success) return { spec: checked.data };
-  const faults = checked.error.issues.map((issue) => ({
-    path: formatPath(issue.path),
-    message: issue.message,
-  }));
-  return { errors: errorsAtFields(faults) };
+  if (checked.success && Object.keys(errors).length === 0) return { spec: checked.data };
+  // What could not be read stands in `spec` as NaN and has its own sentence already.
+  const faults = (checked.error?.issues ?? [])
+    .filter((issue) => issue.code !== 'invalid_type')
+    .map((issue) => ({ path: formatPath(issue.path), message: issue.message }));
+  const all = { ...errorsAtFields(faults), ...errors };
+  return { errors: Object.keys(all).length > 0 ? all : { form: 'something in this form is not right' } };
 }
 
 function readSource(
@@ -241,7 +241,7 @@ export function readPoints(
   for (let i = 0; i < lines.length; i++) {
     const line = lines[i].trim();
     if (line === '' || line.startsWith('#')) continue;
-    const cells = line.split(/[;\t ]+/).filter(Boolean);
+    const cells = cellsOf(line, units.length);
     if (cells.length !== units.length)
       return {
         ok: false,
@@ -256,8 +256,21 @@ export function readPoints(
     rows.push(row);
   }
   return rows.length === 0
-    ? { ok: false, reason: 'write at least one point, e.g. 10k 3m' }
+    ? { ok: false, reason: `write at least one line, e.g. ${EXAMPLES.slice(0, units.length).join(' ')}` }
     : { ok: true, rows };
+}
+
+const EXAMPLES = ['10k', '3m', '5m'];
+
+/** The numbers of a line: parted by blanks, tabs or semicolons, or, where that does not give enough, by commas. */
+function cellsOf(line: string, wanted: number): string[] {
+  const cells = line
+    .split(/[;\t ]+/)
+    .map((cell) => cell.replace(/,$/, ''))
+    .filter(Boolean);
+  if (cells.length === wanted) return cells;
+  const byComma = line.split(/\s*[,;]\s*/).filter(Boolean);
+  return byComma.length === wanted ? byComma : cells;
 }
 
 /** What the target comes to while one types: `3 % of 0.9 V at 9 A → 3.00 mΩ`. Empty until it can be said. */
