@@ -2,6 +2,7 @@ import { nameSchema } from '@shared/schemas/common.schema';
 import { emailSchema, passwordSchema } from '@shared/schemas/person.schema';
 import type { z } from 'zod';
 import { createAdmin } from '../services/admin.service';
+import { isPublicPassword, PUBLIC_PASSWORD } from '../services/new-password';
 import { readArguments } from './arguments';
 import { BadInput } from './bad-input';
 import { ask, readStdin } from './prompt';
@@ -27,6 +28,9 @@ async function readPassword(fromStdin: boolean): Promise<string> {
   return password;
 }
 
+/** An administrator made here is a real one, demo mode or not. */
+const adminPasswordSchema = passwordSchema.refine((text) => !isPublicPassword(text), PUBLIC_PASSWORD);
+
 export async function run([action, ...args]: string[]): Promise<number> {
   if (action !== 'create') throw new BadInput('admin takes one action: admin create');
   const { values, positionals } = readArguments(args, {
@@ -37,7 +41,7 @@ export async function run([action, ...args]: string[]): Promise<number> {
   if (positionals.length > 0) throw new BadInput(`unexpected word: ${positionals[0]}`);
   const email = checked('email', emailSchema, await given('email', values.email));
   const name = checked('name', nameSchema, await given('name', values.name));
-  const password = checked('password', passwordSchema, await readPassword(values['password-stdin']));
+  const password = checked('password', adminPasswordSchema, await readPassword(values['password-stdin']));
   const made = await withContext((ctx) => createAdmin(ctx, { email, name, password }));
   if (!made) throw new BadInput(`email: someone with the address ${email} is here already`);
   process.stdout.write(`${name} <${email}> can sign in as administrator.\n`);

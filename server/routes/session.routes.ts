@@ -1,5 +1,4 @@
 import { changePasswordSchema, signInSchema } from '@shared/schemas/person.schema';
-import { signedOut } from '../errors/problems';
 import { clearSessionCookie, setSessionCookie } from '../middleware/session';
 import { changePassword } from '../services/password.service';
 import { sessionOf, signIn, signOut, signOutEverywhere } from '../services/session.service';
@@ -18,10 +17,8 @@ export const sessionRoutes = [
   }),
   route('get', '/session', {
     access: 'open',
-    handle: ({ actor }) => {
-      if (!actor) throw signedOut();
-      return sessionOf(actor);
-    },
+    // Asked on every first visit: that nobody is signed in is an answer, not an error.
+    handle: ({ actor }) => (actor ? sessionOf(actor) : null),
   }),
   route('delete', '/session', {
     access: 'open',

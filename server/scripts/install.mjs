@@ -39,7 +39,7 @@ export function ensureInstalled() {
   if (isInstalled(lock)) return;
   console.log('Installing dependencies (npm ci) …');
   const npm = process.platform === 'win32' ? 'npm.cmd' : 'npm';
-  const { status } = spawnSync(npm, ['ci', '--no-audit', '--no-fund', '--include=dev'], {
+  const { status } = spawnSync(npm, ['ci', '--no-audit', '--no-fund', '--include=dev', '--loglevel=error'], {
     cwd: root,
     stdio: 'inherit',
     shell: process.platform === 'win32',

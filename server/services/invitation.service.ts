@@ -6,6 +6,7 @@ import { PersonEntity } from '../db/entities/person.entity';
 import { conflict, invalid, notFound } from '../errors/problems';
 import { invitationMail } from '../mail/templates';
 import type { Actor } from './actor';
+import { hashNewPassword } from './new-password';
 import { personView } from './person.service';
 import { requireOnSite } from './rights';
 import { type StartedSession, startSession } from './session.service';
@@ -65,7 +66,7 @@ export async function acceptInvitation(
   token: string,
   body: { name: string; password: string },
 ): Promise<StartedSession> {
-  const passwordHash = await ctx.passwords.hash(body.password);
+  const passwordHash = await hashNewPassword(ctx, body.password);
   return ctx.db.write(async (manager) => {
     const { id } = await takeToken(ctx, manager, token, 'invitation');
     await manager.update(PersonEntity, { id }, { name: body.name, passwordHash });

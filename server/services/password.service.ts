@@ -5,6 +5,7 @@ import { SessionEntity } from '../db/entities/session.entity';
 import { invalid } from '../errors/problems';
 import { passwordChangedMail, resetMail } from '../mail/templates';
 import type { Actor } from './actor';
+import { hashNewPassword } from './new-password';
 import { maySignIn } from './session.service';
 import { issueToken, takeToken } from './token.service';
 
@@ -17,7 +18,7 @@ export async function changePassword(
   const person = await ctx.db.manager.findOneByOrFail(PersonEntity, { id: actor.id });
   if (!(await ctx.passwords.matches(body.currentPassword, person.passwordHash)))
     throw invalid([{ path: 'currentPassword', message: 'is not your password' }]);
-  const passwordHash = await ctx.passwords.hash(body.password);
+  const passwordHash = await hashNewPassword(ctx, body.password);
   await ctx.db.write(async (manager) => {
     await manager.update(PersonEntity, { id: actor.id }, { passwordHash, demo: false });
     await manager.delete(SessionEntity, { personId: actor.id, id: Not(actor.sessionId) });
@@ -36,7 +37,7 @@ export function requestReset(ctx: Context, email: string): void {
 }
 
 export async function resetPassword(ctx: Context, token: string, password: string): Promise<void> {
-  const passwordHash = await ctx.passwords.hash(password);
+  const passwordHash = await hashNewPassword(ctx, password);
   const person = await ctx.db.write(async (manager) => {
     const owner = await takeToken(ctx, manager, token, 'reset');
     await manager.update(PersonEntity, { id: owner.id }, { passwordHash, demo: false });

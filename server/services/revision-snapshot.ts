@@ -1,6 +1,7 @@
 import { createHash } from 'node:crypto';
 import { setImmediate } from 'node:timers/promises';
 import { ENGINE_VERSION } from '@shared/engine/version';
+import { canonicalJson } from '@shared/formats/canonical-json';
 import { railDocument } from '@shared/rail/document';
 import { nextBlock, revisionRail } from '@shared/rail/revision';
 import type { PersonRef } from '@shared/schemas/common.schema';
@@ -8,7 +9,6 @@ import type { RevisionRail } from '@shared/schemas/revision.schema';
 import type { EntityManager } from 'typeorm';
 import { RailEntity } from '../db/entities/rail.entity';
 import { partsById } from '../db/repositories/part.repository';
-import { canonicalJson } from './canonical-json';
 
 /** Everything a revision says, in the order-free form that its hash is taken over. */
 export interface Snapshot {

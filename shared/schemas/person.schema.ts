@@ -49,6 +49,8 @@ export const sessionSchema = z.object({
   expiresAt: isoDateSchema,
 });
 export type Session = z.infer<typeof sessionSchema>;
+/** null: nobody is signed in. */
+export const currentSessionSchema = sessionSchema.nullable();
 
 /** Open to all: what the sign-in page must know. `demo` lists the demo sign-ins while demo mode is on. */
 export const siteSchema = z.object({

@@ -7,7 +7,7 @@ type Method = 'GET' | 'POST' | 'PUT' | 'PATCH' | 'DELETE';
 interface RequestOptions {
   body?: unknown;
   signal?: AbortSignal;
-  /** The caller deals with 401 itself (the sign-in form, the first look at the session). */
+  /** The caller deals with 401 itself (the sign-in form). */
   quietUnauthorised?: boolean;
 }
 

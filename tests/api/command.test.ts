@@ -67,6 +67,13 @@ describe('the command', () => {
     expect(ended).toEqual({ status: 2, stdout: '', stderr: 'millpond: password: at least 12 characters\n' });
   });
 
+  it('makes no administrator with the demo password, which is public', async () => {
+    const args = ['admin', 'create', '--email', 'a@b.example', '--name', 'B', '--password-stdin'];
+    const ended = await millpond(args, testFolder(), DEMO_PASSWORD);
+    expect(ended.status).toBe(2);
+    expect(ended.stderr).toMatch(/^millpond: password: is the demo password/);
+  });
+
   it.each<[string, string[], RegExp]>([
     ['admin', [], /admin create/],
     ['admin', ['create', '--email', 'no', '--name', 'B', '--password-stdin'], /^email: /],

@@ -93,6 +93,17 @@ describe('an invitation', () => {
     await admin.post(`/people/${person.id}/invitation`).expect(409);
   });
 
+  it('does not take the demo password when demo mode is off, and stays good', async () => {
+    await invite();
+    const token = await newestLink('invitation');
+    t.ctx.config.demo = false;
+    const answer = await t.nobody
+      .post(`/invitations/${token}`, { name: 'Ada New', password: DEMO_PASSWORD })
+      .expect(422);
+    expect(answer.body.errors[0].path).toBe('password');
+    await t.nobody.post(`/invitations/${token}`, { name: 'Ada New', password }).expect(201);
+  });
+
   it('keeps only the hash of its token', async () => {
     await invite();
     const token = await newestLink('invitation');
@@ -124,13 +135,22 @@ describe('a password reset', () => {
     expect((await t.nobody.get(`/password-resets/${token}`).expect(200)).body.email).toBe(people.owner.email);
     await t.nobody.post(`/password-resets/${token}`, { password: 'short' }).expect(422);
     await t.nobody.post(`/password-resets/${token}`, { password }).expect(204);
-    await me.get('/session').expect(401);
+    await me.get('/boards').expect(401);
     await t.nobody.post('/session', { email: people.owner.email, password: DEMO_PASSWORD }).expect(401);
     await t.nobody.post('/session', { email: people.owner.email, password }).expect(201);
     await t.nobody.post(`/password-resets/${token}`, { password }).expect(404);
     expect(await mails()).toBe(2);
     const { body: site } = await t.nobody.get('/site');
     expect(site.demoPeople.map((one: { email: string }) => one.email)).not.toContain(people.owner.email);
+  });
+
+  it('does not take the demo password when demo mode is off', async () => {
+    await ask(people.stranger.email);
+    const token = await newestLink('reset');
+    t.ctx.config.demo = false;
+    const answer = await t.nobody.post(`/password-resets/${token}`, { password: DEMO_PASSWORD }).expect(422);
+    expect(answer.body.errors[0].path).toBe('password');
+    await t.nobody.post(`/password-resets/${token}`, { password }).expect(204);
   });
 
   it('lasts one hour, and only the newest link works', async () => {

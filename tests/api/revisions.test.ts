@@ -1,9 +1,9 @@
 import { createHash } from 'node:crypto';
+import { canonicalJson } from '@shared/formats/canonical-json';
 import { summariseRail } from '@shared/rail/summary';
 import { revisionDetailSchema, revisionPageSchema } from '@shared/schemas/revision.schema';
 import { afterEach, beforeEach, describe, expect, it } from 'vitest';
 import { routes } from '../../server/routes';
-import { canonicalJson } from '../../server/services/canonical-json';
 import { revisionLetter } from '../../server/services/revision-letter';
 import { type Caller, openTestApp, type TestApp } from '../helpers/app';
 import { DEMO_BOARD, OTHER_BOARD, partId, people, railId } from '../helpers/people';

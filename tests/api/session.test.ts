@@ -1,4 +1,4 @@
-import { sessionSchema } from '@shared/schemas/person.schema';
+import { currentSessionSchema, sessionSchema } from '@shared/schemas/person.schema';
 import { afterEach, beforeEach, describe, expect, it } from 'vitest';
 import { DEMO_PASSWORD } from '../../server/db/demo/people';
 import { PersonEntity } from '../../server/db/entities/person.entity';
@@ -78,11 +78,17 @@ describe('signing in', () => {
 });
 
 describe('a session', () => {
+  it('that is not there is an answer of its own, not an error', async () => {
+    const answer = await t.nobody.get('/session').expect(200);
+    expect(currentSessionSchema.parse(answer.body)).toBeNull();
+  });
+
   it('ends with signing out, for the old cookie too', async () => {
     const me = await t.as('owner');
     const answer = await me.delete('/session').expect(204);
     expect(answer.get('Set-Cookie')?.[0]).toMatch(/millpond_session=;/);
-    await me.get('/session').expect(401);
+    expect((await me.get('/session').expect(200)).body).toBeNull();
+    await me.get('/boards').expect(401);
     await t.nobody.delete('/session').expect(204);
   });
 
@@ -131,7 +137,7 @@ describe('changing the password', () => {
     const [here, there] = [await t.as('owner'), await t.as('owner')];
     await here.put('/session/password', { currentPassword: DEMO_PASSWORD, password: next }).expect(200);
     await here.get('/session').expect(200);
-    await there.get('/session').expect(401);
+    await there.get('/boards').expect(401);
     await signIn().expect(401);
     await signIn(people.owner.email, next).expect(201);
     await t.ctx.background.idle();
@@ -152,6 +158,31 @@ describe('changing the password', () => {
     expect(short.body.errors[0].path).toBe('password');
     const long = { currentPassword: DEMO_PASSWORD, password: 'ü'.repeat(37) };
     expect((await me.put('/session/password', long).expect(422)).body.errors[0].path).toBe('password');
+  });
+});
+
+describe('the demo password', () => {
+  it('may be kept while demo mode is on', async () => {
+    const me = await t.as('stranger');
+    const body = { currentPassword: DEMO_PASSWORD, password: DEMO_PASSWORD };
+    await me.put('/session/password', body).expect(200);
+    await signIn(people.stranger.email).expect(201);
+  });
+
+  it('is refused at its field when demo mode is off', async () => {
+    const me = await t.as('stranger');
+    t.ctx.config.demo = false;
+    const body = { currentPassword: DEMO_PASSWORD, password: DEMO_PASSWORD };
+    const answer = await me.put('/session/password', body).expect(422);
+    expect(answer.body.errors).toEqual([
+      { path: 'password', message: expect.stringContaining('demo password') },
+    ]);
+  });
+
+  it('lets nobody in when demo mode is off, whoever’s it is', async () => {
+    await signIn(people.stranger.email).expect(201);
+    t.ctx.config.demo = false;
+    await signIn(people.stranger.email).expect(401);
   });
 });
 

@@ -1,16 +1,11 @@
-import { sessionSchema, siteSchema } from '@shared/schemas/person.schema';
+import { currentSessionSchema, sessionSchema, siteSchema } from '@shared/schemas/person.schema';
 import { queryOptions, useMutation, useQuery, useQueryClient } from '@tanstack/react-query';
 import { command, request } from '@/lib/api-client';
-import { ApiError } from '@/lib/problem';
 
 /** Who is signed in; null when nobody is. */
 export const sessionQuery = queryOptions({
   queryKey: ['session'],
-  queryFn: ({ signal }) =>
-    request('GET', '/session', sessionSchema, { signal, quietUnauthorised: true }).catch((error: unknown) => {
-      if (error instanceof ApiError && error.status === 401) return null;
-      throw error;
-    }),
+  queryFn: ({ signal }) => request('GET', '/session', currentSessionSchema, { signal }),
   staleTime: 60_000,
 });
 
