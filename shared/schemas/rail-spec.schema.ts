@@ -115,6 +115,7 @@ export const bandBasisSchema = z.strictObject({
   knee: z.union([z.literal(0.35), z.literal(0.5)]).default(0.35),
   regulator_bandwidth_Hz: frequencySchema,
 });
+export type BandBasis = z.infer<typeof bandBasisSchema>;
 
 export const railNameSchema = z
   .string()

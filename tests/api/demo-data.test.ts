@@ -1,8 +1,10 @@
+import { kneeFrequency } from '@shared/engine/target';
 import { railDocument } from '@shared/rail/document';
 import { type Part, partFieldsSchema } from '@shared/schemas/part.schema';
 import { railListSchema } from '@shared/schemas/rail.schema';
 import { railDocumentSchema } from '@shared/schemas/rail-document.schema';
 import { railSpecSchema } from '@shared/schemas/rail-spec.schema';
+import { revisionDetailSchema } from '@shared/schemas/revision.schema';
 import { afterEach, beforeEach, describe, expect, it } from 'vitest';
 import { demoParts } from '../../server/db/demo/parts';
 import { demoRails } from '../../server/db/demo/rails';
@@ -51,13 +53,34 @@ describe('the demo data', () => {
     const headroom = new Map(rails.map((rail) => [rail.spec.name, rail.summary.tightest?.headroom_dB ?? 0]));
     for (const rail of rails) railDocumentSchema.parse(railDocument(rail.spec, rail.bank, byId));
     expect(rails.filter((rail) => rail.summary.holds).length).toBe(4);
-    expect(headroom.get('VDD_CORE')).toBeLessThan(-2);
-    expect(headroom.get('VDD_CORE')).toBeGreaterThan(-4);
+    expect(headroom.get('VDD_CORE')).toBeLessThan(-1.5);
+    expect(headroom.get('VDD_CORE')).toBeGreaterThan(-3);
     expect(headroom.get('VDD_SERDES')).toBeLessThan(0);
     expect(headroom.get('VDD_SERDES')).toBeGreaterThan(-1);
     for (const rail of rails)
       for (const line of rail.bank)
         expect(byId.get(line.partId)?.rated_voltage_V).toBeGreaterThanOrEqual(rail.spec.voltage_V);
+  });
+
+  it('keeps each band at what it was found from', () => {
+    const derived = demoRails.filter(({ spec }) => spec.band_basis);
+    expect(derived.length).toBeGreaterThan(0);
+    for (const { spec } of derived) {
+      const { rise_s = 0, knee = 0.35, regulator_bandwidth_Hz } = spec.band_basis ?? {};
+      expect(spec.band_Hz).toEqual([regulator_bandwidth_Hz, kneeFrequency(rise_s, knee)]);
+    }
+  });
+
+  it('shows real farthest distances on at least two rails of its latest revision', async () => {
+    const { body } = await (await t.as('layout')).get(`/boards/${DEMO_BOARD}/revisions/B`).expect(200);
+    const { railResults } = revisionDetailSchema.parse(body);
+    const real = railResults.filter(({ instances }) =>
+      instances.some(
+        ({ farthest_m, farthestReason, distance_m }) =>
+          farthestReason === null && farthest_m !== null && farthest_m > (distance_m ?? 0),
+      ),
+    );
+    expect(real.length).toBeGreaterThanOrEqual(2);
   });
 
   it('has parts of every state and one person for each role', async () => {

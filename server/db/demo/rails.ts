@@ -1,6 +1,7 @@
 import { planeCapacitance } from '@shared/engine/plane';
+import { kneeFrequency } from '@shared/engine/target';
 import type { BankLine } from '@shared/schemas/rail.schema';
-import type { Plane, PlaneGeometry, RailSpec } from '@shared/schemas/rail-spec.schema';
+import type { BandBasis, Plane, PlaneGeometry, RailSpec } from '@shared/schemas/rail-spec.schema';
 
 export interface DemoLine extends Omit<BankLine, 'partId'> {
   partNumber: string;
@@ -39,6 +40,12 @@ function plane(length_mm: number, width_mm: number, spacing_mm: number, resistan
   };
 }
 
+/** A band with what it was found from, as the specification form makes it. */
+const derivedBand = (band_basis: BandBasis): Pick<RailSpec, 'band_Hz' | 'band_basis'> => ({
+  band_Hz: [band_basis.regulator_bandwidth_Hz, kneeFrequency(band_basis.rise_s, band_basis.knee)],
+  band_basis,
+});
+
 const line = (
   partNumber: string,
   count: number,
@@ -61,8 +68,7 @@ export const demoRails: DemoRail[] = [
       name: 'VDD_CORE',
       voltage_V: 0.85,
       target: { kind: 'step', ripple_percent: 3, step_A: 10 },
-      band_Hz: [10e3, 12e6],
-      band_basis: { rise_s: 29e-9, knee: 0.35, regulator_bandwidth_Hz: 10e3 },
+      ...derivedBand({ rise_s: 35e-9, knee: 0.35, regulator_bandwidth_Hz: 10e3 }),
       source: {
         kind: 'damped',
         series_resistance_ohm: 0.0004,
@@ -74,7 +80,7 @@ export const demoRails: DemoRail[] = [
       },
       plane: plane(52, 40, 0.1, 0.0006),
       observe: 'pins',
-      load_step: { before_A: 2, step_A: 10, rise_s: 29e-9, hold_s: 60e-6, fall_s: 29e-9 },
+      load_step: { before_A: 2, step_A: 10, rise_s: 35e-9, hold_s: 60e-6, fall_s: 35e-9 },
     },
     candidates: [
       'AB-P7343-470U-2V5-6M',
@@ -111,9 +117,9 @@ export const demoRails: DemoRail[] = [
       name: 'VDD_DDR',
       voltage_V: 1.1,
       target: { kind: 'flat', impedance_ohm: 0.009 },
-      band_Hz: [10e3, 20e6],
+      band_Hz: [10e3, 28e6],
       source: { kind: 'rl', resistance_ohm: 0.0009, inductance_H: 12e-9 },
-      plane: plane(46, 28, 0.1, 0.0008),
+      plane: plane(46, 28, 0.2, 0.0008),
       package: {
         resistance_ohm: 0.004,
         inductance_H: 60e-12,
@@ -134,9 +140,9 @@ export const demoRails: DemoRail[] = [
       name: 'VDD_IO',
       voltage_V: 1.8,
       target: { kind: 'step', ripple_percent: 5, step_A: 3 },
-      band_Hz: [10e3, 25e6],
+      band_Hz: [10e3, 30e6],
       source: { kind: 'rl', resistance_ohm: 0.002, inductance_H: 40e-9 },
-      plane: plane(60, 44, 0.2, 0.001),
+      plane: plane(60, 44, 0.4, 0.001),
       observe: 'pins',
     },
     bank: [
