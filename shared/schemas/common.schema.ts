@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import './plain-messages';
 
 export const idSchema = z.uuid();
 export const isoDateSchema = z.iso.datetime();

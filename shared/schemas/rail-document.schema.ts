@@ -27,7 +27,10 @@ export type DocumentPart = z.infer<typeof documentPartSchema>;
 
 export const documentLineSchema = z.strictObject({
   part: z.string().min(1),
-  count: z.int('count must be a whole number').min(1, 'count must be at least 1').max(100_000),
+  count: z
+    .int('count must be a whole number')
+    .min(1, 'count must be at least 1')
+    .max(100_000, 'count must be at most 100 000'),
   /** Mounting inductance of this line, instead of the part's own. */
   mount_H: notNegative.optional(),
   /** Farthest distance to the load; with the plane's geometry it gives the path inductance. */

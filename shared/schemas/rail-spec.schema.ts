@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import './plain-messages';
 
 /** Finite numbers only (zod refuses NaN and infinities); the ranges keep typing slips out, not real designs. */
 const positive = (what: string, max = 1e15) =>

@@ -7,7 +7,10 @@ import { railSpecSchema } from './rail-spec.schema';
 /** One row of a bank: a part, how many, how mounted, how far from the load. */
 export const bankLineSchema = z.strictObject({
   partId: idSchema,
-  count: z.int('count must be a whole number').min(0, 'count must not be negative').max(9999),
+  count: z
+    .int('count must be a whole number')
+    .min(0, 'count must not be negative')
+    .max(9999, 'count must be at most 9999'),
   /** Mounting inductance in henry; null: the part's usual mount. */
   mount_H: z.number().min(0).max(1).nullable().default(null),
   /** Farthest distance to the load in metres; null: not planned yet. */
