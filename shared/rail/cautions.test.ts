@@ -49,6 +49,22 @@ describe('railCautions', () => {
     ]);
   });
 
+  it('asks for soft terminations only where a part has none', () => {
+    const large = { technology: 'ceramic', case: '1210', dielectric: 'C0G' };
+    const text = (parts: DocumentPart[]) =>
+      railCautions({ rail, parts, bank: parts.map((one) => ({ part: one.id, count: 1 })) }).find(
+        (one) => one.kind === 'cracks',
+      )?.text;
+    const hard = part('HARD', { ...large, termination: 'standard' });
+    const soft = part('SOFT', { ...large, termination: 'soft' });
+    expect(text([hard])).toBe(
+      'HARD: keep from edges, score lines, connectors and screws, or choose a part with soft terminations.',
+    );
+    expect(text([soft])).toMatch(/^SOFT: soft terminations bear more bending; keep it from edges/);
+    expect(text([hard, soft])).toMatch(/^HARD: keep .* SOFT: soft terminations bear/);
+    expect(text([part('UNSAID', large)])).toContain('choose a part with soft terminations');
+  });
+
   it('tells Class II from Class I and finds parts rated below the rail', () => {
     expect(kinds([part('A', { technology: 'ceramic', dielectric: 'X7R' })])).toContain('losses');
     expect(kinds([part('A', { technology: 'ceramic', dielectric: 'C0G' })])).not.toContain('losses');

@@ -19,10 +19,29 @@ const CLASS_I = /^(C0G|COG|NP0|U2J|C0H|U1)/i;
 export const isLargeCeramic = (part: Pick<DocumentPart, 'technology' | 'case'>): boolean =>
   part.technology === 'ceramic' && /^\d{4}$/.test(part.case ?? '') && Number(part.case) >= 1206;
 
+/** Soft terminations take up more of the bending before the ceramic cracks; they do not rule cracks out. */
+export const hasSoftTermination = (part: Pick<DocumentPart, 'termination'>): boolean =>
+  part.termination === 'soft';
+
 export const isPolarised = (part: Pick<DocumentPart, 'technology'>): boolean =>
   POLARISED.has(part.technology ?? '');
 
 const names = (parts: readonly DocumentPart[]) => parts.map((part) => part.id).join(', ');
+
+const KEEP = 'from edges, score lines, connectors and screws';
+
+function bendingText(large: readonly DocumentPart[]): string {
+  const soft = large.filter(hasSoftTermination);
+  const hard = large.filter((part) => !hasSoftTermination(part));
+  const sentences: string[] = [];
+  if (hard.length > 0)
+    sentences.push(`${names(hard)}: keep ${KEEP}, or choose a part with soft terminations.`);
+  if (soft.length > 0)
+    sentences.push(
+      `${names(soft)}: soft terminations bear more bending; keep ${soft.length > 1 ? 'them' : 'it'} ${KEEP} all the same.`,
+    );
+  return sentences.join(' ');
+}
 
 /** The parts that the bank really uses, each with its count. */
 function used(document: Pick<RailDocument, 'parts' | 'bank'>): { part: DocumentPart; count: number }[] {
@@ -61,7 +80,7 @@ export function railCautions(document: Pick<RailDocument, 'rail' | 'parts' | 'ba
     cautions.push({
       kind: 'cracks',
       title: 'large ceramics crack when the board bends',
-      text: `${names(large)}: keep from edges, score lines, connectors and screws, or use soft terminations.`,
+      text: bendingText(large),
     });
   const polarised = parts.filter(isPolarised);
   if (polarised.length > 0)

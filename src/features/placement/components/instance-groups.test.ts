@@ -14,7 +14,7 @@ const instance = (designator: string, partNumber: string) => ({
   farthest_m: null,
   farthestReason: null,
 });
-const part = (id: string, technology: string, caseSize: string) => ({
+const part = (id: string, technology: string, caseSize: string, termination?: 'soft') => ({
   id,
   capacitance_F: 1e-6,
   esr_ohm: 0.01,
@@ -22,6 +22,7 @@ const part = (id: string, technology: string, caseSize: string) => ({
   mount_H: 0,
   technology,
   case: caseSize,
+  ...(termination && { termination }),
 });
 const rail = (railId: string, parts: ReturnType<typeof part>[], placed: string[]): RevisionRail => ({
   railId,
@@ -56,7 +57,15 @@ const rail = (railId: string, parts: ReturnType<typeof part>[], placed: string[]
 describe('placement by rail', () => {
   const results = [
     rail('one', [part('BIG', 'ceramic', '1210'), part('IDLE', 'ceramic', '2220')], ['BIG', 'BIG']),
-    rail('two', [part('BIG', 'ceramic', '1210'), part('POL', 'polymer', '7343')], ['POL']),
+    rail(
+      'two',
+      [
+        part('BIG', 'ceramic', '1210'),
+        part('SOFT', 'ceramic', '1210', 'soft'),
+        part('POL', 'polymer', '7343'),
+      ],
+      ['POL', 'SOFT'],
+    ),
     rail('three', [], []),
   ];
 
@@ -65,7 +74,7 @@ describe('placement by rail', () => {
   });
 
   it('names each part to be careful with once, and only parts that are placed', () => {
-    expect(layoutCautions(results)).toEqual({ cracks: ['BIG'], polarised: ['POL'] });
+    expect(layoutCautions(results)).toEqual({ cracks: ['BIG'], bends: ['SOFT'], polarised: ['POL'] });
   });
 
   it('says a remark once only where it holds for all', () => {

@@ -1,4 +1,4 @@
-import { isLargeCeramic, isPolarised } from '@shared/rail/cautions';
+import { hasSoftTermination, isLargeCeramic, isPolarised } from '@shared/rail/cautions';
 import type { Instance, RevisionRail } from '@shared/schemas/revision.schema';
 
 export interface RailGroup {
@@ -26,8 +26,9 @@ export function sharedReason({ instances }: Pick<RailGroup, 'instances'>): strin
 }
 
 export interface LayoutCautions {
-  /** Part numbers of large ceramics with an ordinary termination. */
+  /** Part numbers of large ceramics without soft terminations, and of those with. */
   cracks: string[];
+  bends: string[];
   polarised: string[];
 }
 
@@ -35,9 +36,11 @@ export interface LayoutCautions {
 export function layoutCautions(results: readonly RevisionRail[]): LayoutCautions {
   const placed = new Set(results.flatMap(({ instances }) => instances.map((one) => one.partNumber)));
   const parts = results.flatMap(({ document }) => document.parts).filter((part) => placed.has(part.id));
+  const large = parts.filter((part) => isLargeCeramic(part));
   const unique = (ids: string[]) => [...new Set(ids)].sort();
   return {
-    cracks: unique(parts.filter((part) => isLargeCeramic(part)).map((part) => part.id)),
+    cracks: unique(large.filter((part) => !hasSoftTermination(part)).map((part) => part.id)),
+    bends: unique(large.filter(hasSoftTermination).map((part) => part.id)),
     polarised: unique(parts.filter((part) => isPolarised(part)).map((part) => part.id)),
   };
 }

@@ -2,14 +2,17 @@ import { Notice } from '@/components/ui/notice';
 import type { LayoutCautions } from './instance-groups';
 
 /** What to mind while placing, only where it applies. */
-export function LayoutNotes({ cautions: { cracks, polarised } }: { cautions: LayoutCautions }) {
-  if (cracks.length === 0 && polarised.length === 0) return null;
+export function LayoutNotes({ cautions: { cracks, bends, polarised } }: { cautions: LayoutCautions }) {
+  const large = [...cracks, ...bends];
+  if (large.length === 0 && polarised.length === 0) return null;
   return (
     <div className="grid max-w-5xl gap-x-10 gap-y-3 md:grid-cols-2">
-      {cracks.length > 0 && (
+      {large.length > 0 && (
         <Notice tone="caution" title="! large ceramics crack when the board bends">
-          Keep {cracks.join(', ')} from board edges, score lines, connectors and screws; lay them along the
+          Keep {large.join(', ')} from board edges, score lines, connectors and screws; lay them along the
           bend, not across it.
+          {bends.length > 0 &&
+            ` Of these, ${bends.join(', ')} ${bends.length > 1 ? 'have' : 'has'} soft terminations and ${bends.length > 1 ? 'bear' : 'bears'} more bending.`}
         </Notice>
       )}
       {polarised.length > 0 && (

@@ -27,7 +27,7 @@ export function PlacementPage({ boardName, revisions, detail, csvHref, onChoose 
   return (
     <Page
       title="Placement"
-      lead="Where each capacitor goes, and how far from its load it may sit before the rail is short, all others as planned."
+      lead="Where each capacitor goes, and the farthest distance from its load: how far out all capacitors of its bank line may sit together before the rail is short, every other line where it is planned."
       actions={
         <a href={csvHref} download className={DOWNLOAD}>
           Download revision {detail.letter} as CSV
