@@ -110,3 +110,51 @@ test('cuts a revision with a note', async ({ page }) => {
   await page.getByRole('link', { name: 'Revisions' }).last().click();
   await expect(page.getByRole('link', { name: 'revision C' })).toBeVisible();
 });
+
+test('zooms into the chart and back, strips and labels along with it', async ({ page }) => {
+  await openBench(page, 'VDD_IO');
+  const plot = page.locator('.js-plotly-plot .nsewdrag');
+  await expect(plot).toBeAttached();
+  const box = await plot.boundingBox();
+  if (!box) throw new Error('the plot has no place');
+  const label = page.getByText('100 MHz', { exact: true });
+  await expect(label).toBeVisible();
+  await page.mouse.move(box.x + 0.4 * box.width, box.y + 100);
+  await page.mouse.down();
+  await page.mouse.move(box.x + 0.7 * box.width, box.y + 105, { steps: 6 });
+  await page.mouse.up();
+  await expect(label).toBeHidden();
+  await expect(page.getByText('1 MHz', { exact: true })).toBeVisible();
+  await page.waitForTimeout(400);
+  await page.mouse.dblclick(box.x + 0.5 * box.width, box.y + 100);
+  await expect(label).toBeVisible();
+  const range = await page.evaluate(
+    () =>
+      (document.querySelector('.js-plotly-plot') as unknown as { layout: { xaxis: { range: number[] } } })
+        .layout.xaxis.range,
+  );
+  expect(range).toEqual([4, 8]);
+});
+
+test('marks a search as outdated when a distance changes, and does not let it be adopted', async ({
+  page,
+}) => {
+  await openBench(page, 'VDD_IO');
+  await page.getByRole('button', { name: 'Search the smallest mix' }).click();
+  await expect(page.getByText(/possible, proven/)).toBeVisible({ timeout: 30_000 });
+  await page.locator('[data-row]').first().click();
+  await page.getByLabel('distance to the load').fill('5m');
+  await page.keyboard.press('Enter');
+  await expect(page.getByText('at most 1000 mm')).toBeVisible();
+  await page.getByLabel('distance to the load').fill('33');
+  await page.keyboard.press('Enter');
+  await expect(page.getByText('! outdated')).toBeVisible();
+  await expect(page.getByRole('button', { name: 'Preview the mix' })).toHaveCount(0);
+  await page.getByRole('button', { name: 'Search again' }).click();
+  await expect(page.getByText('! outdated')).toHaveCount(0);
+  await expect(page.getByRole('button', { name: 'Preview the mix' })).toBeVisible({ timeout: 30_000 });
+  await page.getByRole('button', { name: 'Dismiss' }).click();
+  await page.getByLabel('each at most').fill('2.5');
+  await expect(page.getByText('a whole number, 1 to 999')).toBeVisible();
+  await expect(page.getByRole('button', { name: 'Search the smallest mix' })).toBeDisabled();
+});

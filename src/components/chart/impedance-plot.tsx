@@ -18,8 +18,8 @@ interface ImpedancePlotProps {
   curves: readonly PlotCurve[];
   /** The waterline at the total's frequencies, NaN outside the band: where the total lies above, the gap is filled. */
   target_ohm: Float64Array | null;
-  /** A stretch of the axis was dragged over. */
-  onZoom: (span_Hz: [number, number]) => void;
+  /** A stretch of the axis was dragged over, or (null) double-clicked: the whole again. */
+  onZoom: (span_Hz: [number, number] | null) => void;
 }
 
 /** Room in px at the left for the scale's numbers and at the bottom for those of the frequency axis. */
@@ -84,6 +84,7 @@ export default function ImpedancePlot({ x, y, curves, target_ohm, onZoom }: Impe
       data={data}
       layout={layout}
       config={config}
+      onDoubleClick={() => onZoom(null)}
       onRelayout={(event: Readonly<Record<string, unknown>>) => {
         const range = event['xaxis.range'];
         const [from, to] = Array.isArray(range) ? range : [event['xaxis.range[0]'], event['xaxis.range[1]']];

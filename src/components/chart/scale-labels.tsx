@@ -9,10 +9,10 @@ function decades(low: number, high: number): number[] {
   return found;
 }
 
-/** Labels for an axis: its decades, or, zoomed to less than one, its two ends. */
+/** Labels for an axis: its decades, and zoomed to less than two of them its two ends. */
 function labelled(low: number, high: number): number[] {
   const inside = decades(low, high);
-  return inside.length >= 2 ? inside : [low, high];
+  return inside.length >= 2 ? inside : [...new Set([low, ...inside, high])];
 }
 
 /** Labels of the impedance scale: decades, and where fewer than three of them show, 2 and 5 of each as well. */

@@ -1,4 +1,4 @@
-import { formatInput } from '@shared/units/format';
+import { formatInput, formatLength, formatQuantity } from '@shared/units/format';
 import { type Parsed, parseLength, parseQuantity } from '@shared/units/parse';
 import type { UnitSymbol } from '@shared/units/quantity';
 import { type InputHTMLAttributes, useState } from 'react';
@@ -43,13 +43,31 @@ interface QuantityInputProps extends Base {
   onCommit: (value: number | null) => void;
   /** Says under the field what was not understood, where there is room for it. */
   showFault?: boolean;
+  /** Largest value that may be committed, in base units; none below zero ever may. */
+  most?: number;
+}
+
+function withinLimits(parsed: Parsed, unit: UnitSymbol, most: number | undefined): Parsed {
+  if (!parsed.ok) return parsed;
+  if (parsed.value < 0) return { ok: false, reason: 'must not be negative' };
+  if (most === undefined || parsed.value <= most) return parsed;
+  const limit = unit === 'mm' ? formatLength(most) : formatQuantity(most, unit, { trim: true });
+  return { ok: false, reason: `at most ${limit}` };
 }
 
 /** A quantity edited in place: commits on Enter or blur, Escape puts the old value back, what is wrong stays and says so. */
-export function QuantityInput({ unit, value, onCommit, showFault = false, ...rest }: QuantityInputProps) {
+export function QuantityInput({
+  unit,
+  value,
+  onCommit,
+  showFault = false,
+  most,
+  ...rest
+}: QuantityInputProps) {
   const [draft, setDraft] = useState<string | null>(null);
   const shown = draft ?? (value === null ? '' : writeQuantity(value, unit));
-  const parsed: Parsed | null = draft === null || draft.trim() === '' ? null : readQuantity(draft, unit);
+  const parsed: Parsed | null =
+    draft === null || draft.trim() === '' ? null : withinLimits(readQuantity(draft, unit), unit, most);
   const commit = () => {
     if (draft === null) return;
     if (draft.trim() === '') onCommit(null);

@@ -1,9 +1,9 @@
-import { newPartDistance_m, railDocument } from '@shared/rail/document';
+import { newPartDistance_m } from '@shared/rail/document';
 import type { Part } from '@shared/schemas/part.schema';
 import type { RailWithParts } from '@shared/schemas/rail.schema';
 import { useQuery } from '@tanstack/react-query';
 import type { BenchAnalysis } from '@workers/analysis/analysis.interface';
-import { type ReactNode, useCallback, useEffect, useMemo, useRef, useState } from 'react';
+import { type ReactNode, useEffect, useMemo, useRef, useState } from 'react';
 import { Button } from '@/components/ui/button';
 import { Notice } from '@/components/ui/notice';
 import { Section } from '@/components/ui/page';
@@ -12,10 +12,10 @@ import { candidatesQuery } from '../api/part-choice';
 import { useAnalysis } from '../hooks/use-analysis';
 import { useBench } from '../hooks/use-bench';
 import { useBenchKeys } from '../hooks/use-bench-keys';
-import { mixIn, useMixSearch } from '../hooks/use-mix-search';
-import { type DraftLine, isSameLine, keyed } from '../lib/bank-history';
+import { mixIn, proofText, useMixSearch } from '../hooks/use-mix-search';
+import { type DraftLine, isSameLine, keyed, savedBank } from '../lib/bank-history';
 import { benchCautions } from '../lib/cautions';
-import { bankOfMix } from '../lib/mix';
+import { bankOfMix, searchQuestion } from '../lib/mix';
 import { BenchFacts } from './bench-facts';
 import { PartPicker } from './part-picker';
 import { ConflictDialog, SaveStatus } from './save-status';
@@ -43,6 +43,7 @@ export function Bench({ server, personId, canEdit, editTo, onSaved, onResult, re
   const [picking, setPicking] = useState(false);
   const [showLines, setShowLines] = useState(true);
   const [previewing, setPreviewing] = useState(false);
+  const [adopted, setAdopted] = useState<{ bank: string; text: string } | null>(null);
   const [zoom, setZoom] = useState<[number, number] | null>(null);
   const whole = useMemo(() => chartSpan(spec.band_Hz), [spec.band_Hz]);
   const candidates = useQuery(candidatesQuery(spec.voltage_V));
@@ -76,12 +77,20 @@ export function Bench({ server, personId, canEdit, editTo, onSaved, onResult, re
     [isPreview, bench.lines],
   );
 
-  const startSearch = useCallback(() => {
-    if (!candidates.data || candidates.data.length === 0 || !canEdit) return;
-    const ids = bench.search.candidateIds ?? candidates.data.map((part) => part.id);
+  const question = useMemo(() => {
+    const all = candidates.data;
+    if (!all || all.length === 0 || !canEdit) return null;
+    const candidateIds = bench.search.candidateIds ?? all.map((part) => part.id);
+    return searchQuestion(spec, bench.lines, known, { ...bench.search, candidateIds });
+  }, [candidates.data, canEdit, bench.search, bench.lines, known, spec]);
+  const asked = useMemo(() => JSON.stringify(question), [question]);
+  const outdated = search.state.kind !== 'idle' && search.question !== null && search.question !== asked;
+  const startSearch = () => {
+    if (!question) return;
     setPreviewing(false);
-    void search.start(railDocument(spec, bench.lines, known, { ...bench.search, candidateIds: ids }));
-  }, [candidates.data, canEdit, bench.search, bench.lines, known, spec, search.start]);
+    setAdopted(null);
+    void search.start(question);
+  };
 
   const addPart = (part: Part) => {
     bench.learn([part]);
@@ -108,6 +117,10 @@ export function Bench({ server, personId, canEdit, editTo, onSaved, onResult, re
     if (!mixLines) return;
     bench.learn(mixLines.flatMap((line) => known.get(line.partId) ?? []));
     bench.edit({ type: 'replace', lines: mixLines });
+    setAdopted({
+      bank: JSON.stringify(savedBank(mixLines)),
+      text: proofText(search.state, bench.search.minimise),
+    });
     setPreviewing(false);
     search.reset();
   };
@@ -118,11 +131,17 @@ export function Bench({ server, personId, canEdit, editTo, onSaved, onResult, re
     add: () => canEdit && setPicking(true),
     lines: () => setShowLines((on) => !on),
   });
-  const cautions = benchCautions(spec, shownLines, known, shown.analysis?.cavity_Hz ?? []);
+  const cautions = benchCautions(spec, shownLines, known, shown.analysis);
   return (
     <div className="flex min-w-0 flex-col xl:flex-row">
       {renderStatus(<SaveStatus save={bench.save} />)}
-      <ConflictDialog save={bench.save} onSettle={bench.settle} />
+      <ConflictDialog
+        save={bench.save}
+        personId={personId}
+        lines={bench.lines}
+        parts={known}
+        onSettle={bench.settle}
+      />
       <div className="min-w-0 flex-1 py-5 pr-5 pl-6">
         {isPreview && (
           <p className="mb-3 border-l-2 border-deep pl-3">
@@ -197,6 +216,8 @@ export function Bench({ server, personId, canEdit, editTo, onSaved, onResult, re
                 state={search.state}
                 locked={bench.lines.reduce((sum, line) => (line.locked ? sum + line.count : sum), 0)}
                 previewing={isPreview}
+                outdated={outdated}
+                adopted={adopted?.bank === JSON.stringify(savedBank(bench.lines)) ? adopted.text : null}
                 readOnly={!canEdit}
                 onSettings={bench.setSearch}
                 onSearch={startSearch}

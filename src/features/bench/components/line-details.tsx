@@ -8,6 +8,7 @@ import { Checkbox, Select } from '@/components/ui/input';
 import { QuantityInput } from '@/components/ui/quantity-input';
 import { paths } from '@/config/paths';
 import type { DraftLine } from '../lib/bank-history';
+import { MOST_DISTANCE_M, MOST_MOUNT_H } from '../lib/limits';
 
 interface LineDetailsProps {
   line: DraftLine;
@@ -36,6 +37,8 @@ export function LineDetails({ line, part, onChange, onRemove }: LineDetailsProps
             <QuantityInput
               {...control}
               unit="H"
+              showFault
+              most={MOST_MOUNT_H}
               value={line.mount_H}
               placeholder={formatQuantity(part.mount_H, 'H')}
               onCommit={(mount_H) => change({ mount_H })}
@@ -47,6 +50,8 @@ export function LineDetails({ line, part, onChange, onRemove }: LineDetailsProps
             <QuantityInput
               {...control}
               unit="mm"
+              showFault
+              most={MOST_DISTANCE_M}
               value={line.distance_m}
               placeholder="not planned"
               onCommit={(distance_m) => change({ distance_m })}

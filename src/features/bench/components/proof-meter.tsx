@@ -18,7 +18,9 @@ export function ProofMeter({ objective, weight, lowerBound, proven }: ProofMeter
         <dt>{proven ? 'smallest mix' : 'best so far'}</dt>
         <dd className="text-right font-semibold">{weightText(objective, weight)}</dd>
         <dt>proven at least</dt>
-        <dd className="text-right">{boundText(objective, lowerBound)}</dd>
+        <dd className="text-right">
+          {proven ? weightText(objective, weight) : boundText(objective, lowerBound)}
+        </dd>
       </dl>
       <div
         role="meter"

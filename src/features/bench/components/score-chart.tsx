@@ -37,13 +37,7 @@ export function ScoreChart({
   summary,
 }: ScoreChartProps) {
   return (
-    <div
-      className="relative"
-      style={{ height: y.height + TOP + 26 }}
-      role="img"
-      aria-label={summary}
-      onDoubleClick={() => onZoom(null)}
-    >
+    <div className="relative" style={{ height: y.height + TOP + 26 }} role="img" aria-label={summary}>
       <div className="absolute top-0" style={{ left: -SCALE }}>
         {x.width > 0 && (
           <Suspense fallback={<p className="p-20 text-stone">fetching the chart …</p>}>

@@ -1,15 +1,17 @@
 import type { Part } from '@shared/schemas/part.schema';
 import type { SearchSettings } from '@shared/schemas/rail.schema';
-import { formatDecibel, formatLength, formatQuantity } from '@shared/units/format';
+import { formatDecibel, formatLength } from '@shared/units/format';
 import { useState } from 'react';
 import { Button } from '@/components/ui/button';
 import { Field } from '@/components/ui/field';
-import { Input, Select } from '@/components/ui/input';
+import { Select } from '@/components/ui/input';
 import { Notice } from '@/components/ui/notice';
 import { QuantityInput } from '@/components/ui/quantity-input';
-import { type MixSearchState, mixIn } from '../hooks/use-mix-search';
+import { LEAST, type MixSearchState, mixIn } from '../hooks/use-mix-search';
+import { MOST_DISTANCE_M } from '../lib/limits';
 import { CandidatesDialog } from './candidates-dialog';
 import { ProofMeter } from './proof-meter';
+import { WholeField } from './whole-field';
 
 interface SearchPanelProps {
   settings: SearchSettings;
@@ -21,6 +23,10 @@ interface SearchPanelProps {
   /** Capacitors on locked lines: they stay and are not counted in the mix. */
   locked: number;
   previewing: boolean;
+  /** The rail, a mount, a distance, a lock or a limit has changed since: the answer is to another question. */
+  outdated: boolean;
+  /** What was adopted, while the bank is still that. */
+  adopted: string | null;
   readOnly: boolean;
   onSettings: (settings: SearchSettings) => void;
   onSearch: () => void;
@@ -34,6 +40,7 @@ interface SearchPanelProps {
 export function SearchPanel(props: SearchPanelProps) {
   const { settings, candidates, state, previewing, readOnly } = props;
   const [choosing, setChoosing] = useState(false);
+  const [faulty, setFaulty] = useState(false);
   const running = state.kind === 'running';
   const mix = mixIn(state);
   const among = settings.candidateIds?.length ?? candidates?.length ?? 0;
@@ -45,6 +52,7 @@ export function SearchPanel(props: SearchPanelProps) {
             settings={settings}
             newPartDistance_m={props.newPartDistance_m}
             onSettings={props.onSettings}
+            onFault={setFaulty}
           />
           <button
             type="button"
@@ -58,6 +66,12 @@ export function SearchPanel(props: SearchPanelProps) {
         </>
       )}
       <Outcome state={state} objective={settings.minimise} locked={props.locked} />
+      {props.outdated && (
+        <Notice tone="caution" title="! outdated">
+          The rail, a mount, a distance or a limit has changed since this search began. Search again.
+        </Notice>
+      )}
+      {props.adopted && <p className="text-reed">▽ the bank is the mix found: {props.adopted}</p>}
       {state.kind === 'failed' && <Notice tone="error">{state.message}</Notice>}
       {props.candidatesError && <Notice tone="error">{props.candidatesError}</Notice>}
       {candidates?.length === 0 && (
@@ -67,14 +81,14 @@ export function SearchPanel(props: SearchPanelProps) {
       )}
       <div className="flex flex-wrap gap-2">
         {running && <Button onClick={props.onStop}>Stop</Button>}
-        {!running && mix && !previewing && (
+        {!running && mix && !previewing && !props.outdated && (
           <Button variant="primary" onClick={() => props.onPreview(true)}>
             Preview the mix
           </Button>
         )}
         {previewing && (
           <>
-            {!readOnly && (
+            {!readOnly && !props.outdated && (
               <Button variant="primary" onClick={props.onAdopt}>
                 Adopt
               </Button>
@@ -82,13 +96,18 @@ export function SearchPanel(props: SearchPanelProps) {
             <Button onClick={() => props.onPreview(false)}>Back to the bank</Button>
           </>
         )}
+        {!running && props.outdated && (
+          <Button variant="primary" disabled={!candidates} onClick={props.onSearch}>
+            Search again
+          </Button>
+        )}
         {!running && state.kind !== 'idle' && !previewing && (
           <Button onClick={props.onDismiss}>Dismiss</Button>
         )}
         {(state.kind === 'idle' || state.kind === 'failed') && (
           <Button
             variant="primary"
-            disabled={!candidates || candidates.length === 0}
+            disabled={!candidates || candidates.length === 0 || faulty}
             onClick={props.onSearch}
           >
             Search the smallest mix
@@ -124,7 +143,6 @@ function Outcome({
     return (
       <Notice tone="caution" title={state.result.impossible ? '▲ no mix can hold' : '! none found'}>
         {state.result.reason}
-        {state.result.frequency_Hz !== null && ` (${formatQuantity(state.result.frequency_Hz, 'Hz')})`}
       </Notice>
     );
   if (state.kind === 'done' && state.result.found) {
@@ -171,20 +189,22 @@ function Outcome({
   return null;
 }
 
-const LEAST = { parts: 'fewest', cost: 'cheapest', area: 'smallest area' } as const;
-
 function SettingsForm({
   settings,
   newPartDistance_m,
   onSettings,
+  onFault,
 }: {
   settings: SearchSettings;
   newPartDistance_m: number | null;
   onSettings: (settings: SearchSettings) => void;
+  onFault: (faulty: boolean) => void;
 }) {
-  const whole = (text: string, most: number) => {
-    const value = Number(text);
-    return /^\d+$/.test(text) && value >= 1 && value <= most ? value : null;
+  const [faults, setFaults] = useState<Record<string, boolean>>({});
+  const tellFault = (field: string, faulty: boolean) => {
+    const next = { ...faults, [field]: faulty };
+    setFaults(next);
+    onFault(Object.values(next).some(Boolean));
   };
   return (
     <div className="grid grid-cols-2 gap-3">
@@ -205,32 +225,21 @@ function SettingsForm({
           )}
         </Field>
       </div>
-      <Field label="kinds at most">
-        {(control) => (
-          <Input
-            {...control}
-            inputMode="numeric"
-            placeholder="any"
-            defaultValue={settings.max_kinds ?? ''}
-            onChange={(event) =>
-              onSettings({ ...settings, max_kinds: whole(event.target.value.trim(), 100) })
-            }
-          />
-        )}
-      </Field>
-      <Field label="each at most">
-        {(control) => (
-          <Input
-            {...control}
-            inputMode="numeric"
-            defaultValue={settings.max_per_part}
-            onChange={(event) => {
-              const max_per_part = whole(event.target.value.trim(), 999);
-              if (max_per_part !== null) onSettings({ ...settings, max_per_part });
-            }}
-          />
-        )}
-      </Field>
+      <WholeField
+        label="kinds at most"
+        value={settings.max_kinds}
+        most={100}
+        emptyMeans="any"
+        onChange={(max_kinds) => onSettings({ ...settings, max_kinds })}
+        onFault={(faulty) => tellFault('kinds', faulty)}
+      />
+      <WholeField
+        label="each at most"
+        value={settings.max_per_part}
+        most={999}
+        onChange={(max_per_part) => max_per_part !== null && onSettings({ ...settings, max_per_part })}
+        onFault={(faulty) => tellFault('each', faulty)}
+      />
       <div className="col-span-2">
         <Field
           label="new parts at a distance of"
@@ -240,6 +249,8 @@ function SettingsForm({
             <QuantityInput
               {...control}
               unit="mm"
+              showFault
+              most={MOST_DISTANCE_M}
               value={settings.distance_m}
               placeholder={
                 newPartDistance_m === null

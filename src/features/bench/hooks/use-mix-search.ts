@@ -1,7 +1,8 @@
 import type { RailDocument } from '@shared/schemas/rail-document.schema';
-import type { MixEntry, SearchProgress, SearchResult } from '@shared/search/problem';
+import type { MixEntry, Objective, SearchProgress, SearchResult } from '@shared/search/problem';
 import { SearchClient } from '@workers/search/search.client';
 import { useCallback, useEffect, useRef, useState } from 'react';
+import { boundText, weightText } from '../lib/mix';
 
 export type MixSearchState =
   | { kind: 'idle' }
@@ -15,12 +16,17 @@ const client = new SearchClient();
 /** Long enough for most banks to be proven; the best mix and its bound stand when it ends. */
 export const SEARCH_SECONDS = 120;
 
-/** Runs the mix search in its worker. The mix that stands so far is in the state's progress or result. */
+/**
+ * Runs the mix search in its worker. The mix that stands so far is in the state's progress or result; `question` is what it
+ * was asked, so that an answer to another question is not taken for one to this.
+ */
 export function useMixSearch() {
   const [state, setState] = useState<MixSearchState>({ kind: 'idle' });
+  const [question, setQuestion] = useState<string | null>(null);
   const run = useRef(0);
   const start = useCallback(async (document: RailDocument) => {
     const mine = ++run.current;
+    setQuestion(JSON.stringify(document));
     setState({ kind: 'running', progress: null });
     let last: SearchProgress | null = null;
     // Progress comes over a port of its own and may arrive after the answer: then it says nothing new.
@@ -49,7 +55,7 @@ export function useMixSearch() {
     },
     [],
   );
-  return { state, start, stop, reset };
+  return { state, question, start, stop, reset };
 }
 
 /** The mix that stands in a state, if there is one. */
@@ -58,3 +64,14 @@ export function mixIn(state: MixSearchState): MixEntry[] | null {
   if (state.kind === 'done') return state.result.mix;
   return null;
 }
+
+/** What a search has shown, for beside a bank that was made from it. */
+export function proofText(state: MixSearchState, objective: Objective): string {
+  if (state.kind !== 'done' || !state.result.found) return 'stopped before a proof';
+  const { proven, weight, lowerBound } = state.result;
+  return proven
+    ? `${weightText(objective, weight)}, ${LEAST[objective]} possible, proven`
+    : `${weightText(objective, weight)}, proven at least ${boundText(objective, lowerBound)}`;
+}
+
+export const LEAST: Record<Objective, string> = { parts: 'fewest', cost: 'cheapest', area: 'smallest area' };

@@ -4,6 +4,7 @@ import type { Part } from '@shared/schemas/part.schema';
 import type { BankLine } from '@shared/schemas/rail.schema';
 import type { RailSpec } from '@shared/schemas/rail-spec.schema';
 import { formatQuantity } from '@shared/units/format';
+import type { BenchAnalysis } from '@workers/analysis/analysis.interface';
 
 type Shown = Pick<Caution, 'title' | 'text'>;
 
@@ -12,7 +13,7 @@ export function benchCautions(
   spec: RailSpec,
   lines: readonly BankLine[],
   parts: ReadonlyMap<string, Part>,
-  cavity_Hz: readonly number[],
+  analysis: Pick<BenchAnalysis, 'cavity_Hz' | 'extrapolated'> | null,
 ): Shown[] {
   const cautions: Shown[] = railCautions(railDocument(spec, lines, parts));
   const used = lines.filter((line) => line.count > 0).flatMap((line) => parts.get(line.partId) ?? []);
@@ -24,7 +25,12 @@ export function benchCautions(
         .map((part) => `${part.partNumber} is ${part.state === 'draft' ? 'a draft' : 'retired'}`)
         .join('; '),
     });
-  const inBand = cavity_Hz.filter((f) => f <= spec.band_Hz[1]);
+  if (analysis?.extrapolated)
+    cautions.push({
+      title: 'the source’s table ends inside the chart',
+      text: 'Beyond its ends the table goes on as the series R–L–C that fits it best: measure further before trusting that stretch.',
+    });
+  const inBand = (analysis?.cavity_Hz ?? []).filter((f) => f <= spec.band_Hz[1]);
   if (inBand.length > 0)
     cautions.push({
       title: 'plane cavity in the band',

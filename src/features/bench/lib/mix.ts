@@ -1,4 +1,8 @@
+import { railDocument } from '@shared/rail/document';
 import type { Part } from '@shared/schemas/part.schema';
+import type { SearchSettings } from '@shared/schemas/rail.schema';
+import type { RailDocument } from '@shared/schemas/rail-document.schema';
+import type { RailSpec } from '@shared/schemas/rail-spec.schema';
 import type { MixEntry, Objective } from '@shared/search/problem';
 import { formatQuantity } from '@shared/units/format';
 import { formatCost } from '@/lib/format-cost';
@@ -33,13 +37,29 @@ export function bankOfMix(
 export function weightText(objective: Objective, weight: number | null): string {
   if (weight === null || !Number.isFinite(weight)) return '—';
   if (objective === 'parts') return `${Math.round(weight)} part${Math.round(weight) === 1 ? '' : 's'}`;
-  if (objective === 'cost') return formatCost(weight);
+  if (objective === 'cost') return formatCost(weight, 3);
   return formatQuantity(weight, 'mm²');
 }
 
 /** A bound is never shown higher than it is: rounded down to the digits shown. */
 export function boundText(objective: Objective, bound: number): string {
   if (objective === 'parts') return weightText('parts', Math.ceil(bound - 1e-9));
-  const step = objective === 'cost' ? 100 : 10;
+  const step = objective === 'cost' ? 1000 : 10;
   return weightText(objective, Math.floor(bound * step + 1e-9) / step);
+}
+
+/**
+ * What a search is asked: the rail, its locked lines, the candidates and how each is mounted. Counts of lines that are not
+ * locked do not matter to it, so changing one leaves an answer as true as it was.
+ */
+export function searchQuestion(
+  spec: RailSpec,
+  lines: readonly DraftLine[],
+  parts: ReadonlyMap<string, Part>,
+  search: SearchSettings,
+): RailDocument {
+  const asked = lines
+    .filter((line) => !line.locked || line.count > 0)
+    .map((line) => (line.locked ? line : { ...line, count: 1 }));
+  return railDocument(spec, asked, parts, search);
 }

@@ -116,7 +116,7 @@ describe('saving a rail', () => {
     const { it: one, states } = saver(send);
     one.edit(line(2));
     await vi.advanceTimersByTimeAsync(400);
-    expect(states.at(-1)).toMatchObject({ kind: 'conflict', changedBy: 'Ines' });
+    expect(states.at(-1)).toMatchObject({ kind: 'conflict', changedBy: { name: 'Ines' } });
     one.edit(line(3));
     await vi.advanceTimersByTimeAsync(5000);
     expect(send).toHaveBeenCalledTimes(1);

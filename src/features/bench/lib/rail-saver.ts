@@ -1,3 +1,4 @@
+import { personRefSchema } from '@shared/schemas/common.schema';
 import type { BankLine, RailWithParts, SearchSettings } from '@shared/schemas/rail.schema';
 import { railWithPartsSchema } from '@shared/schemas/rail.schema';
 import { ApiError, messageOf, NetworkError } from '@/lib/problem';
@@ -16,7 +17,13 @@ export type SaveState =
   /** The session has ended: the edit waits until one has signed in again. */
   | { kind: 'signed-out' }
   | { kind: 'refused'; message: string }
-  | { kind: 'conflict'; current: RailWithParts; changedBy: string; changedAt: string };
+  | {
+      kind: 'conflict';
+      current: RailWithParts;
+      /** null: not known any more. */
+      changedBy: { id: string; name: string } | null;
+      changedAt: string;
+    };
 
 interface Stored {
   version: number;
@@ -162,7 +169,10 @@ export class RailSaver {
         this.setState({
           kind: 'conflict',
           current: current.data,
-          changedBy: nameIn(error.problem.changedBy),
+          changedBy: personRefSchema
+            .nullable()
+            .catch(null)
+            .parse(error.problem.changedBy ?? null),
           changedAt: String(error.problem.changedAt ?? current.data.rail.updatedAt),
         });
       else this.setState({ kind: 'refused', message: messageOf(error) });
@@ -186,10 +196,4 @@ export class RailSaver {
     this.state = state;
     if (!this.disposed) this.parts.onState(state);
   }
-}
-
-function nameIn(value: unknown): string {
-  if (typeof value === 'string') return value;
-  if (value && typeof value === 'object' && 'name' in value) return String(value.name);
-  return 'somebody else';
 }
