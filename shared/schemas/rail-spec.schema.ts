@@ -140,6 +140,18 @@ export const railSpecSchema = z
     load_step: loadStepSchema.optional(),
   })
   .superRefine((rail, ctx) => {
+    const basis = rail.band_basis;
+    if (basis) {
+      const expected = [basis.regulator_bandwidth_Hz, basis.knee / basis.rise_s];
+      expected.forEach((f, i) => {
+        if (Math.abs(rail.band_Hz[i] / f - 1) > 1e-6)
+          ctx.addIssue({
+            code: 'custom',
+            path: ['band_Hz', i],
+            message: `does not agree with band_basis, which gives ${f} Hz`,
+          });
+      });
+    }
     if (rail.observe === 'die' && !rail.package)
       ctx.addIssue({
         code: 'custom',

@@ -42,7 +42,7 @@ export const ShareStrip = memo(function ShareStrip({
         className={tone === 'source' ? 'fill-shallow' : 'fill-deep'}
         fillOpacity={tone === 'source' ? 1 : 0.88}
       />
-      <path d={caps(axis, frequency_Hz, share)} className="stroke-kingfisher" strokeWidth="3" fill="none" />
+      <path d={caps(axis, frequency_Hz, share)} className="stroke-brass" strokeWidth="3" fill="none" />
       {ghost && (
         <path
           d={outline(axis, ghost.frequency_Hz, ghost.share)}
