@@ -18,6 +18,9 @@ interface BoardRow {
   hold: number | null;
   short: number | null;
   changed: number | null;
+  /** Rails of the latest revision, and how many of them are still here. */
+  cut: number | null;
+  kept: number | null;
   letter: string | null;
   cutAt: string | null;
 }
@@ -26,12 +29,13 @@ interface BoardRow {
 const summarySql = (visible: string, page: string) => `
   SELECT b.id, b.name, b.description, b.owner_id AS ownerId, o.name AS ownerName, b.version,
     b.created_at AS createdAt, b.updated_at AS updatedAt, m.role AS myRole,
-    r.total, r.hold, r.short, r.changed, v.letter, v.created_at AS cutAt
+    r.total, r.hold, r.short, r.changed, r.kept, v.rails_total AS cut, v.letter, v.created_at AS cutAt
   FROM (SELECT * FROM board b WHERE ${visible} ${page}) b
   JOIN person o ON o.id = b.owner_id
   LEFT JOIN board_member m ON m.board_id = b.id AND m.person_id = ?
   LEFT JOIN (
-    SELECT board_id, count(*) AS total, sum(holds = 1) AS hold, sum(holds = 0) AS short, sum(changed) AS changed
+    SELECT board_id, count(*) AS total, sum(holds = 1) AS hold, sum(holds = 0) AS short,
+      sum(document_hash IS NOT cut_hash) AS changed, count(cut_hash) AS kept
     FROM rail GROUP BY board_id
   ) r ON r.board_id = b.id
   LEFT JOIN revision v ON v.board_id = b.id
@@ -56,7 +60,7 @@ function summaryOf(actor: Actor, row: BoardRow): BoardSummary {
     rights,
     rails: { total, hold, short, unknown: total - hold - short },
     latestRevision: row.letter && row.cutAt ? { letter: row.letter, createdAt: row.cutAt } : null,
-    changedRails: row.changed ?? 0,
+    changedRails: (row.changed ?? 0) + (row.cut ?? 0) - (row.kept ?? 0),
   };
 }
 

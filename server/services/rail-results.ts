@@ -8,15 +8,17 @@ import type { Context } from '../context';
 import { RailEntity } from '../db/entities/rail.entity';
 import { RailPartEntity } from '../db/entities/rail-part.entity';
 import { partsById } from '../db/repositories/part.repository';
+import { documentHash } from './document-hash';
 
-/** The stored result of a rail, with its verdict in a column of its own for lists that count. */
+/** The stored result of a rail, with its verdict and its document's hash in columns of their own for lists that count. */
 export function railResult(
   spec: RailSpec,
   bank: readonly BankLine[],
   parts: ReadonlyMap<string, Part>,
-): { summary: RailSummary; holds: boolean | null } {
-  const summary = summariseRail(railDocument(spec, [...bank], parts));
-  return { summary, holds: summary.holds };
+): { summary: RailSummary; holds: boolean | null; documentHash: string } {
+  const document = railDocument(spec, bank, parts);
+  const summary = summariseRail(document);
+  return { summary, holds: summary.holds, documentHash: documentHash(document) };
 }
 
 /** A changed part changes the results of every rail that uses it, not their versions: nobody's edit gets stale. */
@@ -31,10 +33,6 @@ export async function refreshRailsUsing(ctx: Context, manager: EntityManager, pa
     rails.flatMap((rail) => rail.bank.map((line) => line.partId)),
   );
   for (const rail of rails)
-    await manager.update(
-      RailEntity,
-      { id: rail.id },
-      { ...railResult(rail.spec, rail.bank, parts), changed: true },
-    );
+    await manager.update(RailEntity, { id: rail.id }, railResult(rail.spec, rail.bank, parts));
   ctx.log.info({ partId, rails: rails.length }, 'results renewed for a changed part');
 }

@@ -90,7 +90,7 @@ export async function updateRail(
     await manager.update(
       RailEntity,
       { id: railId },
-      { ...stored, version: rail.version + 1, changed: true, updatedAt: now, updatedById: actor.id },
+      { ...stored, version: rail.version + 1, updatedAt: now, updatedById: actor.id },
     );
     await storeUsedParts(manager, railId, bank);
     await touchBoard(manager, boardId, now);

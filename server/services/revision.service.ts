@@ -104,7 +104,7 @@ export async function storeRevision(
     ...revisionTotals(rails),
     ...sealed,
   });
-  await manager.update(RailEntity, { boardId }, { changed: false });
+  await manager.update(RailEntity, { boardId }, { cutHash: () => 'document_hash' });
   return letter;
 }
 

@@ -37,7 +37,7 @@ export const boardSummarySchema = z.object({
   rights: boardRightsSchema,
   rails: z.object({ total: z.int(), hold: z.int(), short: z.int(), unknown: z.int() }),
   latestRevision: z.object({ letter: z.string(), createdAt: isoDateSchema }).nullable(),
-  /** Rails changed since the latest revision was cut (all of them, when there is none). */
+  /** Rails that differ from the latest revision, new and deleted ones included (all of them, when there is none). */
   changedRails: z.int(),
 });
 export type BoardSummary = z.infer<typeof boardSummarySchema>;

@@ -2,7 +2,7 @@ import { boardDetailSchema, boardPageSchema } from '@shared/schemas/board.schema
 import { afterEach, beforeEach, describe, expect, it } from 'vitest';
 import { PersonEntity } from '../../server/db/entities/person.entity';
 import { type Caller, openTestApp, type TestApp } from '../helpers/app';
-import { DEMO_BOARD, OTHER_BOARD, people } from '../helpers/people';
+import { DEMO_BOARD, OTHER_BOARD, people, railId } from '../helpers/people';
 import { railBody } from '../helpers/rail-body';
 
 let t: TestApp;
@@ -100,6 +100,34 @@ describe('a board', () => {
     expect(await changed()).toBe(1);
     await owner.post(`/boards/${DEMO_BOARD}/revisions`, { note: 'With the new rail' }).expect(201);
     expect(await changed()).toBe(0);
+  });
+
+  it('does not count an edit that is undone, and counts a deleted rail', async () => {
+    const address = `/boards/${DEMO_BOARD}/rails/${railId('VDD_IO')}`;
+    const changed = async () => (await owner.get(`/boards/${DEMO_BOARD}`)).body.changedRails;
+    const { rail } = (await owner.get(address).expect(200)).body;
+    await owner.patch(address, { version: 1, bank: [] }).expect(200);
+    expect(await changed()).toBe(1);
+    await owner.patch(address, { version: 2, bank: rail.bank }).expect(200);
+    expect(await changed()).toBe(0);
+    await owner.patch(address, { version: 3, search: { max_per_part: 7 } }).expect(200);
+    expect(await changed()).toBe(0);
+    await owner.delete(`${address}?version=4`).expect(204);
+    expect(await changed()).toBe(1);
+    await owner.post(`/boards/${DEMO_BOARD}/revisions`, { note: 'Without it' }).expect(201);
+    expect(await changed()).toBe(0);
+  });
+
+  it('knows what has changed also in a database that recorded saves only', async () => {
+    const changed = async () => (await owner.get(`/boards/${DEMO_BOARD}`)).body.changedRails;
+    await owner
+      .patch(`/boards/${DEMO_BOARD}/rails/${railId('VDD_IO')}`, { version: 1, bank: [] })
+      .expect(200);
+    await owner.delete(`/boards/${DEMO_BOARD}/rails/${railId('VDD_AUX')}?version=1`).expect(204);
+    expect(await changed()).toBe(2);
+    await t.ctx.db.dataSource.undoLastMigration();
+    await t.ctx.db.dataSource.runMigrations();
+    expect(await changed()).toBe(2);
   });
 
   it('says which fields are wrong', async () => {

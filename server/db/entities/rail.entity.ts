@@ -36,8 +36,9 @@ export class RailEntity {
   @Column({ type: 'simple-json' }) summary!: RailSummary;
   /** The summary's own answer again, so that board lists can count without reading it. */
   @Column({ type: 'boolean', nullable: true }) holds!: boolean | null;
-  /** Differs from what the latest revision holds. */
-  @Column({ type: 'boolean', default: true }) changed!: boolean;
+  /** Of the rail's document as it stands, and as the latest revision holds it (null: it does not). */
+  @Column({ name: 'document_hash', type: 'text', default: '' }) documentHash!: string;
+  @Column({ name: 'cut_hash', type: 'text', nullable: true }) cutHash!: string | null;
   @Column({ type: 'integer', default: 1 }) version!: number;
   @Column({ name: 'created_at', type: 'text' }) createdAt!: string;
   @Column({ name: 'updated_at', type: 'text' }) updatedAt!: string;

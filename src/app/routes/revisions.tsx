@@ -17,7 +17,7 @@ export function Component() {
   return (
     <RevisionsPage
       board={board.data}
-      rails={rails.data.rails}
+      rails={rails.data}
       onCut={(letter) => navigate(paths.revision(boardId, letter))}
     />
   );

@@ -18,8 +18,7 @@ const HEAD = (
 );
 
 function changedText({ latestRevision, changedRails, rails }: BoardSummary): string {
-  if (rails.total === 0) return '—';
-  if (!latestRevision) return 'never cut';
+  if (!latestRevision) return rails.total === 0 ? '—' : 'never cut';
   return changedRails === 0 ? 'nothing' : `${changedRails} ${changedRails === 1 ? 'rail' : 'rails'}`;
 }
 

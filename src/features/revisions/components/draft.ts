@@ -1,14 +1,21 @@
-import type { Rail } from '@shared/schemas/rail.schema';
+import { canonicalJson } from '@shared/formats/canonical-json';
+import { railDocument } from '@shared/rail/document';
+import type { RailList } from '@shared/schemas/rail.schema';
+import type { RailDocument } from '@shared/schemas/rail-document.schema';
+import type { RevisionDetail } from '@shared/schemas/revision.schema';
 
-/** The board as it stands, against its latest revision. */
+/** The board as it stands, against its latest revision; rails by name. */
 export interface Draft {
   total: number;
   latest: string | null;
   next: string;
-  /** Rails that a person edited since the latest revision, by name. */
+  added: string[];
+  /** Specification or bank differ. */
   edited: string[];
-  /** Rails whose results changed because a part they use was changed. */
-  byParts: number;
+  /** Only the data of parts that they use differ. */
+  byParts: string[];
+  /** In the revision, and no longer on the board. */
+  deleted: string[];
   short: string[];
 }
 
@@ -26,18 +33,33 @@ export function nextLetter(letter: string | null): string {
   return `A${digits.join('')}`;
 }
 
-export function draftOf(
-  rails: readonly Rail[],
-  latest: { letter: string; createdAt: string } | null,
-  changedRails: number,
-): Draft {
-  const edited = latest ? rails.filter((rail) => rail.updatedAt > latest.createdAt) : [];
-  return {
+type Latest = Pick<RevisionDetail, 'letter'> & {
+  railResults: readonly Pick<RevisionDetail['railResults'][number], 'railId' | 'document'>[];
+};
+
+const own = ({ rail, bank }: RailDocument): string => canonicalJson({ rail, bank });
+
+/** Compares what the rails say, not when they were saved: an edit that was taken back is none. */
+export function draftOf({ rails, parts }: RailList, latest: Latest | null): Draft {
+  const byId = new Map(parts.map((part) => [part.id, part]));
+  const here = new Set(rails.map((rail) => rail.id));
+  const cut = new Map(latest?.railResults.map(({ railId, document }) => [railId, document]));
+  const draft: Draft = {
     total: rails.length,
     latest: latest?.letter ?? null,
     next: nextLetter(latest?.letter ?? null),
-    edited: edited.map((rail) => rail.spec.name),
-    byParts: latest ? Math.max(0, changedRails - edited.length) : 0,
+    added: [],
+    edited: [],
+    byParts: [],
+    deleted: [...cut].filter(([id]) => !here.has(id)).map(([, document]) => document.rail.name),
     short: rails.filter((rail) => rail.summary.holds === false).map((rail) => rail.spec.name),
   };
+  for (const { id, spec, bank } of rails) {
+    const now = railDocument(spec, bank, byId);
+    const then = cut.get(id);
+    if (!then) draft.added.push(spec.name);
+    else if (own(now) !== own(then)) draft.edited.push(spec.name);
+    else if (canonicalJson(now) !== canonicalJson(then)) draft.byParts.push(spec.name);
+  }
+  return draft;
 }

@@ -1,8 +1,9 @@
 import type { BoardDetail } from '@shared/schemas/board.schema';
-import type { Rail } from '@shared/schemas/rail.schema';
+import type { RailList } from '@shared/schemas/rail.schema';
 import { Failure } from '@/components/ui/failure';
 import { EmptyState, Loading, Page, Section } from '@/components/ui/page';
 import { usePageTitle } from '@/lib/use-page-title';
+import { useRevision } from '../api/revision';
 import { useRevisions } from '../api/revisions';
 import { CutRevisionForm } from './cut-revision-form';
 import { draftOf } from './draft';
@@ -10,8 +11,22 @@ import { RevisionsTable } from './revisions-table';
 
 interface Props {
   board: BoardDetail;
-  rails: readonly Rail[];
+  rails: RailList;
   onCut: (letter: string) => void;
+}
+
+/** The form that cuts, once it is known what the latest revision holds. */
+function DraftForm({
+  boardId,
+  rails,
+  letter,
+  onCut,
+}: Pick<Props, 'rails' | 'onCut'> & { boardId: string; letter: string | undefined }) {
+  const latest = useRevision(boardId, letter);
+  if (latest.isError)
+    return <Failure error={latest.error} what={`revision ${letter}`} retry={() => latest.refetch()} />;
+  if (letter !== undefined && !latest.data) return <Loading what={`revision ${letter}`} />;
+  return <CutRevisionForm boardId={boardId} draft={draftOf(rails, latest.data ?? null)} onCut={onCut} />;
 }
 
 export function RevisionsPage({ board, rails, onCut }: Props) {
@@ -21,15 +36,15 @@ export function RevisionsPage({ board, rails, onCut }: Props) {
   if (revisions.isError)
     return <Failure error={revisions.error} what="the revisions" retry={() => revisions.refetch()} />;
   const { items } = revisions.data;
-  const draft = draftOf(rails, items[0] ?? null, board.changedRails);
+  const latest = items[0]?.letter;
   return (
     <Page
       title="Revisions"
       lead="Fixed states of the board: what was planned, with which parts, and what came of it."
     >
       {board.rights.edit && (
-        <Section title={`the draft${draft.latest ? ` after ${draft.latest}` : ''}`}>
-          <CutRevisionForm boardId={board.id} draft={draft} onCut={onCut} />
+        <Section title={`the draft${latest ? ` after ${latest}` : ''}`}>
+          <DraftForm boardId={board.id} rails={rails} letter={latest} onCut={onCut} />
         </Section>
       )}
       {items.length === 0 ? (
