@@ -2,12 +2,20 @@ import { isRouteErrorResponse, useRouteError } from 'react-router-dom';
 import { Button, ButtonLink } from '@/components/ui/button';
 import { Notice } from '@/components/ui/notice';
 import { paths } from '@/config/paths';
-import { messageOf } from '@/lib/problem';
+import { messageOf, NetworkError } from '@/lib/problem';
+
+/** A page's module that did not arrive; each browser says it in its own words. */
+const NOT_FETCHED = /dynamically imported module|importing a module script/i;
+
+function textOf(error: unknown): string {
+  if (isRouteErrorResponse(error)) return `${error.status} ${error.statusText}`;
+  if (error instanceof Error && NOT_FETCHED.test(error.message)) return messageOf(new NetworkError());
+  return messageOf(error);
+}
 
 /** What is shown when a page itself fails: what happened, and two ways out. */
 export function RouteError() {
   const error = useRouteError();
-  const message = isRouteErrorResponse(error) ? `${error.status} ${error.statusText}` : messageOf(error);
   return (
     <div className="p-6">
       <Notice
@@ -22,7 +30,7 @@ export function RouteError() {
           </div>
         }
       >
-        {message}
+        {textOf(error)}
       </Notice>
     </div>
   );

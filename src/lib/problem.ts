@@ -26,6 +26,13 @@ export class NetworkError extends Error {
   }
 }
 
+/** What was asked for is not there, or not for this person: asking again does not help. */
+export const isGone = (error: unknown): boolean => error instanceof ApiError && error.status === 404;
+
+/** The problem in a few words; `otherwise` where the server did not say it. */
+export const titleOf = (error: unknown, otherwise: string): string =>
+  error instanceof ApiError ? error.problem.title : otherwise;
+
 export async function problemOf(response: Response): Promise<ApiError> {
   const body: unknown = await response.json().catch(() => null);
   const parsed = problemSchema.safeParse(body);

@@ -73,5 +73,7 @@ test('two people on one rail: the later save is told who changed it, and may put
 test('a stranger gets the same answer for a board that is not theirs as for none', async ({ page }) => {
   await signIn(page, demoEmail('librarian'));
   await page.goto('/boards/00000000-0000-4000-8000-000000000000');
-  await expect(page.getByText(/could not be fetched/)).toBeVisible();
+  await expect(page.getByText('the board is not here')).toBeVisible();
+  await page.getByRole('link', { name: 'All boards' }).click();
+  await expect(page.getByRole('heading', { name: 'Boards' })).toBeVisible();
 });

@@ -2,6 +2,7 @@ import { useQuery } from '@tanstack/react-query';
 import { Link, useLocation, useParams } from 'react-router-dom';
 import { paths } from '@/config/paths';
 import { boardQuery } from '@/features/boards/api/boards';
+import { peoplePageTitle } from '@/features/boards/components/role-words';
 import { partQuery } from '@/features/parts/api/part';
 import { railsQuery } from '@/features/rails/api/rails';
 
@@ -14,6 +15,9 @@ const PAGES: Record<string, string> = {
   account: 'Account',
   specification: 'Specification',
 };
+
+/** A step before the last: a long name must not push the page's own off. */
+const STEP = 'max-w-[24ch] truncate text-stone';
 
 interface Crumb {
   text: string;
@@ -41,6 +45,8 @@ export function Breadcrumbs() {
   if (pathname.startsWith('/parts')) crumbs.push({ text: 'Parts', to: paths.parts() });
   else if (boardId && pathname.includes('/revisions'))
     crumbs.push({ text: 'Revisions', to: paths.revisions(boardId) });
+  else if (boardId && last === 'people')
+    crumbs.push({ text: peoplePageTitle(board.data?.rights.manage ?? false) });
   else if (PAGES[last]) crumbs.push({ text: PAGES[last] });
   if (letter) crumbs.push({ text: letter });
   if (partId) crumbs.push({ text: part.data?.partNumber ?? '…' });
@@ -53,7 +59,7 @@ export function Breadcrumbs() {
           return (
             <li
               key={crumb.to ?? crumb.text}
-              className={`flex items-center gap-2 ${isLast ? 'truncate' : 'hidden sm:flex'}`}
+              className={`items-center gap-2 ${isLast ? 'flex min-w-0' : 'hidden shrink-0 sm:flex'}`}
             >
               {i > 0 && (
                 <span aria-hidden className="hidden text-stone sm:inline">
@@ -63,12 +69,17 @@ export function Breadcrumbs() {
               {isLast || !crumb.to ? (
                 <span
                   aria-current={isLast ? 'page' : undefined}
-                  className={isLast ? 'truncate font-bold' : 'text-stone'}
+                  title={crumb.text}
+                  className={isLast ? 'truncate font-bold' : STEP}
                 >
                   {crumb.text}
                 </span>
               ) : (
-                <Link to={crumb.to} className="text-stone underline-offset-4 hover:underline">
+                <Link
+                  to={crumb.to}
+                  title={crumb.text}
+                  className={`${STEP} underline-offset-4 hover:underline`}
+                >
                   {crumb.text}
                 </Link>
               )}

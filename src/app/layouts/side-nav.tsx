@@ -4,6 +4,7 @@ import { NavLink, useParams } from 'react-router-dom';
 import { HeadroomSign } from '@/components/ui/headroom-sign';
 import { paths } from '@/config/paths';
 import { boardQuery } from '@/features/boards/api/boards';
+import { peoplePageTitle } from '@/features/boards/components/role-words';
 import { railsQuery } from '@/features/rails/api/rails';
 import { useSession } from '@/features/session/api/session';
 import { cx } from '@/lib/class-names';
@@ -49,7 +50,9 @@ export function SideNav() {
           <Group title="rails">
             {rails.data?.rails.map((rail) => (
               <Item key={rail.id} to={paths.bench(boardId, rail.id)}>
-                <span className="truncate">{rail.spec.name}</span>
+                <span className="min-w-0 truncate" title={rail.spec.name}>
+                  {rail.spec.name}
+                </span>
                 <HeadroomSign
                   holds={rail.summary.holds}
                   headroom_dB={rail.summary.tightest?.headroom_dB ?? null}
@@ -69,7 +72,7 @@ export function SideNav() {
             </Item>
             <Item to={paths.revisions(boardId)}>Revisions</Item>
             <Item to={paths.placement(boardId)}>Placement</Item>
-            <Item to={paths.boardPeople(boardId)}>People</Item>
+            <Item to={paths.boardPeople(boardId)}>{peoplePageTitle(board.data.rights.manage)}</Item>
           </Group>
         </>
       )}

@@ -7,6 +7,7 @@ import { Bench } from '@/features/bench/components/bench';
 import { useBoard } from '@/features/boards/api/boards';
 import { cacheRail, cacheResult, useRail } from '@/features/rails/api/rails';
 import { useSession } from '@/features/session/api/session';
+import { isGone } from '@/lib/problem';
 import { HeaderStatus } from '../layouts/status-slot';
 
 export function Component() {
@@ -15,10 +16,17 @@ export function Component() {
   const { data: session } = useSession();
   const board = useBoard(boardId);
   const rail = useRail(boardId, railId);
-  if (rail.isError && !rail.data)
-    return <Failure error={rail.error} what="the rail" retry={() => void rail.refetch()} />;
   if (board.isError && !board.data)
     return <Failure error={board.error} what="the board" retry={() => void board.refetch()} />;
+  if (rail.isError && (!rail.data || isGone(rail.error)))
+    return (
+      <Failure
+        error={rail.error}
+        what="the rail"
+        retry={() => void rail.refetch()}
+        back={{ to: paths.board(boardId), text: 'To the board' }}
+      />
+    );
   if (!rail.data || !board.data || !session) return <Loading what="the rail" />;
   const { latestRevision, rights } = board.data;
   return (

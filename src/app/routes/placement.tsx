@@ -38,7 +38,14 @@ export function Component() {
   if (letter === undefined)
     return <NoRevision boardId={boardId} boardName={board.data.name} mayCut={board.data.rights.edit} />;
   if (detail.isError)
-    return <Failure error={detail.error} what={`revision ${letter}`} retry={() => detail.refetch()} />;
+    return (
+      <Failure
+        error={detail.error}
+        what={`revision ${letter}`}
+        retry={() => detail.refetch()}
+        back={{ to: paths.revisions(boardId), text: 'To the revisions' }}
+      />
+    );
   if (detail.isPending) return <Loading what={`revision ${letter}`} />;
   return (
     <PlacementPage

@@ -1,10 +1,10 @@
-import { formatFixed } from '@shared/units/format';
+import { formatDecibel, formatFixed } from '@shared/units/format';
 import { cx } from '@/lib/class-names';
 
 interface Props {
   holds: boolean | null;
   headroom_dB: number | null;
-  /** With words: “holds by 2.4 dB”, “short by 0.3 dB”. */
+  /** With words, “holds by 2.4 dB”, “short by 0.3 dB”, instead of the signed headroom, “+2.4 dB”, “−0.3 dB”. */
   words?: boolean;
   className?: string;
 }
@@ -15,12 +15,18 @@ export function HeadroomSign({ holds, headroom_dB, words = false, className }: P
     return <span className={cx('text-stone', className)}>– no result</span>;
   const size = Math.abs(headroom_dB);
   // A rail that holds by a hair should not read as holding by nothing.
-  const decibels = formatFixed(size, size < 0.095 ? 2 : 1);
+  const decimals = size < 0.095 ? 2 : 1;
   return (
     <span className={cx('whitespace-nowrap', holds ? 'text-reed' : 'text-kingfisher', className)}>
       <span aria-hidden>{holds ? '▽' : '▲'} </span>
-      <span className={words ? undefined : 'sr-only'}>{holds ? 'holds by' : 'short by'} </span>
-      {decibels} dB
+      {words ? (
+        `${holds ? 'holds by' : 'short by'} ${formatFixed(size, decimals)} dB`
+      ) : (
+        <>
+          <span className="sr-only">{holds ? 'holds, ' : 'short, '}</span>
+          {formatDecibel(headroom_dB, decimals)}
+        </>
+      )}
     </span>
   );
 }

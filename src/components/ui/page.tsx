@@ -18,9 +18,9 @@ export function Page({
   return (
     <div className={cx('flex flex-col gap-6 px-6 py-6', narrow && 'max-w-3xl')}>
       <div className="flex flex-wrap items-start justify-between gap-4">
-        <div>
-          <h1 className="text-large font-semibold">{title}</h1>
-          {lead && <div className="mt-1 max-w-prose text-stone">{lead}</div>}
+        <div className="min-w-0">
+          <h1 className="text-large font-semibold wrap-anywhere">{title}</h1>
+          {lead && <div className="mt-1 max-w-prose text-stone wrap-anywhere">{lead}</div>}
         </div>
         {actions && <div className="flex flex-wrap items-center gap-3">{actions}</div>}
       </div>

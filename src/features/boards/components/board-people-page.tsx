@@ -7,12 +7,13 @@ import { AddMember } from './add-member';
 import { BoardSettings } from './board-settings';
 import { DeleteBoard } from './delete-board';
 import { MembersTable } from './members-table';
-import { myRoleText, ROLE_RIGHTS, ROLES } from './role-words';
+import { myRoleText, peoplePageTitle, ROLE_RIGHTS, ROLES } from './role-words';
 
 /** Who is on the board; for its owner also its name, description and end. */
 export function BoardPeoplePage({ boardId, onDeleted }: { boardId: string; onDeleted: () => void }) {
   const query = useBoard(boardId);
-  usePageTitle('People', query.data?.name);
+  const title = peoplePageTitle(query.data?.rights.manage ?? false);
+  usePageTitle(title, query.data?.name);
   if (query.isPending) return <Loading what="the board’s people" />;
   if (query.isError)
     return <Failure error={query.error} what="the board’s people" retry={() => query.refetch()} />;
@@ -20,7 +21,7 @@ export function BoardPeoplePage({ boardId, onDeleted }: { boardId: string; onDel
   const { manage } = board.rights;
   return (
     <Page
-      title="People"
+      title={title}
       lead={
         manage
           ? 'You own this board and choose who is on it.'

@@ -2,6 +2,7 @@ import { useState } from 'react';
 import { Button } from '@/components/ui/button';
 import { Failure } from '@/components/ui/failure';
 import { Loading, Page, Section } from '@/components/ui/page';
+import { paths } from '@/config/paths';
 import { usePageTitle } from '@/lib/use-page-title';
 import { usePart } from '../api/part';
 import { EditPart } from './edit-part';
@@ -21,7 +22,15 @@ export function PartPage({ partId, mayAdd, isLibrarian }: Props) {
   const [isEditing, setEditing] = useState(false);
   usePageTitle(query.data?.partNumber ?? 'Part');
   if (query.isPending) return <Loading what="the part" />;
-  if (query.isError) return <Failure error={query.error} what="the part" retry={() => query.refetch()} />;
+  if (query.isError)
+    return (
+      <Failure
+        error={query.error}
+        what="the part"
+        retry={() => query.refetch()}
+        back={{ to: paths.parts(), text: 'All parts' }}
+      />
+    );
   const part = query.data;
   const mayEdit = isLibrarian || (mayAdd && part.state === 'draft');
   if (isEditing)

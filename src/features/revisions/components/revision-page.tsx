@@ -44,12 +44,19 @@ export function RevisionPage({ boardId, letter }: { boardId: string; letter: str
   usePageTitle(`Revision ${letter}`, query.data?.boardName);
   if (query.isPending) return <Loading what={`revision ${letter}`} />;
   if (query.isError)
-    return <Failure error={query.error} what={`revision ${letter}`} retry={() => query.refetch()} />;
+    return (
+      <Failure
+        error={query.error}
+        what={`revision ${letter}`}
+        retry={() => query.refetch()}
+        back={{ to: paths.revisions(boardId), text: 'To the revisions' }}
+      />
+    );
   const revision = query.data;
   return (
     <Page
       title={`${revision.boardName}, revision ${letter}`}
-      lead={<p className="whitespace-pre-wrap text-ink">{revision.note}</p>}
+      lead={<p className="whitespace-pre-wrap text-ink wrap-anywhere">{revision.note}</p>}
       actions={<ButtonLink to={paths.placement(boardId, letter)}>Placement list</ButtonLink>}
     >
       <p className="border-l-2 border-shallow pl-3 text-stone">

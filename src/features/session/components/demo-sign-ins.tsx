@@ -1,5 +1,5 @@
 import { Notice } from '@/components/ui/notice';
-import { messageOf } from '@/lib/problem';
+import { messageOf, titleOf } from '@/lib/problem';
 import { useSignIn, useSite } from '../api/session';
 
 /** While the demo runs: one press signs in as one of its people. */
@@ -31,7 +31,7 @@ export function DemoSignIns({ onSignedIn }: { onSignedIn: () => void }) {
         ))}
       </ul>
       {signIn.isError && (
-        <Notice tone="error" title="▲ not signed in" className="mt-3">
+        <Notice tone="error" title={`▲ ${titleOf(signIn.error, 'not signed in')}`} className="mt-3">
           {messageOf(signIn.error)}
         </Notice>
       )}

@@ -5,7 +5,7 @@ import { Button } from '@/components/ui/button';
 import { Field } from '@/components/ui/field';
 import { Input } from '@/components/ui/input';
 import { Notice } from '@/components/ui/notice';
-import { messageOf } from '@/lib/problem';
+import { messageOf, titleOf } from '@/lib/problem';
 import { useSignIn } from '../api/session';
 
 export function SignInForm({ email = '', onSignedIn }: { email?: string; onSignedIn: () => void }) {
@@ -32,7 +32,7 @@ export function SignInForm({ email = '', onSignedIn }: { email?: string; onSigne
         )}
       </Field>
       {signIn.isError && (
-        <Notice tone="error" title="▲ not signed in">
+        <Notice tone="error" title={`▲ ${titleOf(signIn.error, 'not signed in')}`}>
           {messageOf(signIn.error)}
         </Notice>
       )}
