@@ -43,6 +43,16 @@ describe('createReconnect', () => {
     expect(state).toMatchObject({ knocks: 1, resumed: 1 });
   });
 
+  it('does nothing any more once stopped, even with a knock under way', async () => {
+    const { state, reconnect } = setUp();
+    state.isThere = true;
+    reconnect.failed(new NetworkError());
+    reconnect.hint();
+    reconnect.stop();
+    await vi.advanceTimersByTimeAsync(60_000);
+    expect(state.resumed).toBe(0);
+  });
+
   it('leaves other errors and needless hints alone', async () => {
     const { state, reconnect } = setUp();
     reconnect.failed(new Error('refused'));

@@ -15,14 +15,19 @@ interface Waiting {
  */
 export function createReconnect({ resume, isThere }: Waiting) {
   let timer: ReturnType<typeof setTimeout> | undefined;
+  let isAsking = false;
+  let stopped = false;
   const wait = () => {
     timer = setTimeout(knock, EVERY_MS);
   };
   const knock = async () => {
-    if (await isThere()) {
-      timer = undefined;
-      resume();
-    } else wait();
+    isAsking = true;
+    const isBack = await isThere();
+    isAsking = false;
+    if (stopped) return;
+    if (!isBack) return wait();
+    timer = undefined;
+    resume();
   };
   return {
     failed(error: unknown): void {
@@ -30,9 +35,13 @@ export function createReconnect({ resume, isThere }: Waiting) {
     },
     /** The browser says that it is online again: no need to wait for the next knock. */
     hint(): void {
-      if (timer === undefined) return;
+      if (timer === undefined || isAsking) return;
       clearTimeout(timer);
       void knock();
+    },
+    stop(): void {
+      stopped = true;
+      clearTimeout(timer);
     },
   };
 }

@@ -21,6 +21,20 @@ test('an edit made without a connection waits, says so, and is sent when it is b
   await expect(page.getByTestId('parts-kinds')).not.toHaveText(before);
 });
 
+test('a page that needs the server says at once that it is away, and comes by itself when it is back', async ({
+  page,
+  context,
+}) => {
+  await signIn(page, demoEmail('engineer'));
+  await openBench(page, 'VDD_IO');
+  await context.setOffline(true);
+  await page.getByRole('link', { name: 'VDD_AUX' }).first().click();
+  await expect(page.getByText('the server cannot be reached')).toBeVisible({ timeout: 2000 });
+  await expect(page.getByRole('button', { name: 'Try again' })).toBeVisible();
+  await context.setOffline(false);
+  await expect(page.getByTestId('headroom')).toBeVisible();
+});
+
 test('when the session has ended one signs in on the spot and the edit is not lost', async ({
   page,
   context,

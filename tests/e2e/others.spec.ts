@@ -7,6 +7,11 @@ test('a reviewer sees board and revision and cannot change them', async ({ page 
   await expect(page.getByText('read only')).toBeVisible();
   await expect(page.getByRole('button', { name: '+ add a part' })).toHaveCount(0);
   await expect(page.getByRole('button', { name: /one .* more/ })).toHaveCount(0);
+  await page.goto(`${page.url()}/specification`);
+  await expect(page.getByText('Read only for you')).toBeVisible();
+  await expect(page.locator('form')).toHaveCount(0);
+  await page.getByRole('link', { name: 'Back to the bench' }).click();
+  await expect(page.getByTestId('headroom')).toBeVisible();
   await page.getByRole('link', { name: 'Revisions' }).first().click();
   await expect(page.getByRole('button', { name: /cut/i })).toHaveCount(0);
   await page.getByRole('link', { name: 'revision B' }).click();

@@ -8,6 +8,7 @@ import { useBoard } from '@/features/boards/api/boards';
 import { cacheRail, cacheResult, useRail } from '@/features/rails/api/rails';
 import { useSession } from '@/features/session/api/session';
 import { isGone } from '@/lib/problem';
+import { usePageTitle } from '@/lib/use-page-title';
 import { HeaderStatus } from '../layouts/status-slot';
 
 export function Component() {
@@ -16,6 +17,7 @@ export function Component() {
   const { data: session } = useSession();
   const board = useBoard(boardId);
   const rail = useRail(boardId, railId);
+  usePageTitle(rail.data?.rail.spec.name ?? 'Bench', board.data?.name);
   if (board.isError && !board.data)
     return <Failure error={board.error} what="the board" retry={() => void board.refetch()} />;
   if (rail.isError && (!rail.data || isGone(rail.error)))

@@ -7,11 +7,13 @@ import { useBoard } from '@/features/boards/api/boards';
 import { useRails } from '@/features/rails/api/rails';
 import { RailsTable } from '@/features/rails/components/rails-table';
 import { dayOf } from '@/lib/time';
+import { usePageTitle } from '@/lib/use-page-title';
 
 export function Component() {
   const { boardId = '' } = useParams();
   const board = useBoard(boardId);
   const rails = useRails(boardId);
+  usePageTitle(board.data?.name ?? 'Board');
   if (board.isError && !board.data)
     return <Failure error={board.error} what="the board" retry={() => void board.refetch()} />;
   if (rails.isError && !rails.data)

@@ -1,5 +1,5 @@
 import { paths } from '@/config/paths';
-import { isGone, messageOf } from '@/lib/problem';
+import { isGone, messageOf, NetworkError } from '@/lib/problem';
 import { Button, ButtonLink } from './button';
 import { Notice } from './notice';
 
@@ -35,6 +35,7 @@ export function Failure({ error, what, retry, back }: Props) {
         }
       >
         {messageOf(error)}
+        {error instanceof NetworkError && '; this page comes by itself when it can be again'}
         {gone && ' It has been deleted, or it is not open to you.'}
       </Notice>
     </div>

@@ -11,8 +11,10 @@ export function LayoutNotes({ cautions: { cracks, bends, polarised } }: { cautio
         <Notice tone="caution" title="! large ceramics crack when the board bends">
           Keep {large.join(', ')} from board edges, score lines, connectors and screws; lay them along the
           bend, not across it.
-          {bends.length > 0 &&
+          {cracks.length > 0 &&
+            bends.length > 0 &&
             ` Of these, ${bends.join(', ')} ${bends.length > 1 ? 'have' : 'has'} soft terminations and ${bends.length > 1 ? 'bear' : 'bears'} more bending.`}
+          {cracks.length === 0 && ' Their soft terminations bear more bending, not any amount.'}
         </Notice>
       )}
       {polarised.length > 0 && (

@@ -40,7 +40,11 @@ function GroupHead({ group, reason }: { group: RailGroup; reason: string | null 
   const isNone = group.instances.every((one) => one.farthest_m === null);
   return (
     <tr>
-      <th colSpan={COLUMNS} scope="rowgroup" className="border-b pt-5 pb-1 text-left font-semibold">
+      <th
+        colSpan={COLUMNS}
+        scope="rowgroup"
+        className="border-b pt-5 pb-1 text-left font-semibold wrap-anywhere"
+      >
         {group.rail}
         <span className="font-normal text-stone">
           {' '}
@@ -65,7 +69,9 @@ function Row({ one, reasonIsAbove, room }: { one: Instance; reasonIsAbove: boole
       <Td className="whitespace-nowrap">{one.value}</Td>
       <Td>{one.caseSize || '—'}</Td>
       <Td>{one.side}</Td>
-      <Td className="whitespace-nowrap text-stone">{one.rail}</Td>
+      <Td className="max-w-[20ch] truncate text-stone" title={one.rail}>
+        {one.rail}
+      </Td>
       <Td numeric>
         <Decimal value={one.mount_H} unit="H" fraction={room} />
       </Td>

@@ -15,8 +15,8 @@ export function SourceFields({ bind, planes }: { bind: SpecBinding; planes: stri
           label="output impedance"
           options={[
             ['rl', 'R and L in series'],
-            ['damped', 'damped (loop, then inductor)'],
-            ['table', 'table over frequency'],
+            ['damped', 'damped R and L'],
+            ['table', 'a table'],
             ['open', 'none'],
           ]}
         />

@@ -96,7 +96,7 @@ export function SpecGroup({
     <fieldset className="grid gap-x-8 gap-y-2 border-t py-5 md:grid-cols-[10rem_1fr]">
       <legend className="float-left font-semibold md:w-40">{title}</legend>
       <div className="flex flex-col gap-4">
-        <div className="grid grid-cols-1 gap-4 sm:grid-cols-2 lg:grid-cols-4">{children}</div>
+        <div className="grid grid-cols-1 gap-4 sm:grid-cols-2 xl:grid-cols-4">{children}</div>
         {result && (
           <output className="font-semibold text-deep" aria-live="polite">
             {result}

@@ -4,7 +4,7 @@ import { Button } from '@/components/ui/button';
 import { Field } from '@/components/ui/field';
 import { Input } from '@/components/ui/input';
 import { Notice } from '@/components/ui/notice';
-import { ApiError, messageOf } from '@/lib/problem';
+import { ApiError, isGone, messageOf } from '@/lib/problem';
 import {
   bandSentence,
   errorsAtFields,
@@ -23,12 +23,22 @@ interface SpecFormProps {
   pending: boolean;
   /** What the server said to the last try. */
   failure: unknown;
+  /** Where to go when the server says that there is no such thing any more. */
+  wayOut?: ReactNode;
   onSubmit: (spec: RailSpec) => void;
   children?: ReactNode;
 }
 
 /** Everything that is said about a rail but its bank. Shows what each group comes to while one types. */
-export function SpecFormView({ start, submitText, pending, failure, onSubmit, children }: SpecFormProps) {
+export function SpecFormView({
+  start,
+  submitText,
+  pending,
+  failure,
+  wayOut,
+  onSubmit,
+  children,
+}: SpecFormProps) {
   const [form, setForm] = useState(start);
   const [tried, setTried] = useState(false);
   const element = useRef<HTMLFormElement>(null);
@@ -69,9 +79,9 @@ export function SpecFormView({ start, submitText, pending, failure, onSubmit, ch
           field="targetKind"
           label="given as"
           options={[
-            ['step', 'ripple and load step'],
+            ['step', 'ripple and step'],
             ['flat', 'impedance'],
-            ['mask', 'mask over frequency'],
+            ['mask', 'a mask'],
           ]}
         />
         {form.targetKind === 'step' && (
@@ -99,7 +109,7 @@ export function SpecFormView({ start, submitText, pending, failure, onSubmit, ch
           label="given as"
           options={[
             ['direct', 'frequencies'],
-            ['derived', 'rise time and regulator'],
+            ['derived', 'from rise time'],
           ]}
         />
         {form.bandKind === 'direct' ? (
@@ -147,7 +157,7 @@ export function SpecFormView({ start, submitText, pending, failure, onSubmit, ch
         {failure !== null &&
           failure !== undefined &&
           Object.keys(theirs).filter((key) => key !== 'form').length === 0 && (
-            <Notice tone="error" title="▲ not saved">
+            <Notice tone="error" title="▲ not saved" action={isGone(failure) && wayOut}>
               {messageOf(failure)}
             </Notice>
           )}

@@ -55,7 +55,11 @@ export function RailResultsTable({ rails }: { rails: readonly RevisionRail[] }) 
       {rails.map(({ railId, document, summary }) => (
         <tr key={railId} className="hover:bg-wash/50">
           <Td>
-            <a href={`#${railAnchor(railId)}`} className={`${LINK} font-semibold`}>
+            <a
+              href={`#${railAnchor(railId)}`}
+              title={document.rail.name}
+              className={`${LINK} block max-w-[16ch] truncate font-semibold sm:max-w-[24ch]`}
+            >
               {document.rail.name}
             </a>
           </Td>

@@ -18,9 +18,9 @@ export function RailSection({ rail: { railId, document, summary, peaks } }: { ra
       aria-label={rail.name}
       className="grid scroll-mt-4 gap-x-10 gap-y-5 border-t pt-5 min-[87.5rem]:grid-cols-[19rem_minmax(0,1fr)]"
     >
-      <div className="flex flex-col gap-5">
+      <div className="flex min-w-0 flex-col gap-5">
         <div>
-          <h2 className="text-large font-semibold">{rail.name}</h2>
+          <h2 className="text-large font-semibold wrap-anywhere">{rail.name}</h2>
           <HeadroomSign holds={summary.holds} headroom_dB={summary.tightest?.headroom_dB ?? null} words />
         </div>
         <Facts rows={specFacts(rail)} />

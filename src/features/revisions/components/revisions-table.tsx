@@ -7,17 +7,27 @@ import { paths } from '@/config/paths';
 import { formatCost } from '@/lib/format-cost';
 import { dayAndTime } from '@/lib/time';
 
+/** On a phone who and when stand under the note; the figures need room. */
+const WIDE = 'hidden sm:table-cell';
+const WIDER = 'hidden lg:table-cell';
+
 const HEAD = (
   <>
     <Th>revision</Th>
     <Th>note</Th>
-    <Th>by</Th>
-    <Th>when</Th>
+    <Th className={WIDE}>by</Th>
+    <Th className={WIDE}>when</Th>
     <Th>rails</Th>
-    <Th numeric>parts</Th>
-    <Th numeric>cost</Th>
-    <Th numeric>area</Th>
-    <Th>hash</Th>
+    <Th numeric className={WIDE}>
+      parts
+    </Th>
+    <Th numeric className={WIDER}>
+      cost
+    </Th>
+    <Th numeric className={WIDER}>
+      area
+    </Th>
+    <Th className={WIDER}>hash</Th>
   </>
 );
 
@@ -40,20 +50,27 @@ export function RevisionsTable({ boardId, revisions }: { boardId: string; revisi
               {one.letter}
             </TextLink>
           </Td>
-          <Td className="min-w-48 max-w-[44ch]">
-            <span className="line-clamp-2">{one.note}</span>
+          <Td className="max-w-[44ch] sm:min-w-48">
+            <span className="line-clamp-2 wrap-anywhere">{one.note}</span>
+            <span className="block text-small text-stone sm:hidden">
+              {one.createdBy.name}, {dayAndTime(one.createdAt)}
+            </span>
           </Td>
-          <Td className="whitespace-nowrap">{one.createdBy.name}</Td>
-          <Td className="whitespace-nowrap text-stone">{dayAndTime(one.createdAt)}</Td>
+          <Td className={`whitespace-nowrap ${WIDE}`}>{one.createdBy.name}</Td>
+          <Td className={`whitespace-nowrap text-stone ${WIDE}`}>{dayAndTime(one.createdAt)}</Td>
           <Td>
             <RailTally rails={one.rails} />
           </Td>
-          <Td numeric>{one.parts}</Td>
-          <Td numeric>{formatCost(one.cost)}</Td>
-          <Td numeric>
+          <Td numeric className={WIDE}>
+            {one.parts}
+          </Td>
+          <Td numeric className={WIDER}>
+            {formatCost(one.cost)}
+          </Td>
+          <Td numeric className={WIDER}>
             <Decimal value={one.area_mm2} unit="mm²" fraction={room} />
           </Td>
-          <Td className="text-stone" title={one.hash}>
+          <Td className={`text-stone ${WIDER}`} title={one.hash}>
             {one.hash.slice(0, 8)}
           </Td>
         </tr>
