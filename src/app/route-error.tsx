@@ -25,7 +25,7 @@ function useReloadWhenBack(isAway: boolean): void {
 }
 
 function textOf(error: unknown, isAway: boolean): string {
-  if (isAway) return 'the server cannot be reached; this page comes by itself when it can be again';
+  if (isAway) return 'the server cannot be reached; this page loads by itself once it can';
   return isRouteErrorResponse(error) ? `${error.status} ${error.statusText}` : messageOf(error);
 }
 

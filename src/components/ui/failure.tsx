@@ -35,7 +35,7 @@ export function Failure({ error, what, retry, back }: Props) {
         }
       >
         {messageOf(error)}
-        {error instanceof NetworkError && '; this page comes by itself when it can be again'}
+        {error instanceof NetworkError && '; this page loads by itself once it can'}
         {gone && ' It has been deleted, or it is not open to you.'}
       </Notice>
     </div>
