@@ -54,11 +54,15 @@ export function PeaksTable({ rail, peaks }: { rail: string; peaks: readonly Revi
           <Td className="whitespace-nowrap">
             <Against peak={peak} />
           </Td>
-          <Td className="min-w-52 text-stone">
-            {peak.inductive ?? 'several'} against {peak.capacitive ?? 'several'}
-          </Td>
+          <Td className="min-w-52 text-stone">{makersText(peak)}</Td>
         </tr>
       ))}
     </Table>
   );
+}
+
+/** The two that make a peak, or the one that makes a rising edge alone. */
+function makersText({ inductive, capacitive }: Pick<RevisionPeak, 'inductive' | 'capacitive'>): string {
+  if (inductive && capacitive) return `${inductive} against ${capacitive}`;
+  return inductive || capacitive ? `${inductive ?? capacitive} alone` : 'resistance';
 }
