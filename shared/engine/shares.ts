@@ -73,7 +73,7 @@ export function memberShares(
       if (impedance_ohm[i] === Number.POSITIVE_INFINITY) continue;
       const yRe = re[i];
       const yIm = im[i];
-      impedance_ohm[i] = 1 / Math.hypot(yRe, yIm);
+      impedance_ohm[i] = 1 / Math.sqrt(yRe * yRe + yIm * yIm);
       re[i] = yRe * kRe - yIm * kIm;
       im[i] = yRe * kIm + yIm * kRe;
     }

@@ -112,7 +112,8 @@ function membersOver(
     out[1] = samples.units[member].b[sample];
   };
   return memberShares(rail, curve.frequency_Hz, unit).map(({ member, re, im, impedance_ohm }) => {
-    const share = re.map((value, i) => Math.hypot(value, im[i]));
+    // Not Math.hypot: ten times as slow, and nothing here comes near overflow.
+    const share = re.map((value, i) => Math.sqrt(value * value + im[i] * im[i]));
     if (member < 0)
       return { role: 'die', id: 'die', line: -1, magnitude_ohm: null, share, inductance_H: null };
     const { role, id, line, count } = rail.members[member];
