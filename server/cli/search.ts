@@ -24,6 +24,7 @@ export async function run(args: string[]): Promise<number> {
     await printJson({ mix: null, reason: result.reason, frequency_Hz: result.frequency_Hz });
     return 0;
   }
+  const locked = document.bank.filter((line) => line.locked).map(({ part, count }) => ({ part, count }));
   await printJson({
     mix: result.mix.map(({ id, count }) => ({ part: id, count })),
     weight: result.weight,
@@ -31,6 +32,8 @@ export async function run(args: string[]): Promise<number> {
     proven: result.proven,
     holds: result.holds,
     seconds: result.seconds,
+    // They stay in the bank beside the mix and are not in its weight.
+    ...(locked.length > 0 && { locked }),
   });
   return 0;
 }

@@ -62,9 +62,8 @@ export function surfaceMaxima(
   });
   // A perfectly flat ratio has no maximum: any point of it is as tight as any other.
   const places = maxima.length > 0 ? maxima.map((m) => frequencyOf(m, low, high)) : [low];
-  for (const f of corners) places.push(f);
   places.sort((a, b) => a - b);
-  return places.filter((f, i) => i === 0 || f > places[i - 1]).map((f) => tightnessAt(rail, target, f));
+  return places.map((f) => tightnessAt(rail, target, f));
 }
 
 function frequencyOf(maximum: { u: number; edge: 'low' | 'high' | null }, low: number, high: number): number {

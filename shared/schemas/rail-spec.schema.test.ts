@@ -39,6 +39,9 @@ describe('the specification of a rail', () => {
     expect(faults({ source: { kind: 'rl', resistance_ohm: 0, inductance_H: 0 } })).toEqual([
       'source.resistance_ohm',
     ]);
+    expect(faults({ source: { kind: 'damped', inductance_H: 1e-7, damping_ohm: 0 } })).toEqual([
+      'source.damping_ohm',
+    ]);
     expect(faults({ voltage_V: Number.NaN })).toEqual(['voltage_V']);
   });
 });

@@ -65,6 +65,21 @@ export const sourceSchema = z
     z.strictObject({ kind: z.literal('open') }),
   ])
   .superRefine((source, ctx) => {
+    if (source.kind === 'damped' && source.series_resistance_ohm === 0 && source.series_inductance_H === 0) {
+      // Without R0 and L0 an inductor or a damping of nothing would make the source ideal.
+      if (source.damping_ohm === 0 && source.damping_inductance_H === 0)
+        ctx.addIssue({
+          code: 'custom',
+          path: ['damping_ohm'],
+          message: 'needs a resistance or an inductance',
+        });
+      if (source.inductance_H === 0 && source.inductor_resistance_ohm === 0)
+        ctx.addIssue({
+          code: 'custom',
+          path: ['inductance_H'],
+          message: 'needs an inductance or a resistance',
+        });
+    }
     if (source.kind === 'rl' && source.resistance_ohm === 0 && source.inductance_H === 0)
       ctx.addIssue({
         code: 'custom',

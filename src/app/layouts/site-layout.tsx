@@ -2,6 +2,8 @@ import { useState } from 'react';
 import { Link, Outlet, useLocation } from 'react-router-dom';
 import { Logo } from '@/components/ui/logo';
 import { paths } from '@/config/paths';
+import { WaitingEdits } from '@/features/bench/components/waiting-edits';
+import { useSession } from '@/features/session/api/session';
 import { SessionKeeper } from '@/features/session/components/session-keeper';
 import { AccountMenu } from './account-menu';
 import { Breadcrumbs } from './breadcrumbs';
@@ -11,6 +13,7 @@ import { StatusSlot, StatusSlotProvider } from './status-slot';
 /** Header with the way here, the list of rails and pages at the side, the page itself. */
 export function SiteLayout() {
   const { pathname } = useLocation();
+  const { data: session } = useSession();
   const [openAt, setOpenAt] = useState<string | null>(null);
   const open = openAt === pathname;
   return (
@@ -29,6 +32,7 @@ export function SiteLayout() {
           </Link>
           <Breadcrumbs />
           <div className="ml-auto flex items-center gap-6 text-stone">
+            {session && <WaitingEdits personId={session.person.id} />}
             <StatusSlot />
             <AccountMenu />
             <button

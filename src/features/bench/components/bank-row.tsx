@@ -64,7 +64,7 @@ export function BankRow(props: BankRowProps) {
         <div className="flex items-start justify-between gap-2 pr-3">
           <button
             type="button"
-            data-row
+            data-row={line.key}
             aria-label={`${name}, ${line.count}`}
             aria-expanded={readOnly ? undefined : open}
             onKeyDown={onKeyDown}
@@ -141,14 +141,21 @@ function CountStepper({ count, before, readOnly, name, onCount }: StepperProps) 
         {count}
       </span>
     );
+  const faulty = typed !== null && !/^\d{1,4}$/.test(typed.trim());
   const commit = () => {
-    if (typed !== null && /^\d{1,4}$/.test(typed.trim())) onCount(Number(typed));
+    if (faulty) return;
+    if (typed !== null) onCount(Number(typed));
     setTyped(null);
   };
   const step =
     'flex h-5 w-6 items-center justify-center text-base text-deep hover:bg-wash disabled:opacity-40';
   return (
-    <span className="flex shrink-0 items-center">
+    <span className="flex shrink-0 flex-wrap items-center justify-end">
+      {faulty && (
+        <span role="alert" className="w-full text-right text-small text-kingfisher">
+          ▲ 0 to 9999
+        </span>
+      )}
       <button
         type="button"
         tabIndex={-1}
@@ -163,6 +170,8 @@ function CountStepper({ count, before, readOnly, name, onCount }: StepperProps) 
         aria-label={`count of ${name}`}
         tabIndex={-1}
         inputMode="numeric"
+        aria-invalid={faulty || undefined}
+        title={faulty ? 'a whole number, 0 to 9999' : undefined}
         value={typed ?? count}
         onChange={(event) => setTyped(event.target.value)}
         onBlur={commit}
@@ -171,7 +180,7 @@ function CountStepper({ count, before, readOnly, name, onCount }: StepperProps) 
           if (event.key === 'Enter') commit();
           if (event.key === 'Escape') setTyped(null);
         }}
-        className="h-5 w-8 border-0 bg-transparent text-center font-bold"
+        className="h-5 w-8 border-0 bg-transparent text-center font-bold aria-invalid:text-kingfisher"
       />
       <button
         type="button"

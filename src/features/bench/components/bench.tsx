@@ -43,7 +43,9 @@ export function Bench({ server, personId, canEdit, editTo, onSaved, onResult, re
   const [picking, setPicking] = useState(false);
   const [showLines, setShowLines] = useState(true);
   const [previewing, setPreviewing] = useState(false);
-  const [adopted, setAdopted] = useState<{ bank: string; text: string } | null>(null);
+  const [adopted, setAdopted] = useState<{ bank: string; text: string; proven: boolean } | null>(null);
+  /** A line that should have the focus once it is there, so that the keys go on working. */
+  const [focusKey, setFocusKey] = useState<string | null>(null);
   const [zoom, setZoom] = useState<[number, number] | null>(null);
   const whole = useMemo(() => chartSpan(spec.band_Hz), [spec.band_Hz]);
   const candidates = useQuery(candidatesQuery(spec.voltage_V));
@@ -77,6 +79,7 @@ export function Bench({ server, personId, canEdit, editTo, onSaved, onResult, re
     [isPreview, bench.lines],
   );
 
+  const lockedCount = bench.lines.reduce((sum, line) => (line.locked ? sum + line.count : sum), 0);
   const question = useMemo(() => {
     const all = candidates.data;
     if (!all || all.length === 0 || !canEdit) return null;
@@ -95,12 +98,15 @@ export function Bench({ server, personId, canEdit, editTo, onSaved, onResult, re
   const addPart = (part: Part) => {
     bench.learn([part]);
     const there = bench.lines.find((line) => line.partId === part.id);
-    if (there) bench.edit({ type: 'count', key: there.key, count: there.count + 1, at: Date.now() });
-    else {
+    if (there) {
+      bench.edit({ type: 'count', key: there.key, count: there.count + 1, at: Date.now() });
+      setFocusKey(there.key);
+    } else {
       const [line] = keyed([
         { partId: part.id, count: 1, mount_H: null, distance_m: null, side: 'top', locked: false },
       ]);
       bench.edit({ type: 'add', line });
+      setFocusKey(line.key);
     }
     setPicking(false);
   };
@@ -119,8 +125,9 @@ export function Bench({ server, personId, canEdit, editTo, onSaved, onResult, re
     bench.edit({ type: 'replace', lines: mixLines });
     setAdopted({
       bank: JSON.stringify(savedBank(mixLines)),
-      text: proofText(search.state, bench.search.minimise),
+      ...proofText(search.state, bench.search.minimise, lockedCount),
     });
+    setFocusKey(mixLines[0]?.key ?? null);
     setPreviewing(false);
     search.reset();
   };
@@ -157,6 +164,8 @@ export function Bench({ server, personId, canEdit, editTo, onSaved, onResult, re
           before={before}
           span_Hz={zoom ?? whole}
           onSpan={setZoom}
+          focusKey={isPreview ? null : focusKey}
+          onFocused={() => setFocusKey(null)}
           showLines={showLines}
           readOnly={!canEdit || isPreview}
           facts={<BenchFacts spec={spec} editTo={editTo} showLines={showLines} onShowLines={setShowLines} />}
@@ -214,10 +223,10 @@ export function Bench({ server, personId, canEdit, editTo, onSaved, onResult, re
                 candidates={candidates.data}
                 candidatesError={candidates.isError ? messageOf(candidates.error) : null}
                 state={search.state}
-                locked={bench.lines.reduce((sum, line) => (line.locked ? sum + line.count : sum), 0)}
+                locked={lockedCount}
                 previewing={isPreview}
                 outdated={outdated}
-                adopted={adopted?.bank === JSON.stringify(savedBank(bench.lines)) ? adopted.text : null}
+                adopted={adopted?.bank === JSON.stringify(savedBank(bench.lines)) ? adopted : null}
                 readOnly={!canEdit}
                 onSettings={bench.setSearch}
                 onSearch={startSearch}

@@ -4,7 +4,7 @@ import type { Part } from '@shared/schemas/part.schema';
 import type { RailSpec } from '@shared/schemas/rail-spec.schema';
 import { formatQuantity } from '@shared/units/format';
 import type { BenchAnalysis, BenchMember } from '@workers/analysis/analysis.interface';
-import { type ReactNode, useMemo, useRef, useState } from 'react';
+import { type ReactNode, useEffect, useMemo, useRef, useState } from 'react';
 import { decadesAround, frequencyAt, impedanceScale } from '@/components/chart/axis';
 import type { PlotCurve } from '@/components/chart/impedance-plot';
 import { PlumbLines } from '@/components/chart/plumb-lines';
@@ -29,6 +29,9 @@ interface ScoreProps {
   onSpan: (span_Hz: [number, number] | null) => void;
   showLines: boolean;
   readOnly: boolean;
+  /** A line to put the focus on once it is shown. */
+  focusKey: string | null;
+  onFocused: () => void;
   facts: ReactNode;
   footer: ReactNode;
   onCount: (key: string, count: number) => void;
@@ -66,6 +69,14 @@ export function Score(props: ScoreProps) {
   const shareAt = (member: BenchMember | undefined) =>
     member && cursorIndex !== null ? member.share[cursorIndex] : null;
   const fixed = (analysis?.members ?? []).filter((member) => member.line < 0);
+  const { focusKey, onFocused } = props;
+  useEffect(() => {
+    if (focusKey === null) return;
+    const row = rows.current?.querySelector<HTMLElement>(`[data-row="${focusKey}"]`);
+    if (!row) return;
+    row.focus();
+    onFocused();
+  }, [focusKey, onFocused]);
   const move = (from: number, by: number) => {
     const all = rows.current?.querySelectorAll<HTMLElement>('[data-row]');
     all?.[Math.min(all.length - 1, Math.max(0, from + by))]?.focus();

@@ -26,7 +26,7 @@ interface SearchPanelProps {
   /** The rail, a mount, a distance, a lock or a limit has changed since: the answer is to another question. */
   outdated: boolean;
   /** What was adopted, while the bank is still that. */
-  adopted: string | null;
+  adopted: { text: string; proven: boolean } | null;
   readOnly: boolean;
   onSettings: (settings: SearchSettings) => void;
   onSearch: () => void;
@@ -71,7 +71,11 @@ export function SearchPanel(props: SearchPanelProps) {
           The rail, a mount, a distance or a limit has changed since this search began. Search again.
         </Notice>
       )}
-      {props.adopted && <p className="text-reed">▽ the bank is the mix found: {props.adopted}</p>}
+      {props.adopted && (
+        <p className={props.adopted.proven ? 'text-reed' : 'text-brass'}>
+          {props.adopted.proven ? '▽' : '!'} the bank is the mix found: {props.adopted.text}
+        </p>
+      )}
       {state.kind === 'failed' && <Notice tone="error">{state.message}</Notice>}
       {props.candidatesError && <Notice tone="error">{props.candidatesError}</Notice>}
       {candidates?.length === 0 && (

@@ -27,6 +27,14 @@ export function useBenchKeys(keys: BenchKeys): void {
         return;
       }
       if (withControl || event.altKey) return;
+      if ((key === 'arrowdown' || key === 'arrowup') && target === document.body) {
+        const rows = document.querySelectorAll<HTMLElement>('[data-row]');
+        const row = rows[key === 'arrowdown' ? 0 : rows.length - 1];
+        if (!row) return;
+        event.preventDefault();
+        row.focus();
+        return;
+      }
       const act: Record<string, () => void> = {
         u: () => (event.shiftKey ? current.current.redo() : current.current.undo()),
         f: () => current.current.search(),

@@ -3,6 +3,7 @@ import type { RailWithParts, SearchSettings } from '@shared/schemas/rail.schema'
 import { useCallback, useEffect, useMemo, useReducer, useRef, useState } from 'react';
 import { saveRail } from '../api/save-rail';
 import { type BankEdit, type DraftLine, editBank, keyed, savedBank, startHistory } from '../lib/bank-history';
+import { editStore } from '../lib/edit-store';
 import { RailSaver, type SaveState } from '../lib/rail-saver';
 
 export interface Bench {
@@ -54,15 +55,12 @@ export function useBench({ server, personId, onSaved }: BenchOptions): Bench {
   const first = useRef({ rail, personId });
   useEffect(() => {
     const { id, boardId, version, updatedAt } = first.current.rail;
-    const key = `millpond.edit.${first.current.personId}.${id}`;
+    const store = editStore({ personId: first.current.personId, boardId, railId: id });
     const one = new RailSaver({
       send: (body) => saveRail(boardId, id, body),
       version,
       savedAt: Date.parse(updatedAt),
-      store: {
-        read: () => localStorage.getItem(key),
-        write: (text) => (text === null ? localStorage.removeItem(key) : localStorage.setItem(key, text)),
-      },
+      store,
       onState: setSave,
       onSaved: (answer) => saved.current(answer),
     });
@@ -87,7 +85,8 @@ export function useBench({ server, personId, onSaved }: BenchOptions): Bench {
       window.removeEventListener('online', flush);
       window.removeEventListener('millpond:signed-in', resume);
       window.removeEventListener('beforeunload', leaving);
-      one.dispose();
+      // What is left after the last try goes out by itself from wherever one is.
+      one.dispose(store.close);
     };
   }, []);
 

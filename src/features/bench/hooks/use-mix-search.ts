@@ -66,12 +66,18 @@ export function mixIn(state: MixSearchState): MixEntry[] | null {
 }
 
 /** What a search has shown, for beside a bank that was made from it. */
-export function proofText(state: MixSearchState, objective: Objective): string {
-  if (state.kind !== 'done' || !state.result.found) return 'stopped before a proof';
+export function proofText(
+  state: MixSearchState,
+  objective: Objective,
+  locked: number,
+): { text: string; proven: boolean } {
+  const beside = locked > 0 ? ` beside ${locked} locked` : '';
+  if (state.kind !== 'done' || !state.result.found) return { text: 'stopped before a proof', proven: false };
   const { proven, weight, lowerBound } = state.result;
+  const text = `${weightText(objective, weight)}${beside}`;
   return proven
-    ? `${weightText(objective, weight)}, ${LEAST[objective]} possible, proven`
-    : `${weightText(objective, weight)}, proven at least ${boundText(objective, lowerBound)}`;
+    ? { text: `${text}, ${LEAST[objective]} possible, proven`, proven }
+    : { text: `${text}, proven at least ${boundText(objective, lowerBound)}`, proven };
 }
 
 export const LEAST: Record<Objective, string> = { parts: 'fewest', cost: 'cheapest', area: 'smallest area' };

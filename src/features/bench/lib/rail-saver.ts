@@ -25,9 +25,11 @@ export type SaveState =
       changedAt: string;
     };
 
+/** An edit as it waits; `at` tells an edit that was left behind from one that is just being sent. */
 interface Stored {
   version: number;
   edit: RailEdit;
+  at: number;
 }
 
 export interface SaverParts {
@@ -58,6 +60,7 @@ export class RailSaver {
   private cancelTimer: (() => void) | null = null;
   private state: SaveState;
   private disposed = false;
+  private afterSending: (() => void) | null = null;
   private readonly parts: SaverParts;
 
   constructor(parts: SaverParts) {
@@ -122,12 +125,17 @@ export class RailSaver {
     return this.pending !== null || this.sending;
   }
 
-  dispose(): void {
-    this.flush();
+  /** Tries once more to send what waits, then lets go: `done` is called when nothing is under way any more. */
+  dispose(done: () => void = () => {}): void {
     this.disposed = true;
+    this.cancelTimer?.();
+    if (this.sending) this.afterSending = done;
+    else if (this.pending && this.state.kind !== 'conflict') void this.send().finally(done);
+    else done();
   }
 
   private schedule(ms: number): void {
+    if (this.disposed) return;
     this.cancelTimer?.();
     this.cancelTimer = (this.parts.delay ?? timer)(() => void this.send(), ms);
   }
@@ -154,6 +162,11 @@ export class RailSaver {
       this.pending = { ...edit, ...(this.pending ?? {}) };
       this.keep();
       this.failed(error);
+    } finally {
+      if (!this.sending) {
+        this.afterSending?.();
+        this.afterSending = null;
+      }
     }
   }
 
@@ -188,7 +201,9 @@ export class RailSaver {
   }
 
   private keep(): void {
-    const stored: Stored | null = this.pending ? { version: this.version, edit: this.pending } : null;
+    const stored: Stored | null = this.pending
+      ? { version: this.version, edit: this.pending, at: Date.now() }
+      : null;
     this.parts.store.write(stored && JSON.stringify(stored));
   }
 

@@ -8,6 +8,8 @@ import { Field } from '@/components/ui/field';
 import { Input } from '@/components/ui/input';
 import { Notice } from '@/components/ui/notice';
 import { EmptyState, Loading, Page, Section } from '@/components/ui/page';
+import { TextLink } from '@/components/ui/text-link';
+import { paths } from '@/config/paths';
 import { conflictOf } from '@/lib/conflict';
 import { messageOf } from '@/lib/problem';
 import { useDebounced } from '@/lib/use-debounced';
@@ -63,7 +65,8 @@ export function PeoplePage({ myId }: { myId: string | undefined }) {
       </div>
       {sentTo && (
         <p role="status" className="text-reed">
-          ▽ An invitation is on its way to {sentTo}.
+          ▽ {sentTo} is invited. Without a mail server the link waits on the{' '}
+          <TextLink to={paths.mail()}>Mail page</TextLink>.
         </p>
       )}
       {failure && <Notice tone="error">{refusal(failure)}</Notice>}

@@ -5,17 +5,23 @@ import { Table, Td, Th } from '@/components/ui/table';
 import { type RailGroup, sharedReason } from './instance-groups';
 
 const COLUMNS = 9;
+/** Columns that a phone leaves out: it shows which part, and how far it may sit. */
+const WIDE = 'max-sm:hidden';
 const HEAD = (
   <>
     <Th>designator</Th>
     <Th>part</Th>
-    <Th>value</Th>
-    <Th>case</Th>
-    <Th>side</Th>
-    <Th>rail</Th>
-    <Th numeric>mount</Th>
-    <Th numeric>planned distance</Th>
-    <Th className="pl-6">farthest distance</Th>
+    <Th className={WIDE}>value</Th>
+    <Th className={WIDE}>case</Th>
+    <Th className={WIDE}>side</Th>
+    <Th className={WIDE}>rail</Th>
+    <Th numeric className={WIDE}>
+      mount
+    </Th>
+    <Th numeric className={WIDE}>
+      planned distance
+    </Th>
+    <Th className="sm:pl-6">farthest distance</Th>
   </>
 );
 
@@ -65,24 +71,29 @@ function Row({ one, reasonIsAbove, room }: { one: Instance; reasonIsAbove: boole
   return (
     <tr className="hover:bg-wash/50">
       <Td className="font-semibold">{one.designator}</Td>
-      <Td className="whitespace-nowrap">{one.partNumber}</Td>
-      <Td className="whitespace-nowrap">{one.value}</Td>
-      <Td>{one.caseSize || '—'}</Td>
-      <Td>{one.side}</Td>
-      <Td className="max-w-[20ch] truncate text-stone" title={one.rail}>
+      <Td className="sm:whitespace-nowrap">
+        {one.partNumber}
+        <span className="block text-small text-stone sm:hidden">
+          {[one.value, one.caseSize, one.side].filter(Boolean).join(' · ')}
+        </span>
+      </Td>
+      <Td className={`${WIDE} whitespace-nowrap`}>{one.value}</Td>
+      <Td className={WIDE}>{one.caseSize || '—'}</Td>
+      <Td className={WIDE}>{one.side}</Td>
+      <Td className={`${WIDE} max-w-[20ch] truncate text-stone`} title={one.rail}>
         {one.rail}
       </Td>
-      <Td numeric>
+      <Td numeric className={WIDE}>
         <Decimal value={one.mount_H} unit="H" fraction={room} />
       </Td>
-      <Td numeric>
+      <Td numeric className={WIDE}>
         {one.distance_m === null ? (
           <span className="text-stone">not planned</span>
         ) : (
           millimetres(one.distance_m)
         )}
       </Td>
-      <Td className="min-w-36 pl-6">
+      <Td className="sm:min-w-36 sm:pl-6">
         <Farthest one={one} reasonIsAbove={reasonIsAbove} />
       </Td>
     </tr>

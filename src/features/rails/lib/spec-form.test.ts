@@ -56,6 +56,17 @@ describe('the specification form', () => {
       name: expect.any(String),
       bandHigh: expect.stringContaining('above its start'),
     });
+    const damped = {
+      ...filled,
+      sourceKind: 'damped' as const,
+      inductorInductance: '-220n',
+      dampingResistance: '5m',
+    };
+    expect(readSpec(damped)).toMatchObject({
+      errors: { inductorInductance: expect.stringContaining('negative') },
+    });
+    const planes = readSpec({ ...filled, length: '-5' });
+    expect('errors' in planes && Object.keys(planes.errors)).toEqual(['length']);
     expect(errorsAtFields([{ path: 'name', message: 'taken' }])).toEqual({ name: 'taken' });
   });
 

@@ -194,8 +194,23 @@ export function readSpec(form: SpecForm): { spec: RailSpec } | { errors: SpecErr
   const faults = (checked.error?.issues ?? [])
     .filter((issue) => issue.code !== 'invalid_type')
     .map((issue) => ({ path: formatPath(issue.path), message: issue.message }));
-  const all = { ...errorsAtFields(faults), ...errors };
+  const all = onShownFields({ ...errorsAtFields(faults), ...errors }, form);
   return { errors: Object.keys(all).length > 0 ? all : { form: 'something in this form is not right' } };
+}
+
+/** Moves a fault from a field that this form does not show to the one that stands for it. */
+function onShownFields(errors: SpecErrors, form: SpecForm): SpecErrors {
+  const { inductance, planeCapacitance: planes, bandLow, bandHigh, ...rest } = errors;
+  const shown: SpecErrors = { ...rest };
+  const put = (field: SpecField, message: string | undefined) => {
+    if (message !== undefined) shown[field] ??= message;
+  };
+  put(form.sourceKind === 'damped' ? 'inductorInductance' : 'inductance', inductance);
+  // A capacitance that comes out wrong comes from a dimension that has been named already.
+  if (form.planeKind === 'values') put('planeCapacitance', planes);
+  put(form.bandKind === 'derived' ? 'bandwidth' : 'bandLow', bandLow);
+  put(form.bandKind === 'derived' ? 'rise' : 'bandHigh', bandHigh);
+  return shown;
 }
 
 function readSource(

@@ -1,7 +1,8 @@
 import type { Draft } from './draft';
 
 function changes({ latest, added, edited, deleted, byParts, total }: Draft): string {
-  if (latest === null) return `This is the first revision; all ${total} rails go into it.`;
+  if (latest === null)
+    return `This is the first revision; ${total === 1 ? 'its one rail goes' : `all ${total} rails go`} into it.`;
   const kinds: [string, string[]][] = [
     [`Edited since ${latest}`, edited],
     ['New', added],
@@ -18,10 +19,14 @@ export function DraftSummary({ draft }: { draft: Draft }) {
   return (
     <div className="flex flex-col gap-2">
       <p className="wrap-anywhere">{changes(draft)}</p>
-      {draft.short.length > 0 ? (
+      {draft.short.length > 0 && (
         <p className="text-kingfisher wrap-anywhere">▲ short as they stand: {draft.short.join(', ')}</p>
-      ) : (
-        <p className="text-reed">▽ no rail is short</p>
+      )}
+      {draft.unknown.length > 0 && (
+        <p className="text-brass wrap-anywhere">! without a result: {draft.unknown.join(', ')}</p>
+      )}
+      {draft.short.length === 0 && draft.unknown.length === 0 && (
+        <p className="text-reed">▽ every rail holds</p>
       )}
       <p className="text-stone">
         A revision keeps the rails, banks and parts’ data as they stand, with results computed by the server.

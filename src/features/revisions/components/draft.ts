@@ -17,6 +17,8 @@ export interface Draft {
   /** In the revision, and no longer on the board. */
   deleted: string[];
   short: string[];
+  /** Rails that have no result, e.g. since nothing feeds them. */
+  unknown: string[];
 }
 
 /** The letter after `letter`: A … Z, AA, AB … */
@@ -53,6 +55,7 @@ export function draftOf({ rails, parts }: RailList, latest: Latest | null): Draf
     byParts: [],
     deleted: [...cut].filter(([id]) => !here.has(id)).map(([, document]) => document.rail.name),
     short: rails.filter((rail) => rail.summary.holds === false).map((rail) => rail.spec.name),
+    unknown: rails.filter((rail) => rail.summary.holds === null).map((rail) => rail.spec.name),
   };
   for (const { id, spec, bank } of rails) {
     const now = railDocument(spec, bank, byId);
