@@ -17,6 +17,9 @@ export interface Tightest {
 /** |Z| may exceed the target by this relative amount and still count as holding: the engine's own accuracy. */
 export const HOLD_TOLERANCE = 1e-9;
 
+/** A sample this little above every peak is rounding (nepers). */
+const LEVEL_NP = 1e-9;
+
 /** True when |Z| ≤ target at the tightest frequency (within HOLD_TOLERANCE). */
 export function holds(tightest: Tightest): boolean {
   return tightest.impedance_ohm <= tightest.target_ohm * (1 + HOLD_TOLERANCE);
@@ -50,9 +53,10 @@ export function surfaceMaxima(
   const u = swept.frequency_Hz.map(Math.log);
   const segments = Array.from(swept.frequency_Hz, (f) => targetSegment(target, f));
   const z = logImpedance(rail);
+  const value = swept.logMagnitude.map((v, i) => v - segments[i].logValue);
   const maxima = localMaxima({
     u,
-    value: swept.logMagnitude.map((v, i) => v - segments[i].logValue),
+    value,
     slope: swept.slope.map((v, i) => v - segments[i].slope),
     at: (place) => {
       const curveAt = z(place);
@@ -60,8 +64,12 @@ export function surfaceMaxima(
       return { value: curveAt.value - line.logValue, slope: curveAt.slope - line.slope };
     },
   });
-  // A perfectly flat ratio has no maximum: any point of it is as tight as any other.
-  const places = maxima.length > 0 ? maxima.map((m) => frequencyOf(m, low, high)) : [low];
+  const places = maxima.map((maximum) => frequencyOf(maximum, low, high));
+  // A level stretch that runs to the band's end is no peak, and may still be the highest there is: the highest sample counts
+  // whatever the peaks say, so that no rail is called holding for want of one.
+  const highest = value.reduce((best, v, i) => (v > value[best] ? i : best), 0);
+  const peak = maxima.reduce((most, maximum) => Math.max(most, maximum.value), Number.NEGATIVE_INFINITY);
+  if (value[highest] > peak + LEVEL_NP) places.push(swept.frequency_Hz[highest]);
   places.sort((a, b) => a - b);
   return places.map((f) => tightnessAt(rail, target, f));
 }
