@@ -1,4 +1,5 @@
 import { EngineError } from './errors';
+import { esrAt, type PreparedEsr, prepareEsr } from './esr-table';
 import type { LineModel, PackageModel, RailNetwork, SeriesBranch, SourceModel } from './network';
 import { type PreparedTable, prepareTable, tableImpedance } from './table';
 
@@ -8,8 +9,11 @@ import { type PreparedTable, prepareTable, tableImpedance } from './table';
  */
 export type Branch =
   | { kind: 'series'; r: number; l: number; d: number }
+  /** As series, with an ESR that goes with frequency. */
+  | { kind: 'lossy'; esr: PreparedEsr; l: number; d: number }
   | { kind: 'damped'; r0: number; l0: number; rl: number; l: number; r1: number; l1: number }
-  | { kind: 'table'; table: PreparedTable; l: number };
+  /** rScale·Re Z + j(Im Z + ωl − d/ω) of the table's Z; l and d may be below zero where the part has become better. */
+  | { kind: 'table'; table: PreparedTable; rScale: number; l: number; d: number };
 
 const finite = (value: number, field: string, what: string): number => {
   if (!Number.isFinite(value)) throw new EngineError(field, `${what} must be a finite number`);
@@ -57,15 +61,19 @@ export function sourceBranch(source: SourceModel, field = 'source'): Branch | nu
       return branch;
     }
     case 'table':
-      return { kind: 'table', table: prepareTable(source.table, `${field}.points`), l: 0 };
+      return { kind: 'table', table: prepareTable(source.table, `${field}.points`), rScale: 1, l: 0, d: 0 };
   }
 }
 
 /** One capacitor of a line (count not applied), with its mount and path inductance. */
 export function lineBranch(line: LineModel, field: string): Branch {
   if (line.table) {
-    const l = finite(line.added_inductance_H ?? 0, `${field}.added_inductance_H`, 'inductance');
-    return { kind: 'table', table: prepareTable(line.table, `${field}.table`), l };
+    const l = line.added_inductance_H ?? 0;
+    const d = line.added_elastance_perF ?? 0;
+    if (!Number.isFinite(l) || !Number.isFinite(d))
+      throw new EngineError(field, 'what is put in series with the table must be a finite number');
+    const rScale = finite(line.resistance_factor ?? 1, `${field}.resistance_factor`, 'the factor');
+    return { kind: 'table', table: prepareTable(line.table, `${field}.table`), rScale, l, d };
   }
   const branch = {
     resistance_ohm: line.esr_ohm,
@@ -75,7 +83,9 @@ export function lineBranch(line: LineModel, field: string): Branch {
   finite(line.esr_ohm, `${field}.esr_ohm`, 'ESR');
   if (!Number.isFinite(line.capacitance_F))
     throw new EngineError(`${field}.capacitance_F`, 'capacitance must be a finite number');
-  return seriesBranch(branch, field);
+  const series = seriesBranch(branch, field);
+  if (!line.esr_table || series.kind !== 'series') return series;
+  return { kind: 'lossy', esr: prepareEsr(line.esr_table, `${field}.esr_table`), l: series.l, d: series.d };
 }
 
 /** Package in series with the die's R–C as one branch hanging on the pins; null when there is nothing behind it. */
@@ -101,7 +111,7 @@ export function checkPackage(model: PackageModel): PackageModel {
 
 /** Self-resonance 1/(2π√(LC)) of a series branch in Hz, or null where it has none. */
 export function selfResonance_Hz(branch: Branch): number | null {
-  if (branch.kind !== 'series' || branch.d === 0 || branch.l === 0) return null;
+  if ((branch.kind !== 'series' && branch.kind !== 'lossy') || branch.d === 0 || branch.l === 0) return null;
   return Math.sqrt(branch.d / branch.l) / (2 * Math.PI);
 }
 
@@ -125,6 +135,14 @@ export function branchAdmittance(
     const xc = branch.d / omega;
     zr = branch.r;
     zi = xl - xc;
+    di = xl + xc;
+  } else if (branch.kind === 'lossy') {
+    esrAt(branch.esr, frequency_Hz, out);
+    const xl = omega * branch.l;
+    const xc = branch.d / omega;
+    zr = out[0];
+    zi = xl - xc;
+    dr = out[1];
     di = xl + xc;
   } else if (branch.kind === 'damped') {
     const ar = branch.rl;
@@ -154,10 +172,12 @@ export function branchAdmittance(
     }
   } else {
     tableImpedance(branch.table, frequency_Hz, out);
-    zr = out[0];
-    zi = out[1] + omega * branch.l;
-    dr = out[2];
-    di = out[3] + omega * branch.l;
+    const xl = omega * branch.l;
+    const xc = branch.d / omega;
+    zr = branch.rScale * out[0];
+    zi = out[1] + xl - xc;
+    dr = branch.rScale * out[2];
+    di = out[3] + xl + xc;
   }
   const z2 = zr * zr + zi * zi;
   if (!(z2 > 0))

@@ -1,5 +1,5 @@
 import { BankSum, sampleAdmittance } from './bank-sum';
-import { selfResonance_Hz } from './branch';
+import { type Branch, selfResonance_Hz } from './branch';
 import { EngineError } from './errors';
 import { type CompiledRail, railImpedance, scratch, seenImpedance } from './rail';
 
@@ -140,15 +140,20 @@ function startGrid(rail: CompiledRail, low_Hz: number, high_Hz: number, options:
       const places = isLossless ? [f * (1 - 1e-7), f * (1 + 1e-7)] : [f];
       for (const place of places) if (place > low_Hz && place < high_Hz) grid.push(place);
     }
-    if (member.branch.kind === 'table')
-      for (const u of member.branch.table.u) {
-        const knot = Math.exp(u);
-        if (knot > low_Hz && knot < high_Hz) grid.push(knot);
-      }
+    for (const u of knotsOf(member.branch)) {
+      const knot = Math.exp(u);
+      if (knot > low_Hz && knot < high_Hz) grid.push(knot);
+    }
   }
   for (const f of options.include_Hz ?? []) if (f > low_Hz && f < high_Hz) grid.push(f);
   grid.sort((a, b) => a - b);
   return grid.filter((f, i) => i === 0 || f > grid[i - 1]);
+}
+
+/** Where a table bends, in ln f. */
+function knotsOf(branch: Branch): ArrayLike<number> & Iterable<number> {
+  if (branch.kind === 'table') return branch.table.u;
+  return branch.kind === 'lossy' ? branch.esr.u : [];
 }
 
 /** The stretch of a curve inside [low_Hz, high_Hz], whose ends must be among its points. */

@@ -44,6 +44,12 @@ export interface ImpedanceTable {
   im_ohm: Float64Array;
 }
 
+/** ESR over frequency, frequencies strictly rising; straight on log–log paper between its points, level beyond its ends. */
+export interface EsrTable {
+  frequency_Hz: Float64Array;
+  resistance_ohm: Float64Array;
+}
+
 /** One bank line: `count` equal capacitors, each with its mount and its path to the load. */
 export interface LineModel {
   /** Names the line in results, e.g. the part's identifier. */
@@ -53,9 +59,16 @@ export interface LineModel {
   capacitance_F: Farad;
   /** ESL + mount + path. */
   inductance_H: Henry;
-  /** Replaces R, C and ESL where it stands; `added_inductance_H` (mount + path) is put in series with it. */
+  /** ESR over frequency instead of `esr_ohm`. */
+  esr_table?: EsrTable;
+  /**
+   * Replaces R, C and ESL where it stands: Z = `resistance_factor`·Re + j(Im + ω·`added_inductance_H` − `added_elastance_perF`/ω),
+   * with mount, path and a changed ESL in the inductance, and in the elastance (1/F) what a changed capacitance adds.
+   */
   table?: ImpedanceTable;
-  added_inductance_H?: Henry;
+  added_inductance_H?: number;
+  added_elastance_perF?: number;
+  resistance_factor?: number;
 }
 
 /** R + jωL from the pins to the die; C_die with R_die in series there. `die_capacitance_F` 0: nothing there. */

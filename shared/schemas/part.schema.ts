@@ -23,6 +23,72 @@ export const toleranceSchema = z.enum(['B', 'C', 'D', 'F', 'G', 'J', 'K', 'M', '
 const positive = (max: number) => z.number().gt(0, 'must be above zero').max(max, 'is too large');
 const notNegative = (max: number) => z.number().min(0, 'must not be negative').max(max, 'is too large');
 
+/** How a value goes with another: [x, value] with x rising. */
+const curve = (what: string, lowest: number, highest: number) =>
+  z
+    .array(
+      z.tuple([
+        z.number().min(lowest, `${what} is below ${lowest}`).max(highest, `${what} is above ${highest}`),
+        z.number().gt(0, 'the factor must be above zero').max(10, 'the factor is too large'),
+      ]),
+    )
+    .min(2, 'a curve needs at least two points')
+    .max(200, 'at most 200 points')
+    .superRefine((points, ctx) => {
+      for (let i = 1; i < points.length; i++)
+        if (points[i][0] <= points[i - 1][0])
+          ctx.addIssue({ code: 'custom', path: [i, 0], message: `${what} must rise from point to point` });
+    });
+
+/** C ÷ C(0 V) over DC voltage: [volt, factor], from 0 V on, with factor 1 there. */
+export const biasCurveSchema = curve('voltage', 0, 1e5).refine(
+  (points) => points[0][0] === 0 && Math.abs(points[0][1] - 1) < 1e-9,
+  'the first point is 0 V with factor 1',
+);
+/** C ÷ C(25 °C) over temperature: [°C, factor]. */
+export const temperatureCurveSchema = curve('temperature', -100, 300);
+
+const rising = (points: readonly (readonly number[])[], ctx: z.RefinementCtx) => {
+  for (let i = 1; i < points.length; i++)
+    if (points[i][0] <= points[i - 1][0])
+      ctx.addIssue({ code: 'custom', path: [i, 0], message: 'frequencies must rise from point to point' });
+};
+const frequency = z.number().gt(0, 'frequency must be above zero').max(1e15, 'frequency is too large');
+
+/** ESR over frequency: [Hz, ohm]; between its points straight on log–log paper, level beyond its ends. */
+export const esrTableSchema = z
+  .array(z.tuple([frequency, z.number().gt(0, 'ESR must be above zero').max(1e6, 'ESR is too large')]))
+  .min(2, 'a table needs at least two points')
+  .max(2000, 'at most 2000 points')
+  .superRefine(rising);
+
+/** A measured impedance of the part alone: [Hz, Re, Im] in ohm. */
+export const impedanceTableSchema = z
+  .array(
+    z.tuple([
+      frequency,
+      z.number().min(0, 'Re Z must not be negative').max(1e9),
+      z.number().min(-1e9).max(1e9),
+    ]),
+  )
+  .min(2, 'a table needs at least two points')
+  .max(5000, 'at most 5000 points')
+  .superRefine(rising);
+
+const percent = (most: number) => z.number().min(0, 'must not be negative').max(most, `at most ${most} %`);
+
+/** What is known of how a part behaves away from its catalogue conditions; null where nothing is: estimates stand in. */
+export const partBehaviourShape = {
+  bias_curve: biasCurveSchema.nullable().default(null),
+  temperature_curve: temperatureCurveSchema.nullable().default(null),
+  /** Loss in per cent of the 1000 h value with each decade of hours. */
+  ageing_percent_per_decade: percent(20).nullable().default(null),
+  esr_table: esrTableSchema.nullable().default(null),
+  impedance_table: impedanceTableSchema.nullable().default(null),
+  esr_tolerance_percent: percent(90).nullable().default(null),
+  esl_tolerance_percent: percent(90).nullable().default(null),
+};
+
 /** Identifies a part in documents and lists: letters, digits and a few signs, no spaces. */
 export const partNumberSchema = z
   .string()
@@ -54,6 +120,7 @@ export const partFieldsSchema = z.strictObject({
   termination: terminationSchema.default('standard'),
   unit_cost: notNegative(1e6).nullable().default(null),
   area_mm2: positive(1e6).nullable().default(null),
+  ...partBehaviourShape,
 });
 export type PartFields = z.infer<typeof partFieldsSchema>;
 
@@ -69,6 +136,7 @@ export type Part = z.infer<typeof partSchema>;
 
 export const createPartSchema = partFieldsSchema;
 const { description, dielectric, height_mm, termination, unit_cost, area_mm2 } = partFieldsSchema.shape;
+const behaviour = partFieldsSchema.shape;
 /** What is left out stays as it is: without their defaults, which would stand in for a missing field. */
 export const updatePartSchema = partFieldsSchema
   .extend({
@@ -78,6 +146,13 @@ export const updatePartSchema = partFieldsSchema
     termination: termination.unwrap(),
     unit_cost: unit_cost.unwrap(),
     area_mm2: area_mm2.unwrap(),
+    bias_curve: behaviour.bias_curve.unwrap(),
+    temperature_curve: behaviour.temperature_curve.unwrap(),
+    ageing_percent_per_decade: behaviour.ageing_percent_per_decade.unwrap(),
+    esr_table: behaviour.esr_table.unwrap(),
+    impedance_table: behaviour.impedance_table.unwrap(),
+    esr_tolerance_percent: behaviour.esr_tolerance_percent.unwrap(),
+    esl_tolerance_percent: behaviour.esl_tolerance_percent.unwrap(),
   })
   .partial()
   .extend({ version: versionSchema });

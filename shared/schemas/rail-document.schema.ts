@@ -1,11 +1,15 @@
 import { z } from 'zod';
-import { terminationSchema, toleranceSchema } from './part.schema';
+import { partBehaviourShape, terminationSchema, toleranceSchema } from './part.schema';
 import { frequencySchema, railSpecSchema } from './rail-spec.schema';
 
 const positive = z.number().gt(0, 'must be above zero').max(1e15);
 const notNegative = z.number().min(0, 'must not be negative').max(1e15);
+const known = partBehaviourShape;
 
-/** A part in a document: its numbers are taken as they stand (in-service values). */
+/**
+ * A part in a document. Its numbers are taken as they stand; what it says of tolerance, dielectric and curves counts where a
+ * rail is looked at in service or in its worst cases.
+ */
 export const documentPartSchema = z.strictObject({
   id: z.string().min(1, 'must not be empty').max(80),
   capacitance_F: positive,
@@ -22,6 +26,13 @@ export const documentPartSchema = z.strictObject({
   rated_voltage_V: positive.optional(),
   height_mm: positive.optional(),
   termination: terminationSchema.optional(),
+  bias_curve: known.bias_curve.unwrap().unwrap().optional(),
+  temperature_curve: known.temperature_curve.unwrap().unwrap().optional(),
+  ageing_percent_per_decade: known.ageing_percent_per_decade.unwrap().unwrap().optional(),
+  esr_table: known.esr_table.unwrap().unwrap().optional(),
+  impedance_table: known.impedance_table.unwrap().unwrap().optional(),
+  esr_tolerance_percent: known.esr_tolerance_percent.unwrap().unwrap().optional(),
+  esl_tolerance_percent: known.esl_tolerance_percent.unwrap().unwrap().optional(),
 });
 export type DocumentPart = z.infer<typeof documentPartSchema>;
 
@@ -33,6 +44,8 @@ export const documentLineSchema = z.strictObject({
     .max(100_000, 'count must be at most 100 000'),
   /** Mounting inductance of this line, instead of the part's own. */
   mount_H: notNegative.optional(),
+  /** The mount recipe that `mount_H` comes from, by name. */
+  recipe: z.string().max(80).optional(),
   /** Farthest distance to the load; with the plane's geometry it gives the path inductance. */
   distance_m: notNegative.max(10).optional(),
   side: z.enum(['top', 'bottom']).optional(),

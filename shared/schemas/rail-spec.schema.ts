@@ -15,13 +15,38 @@ const risingFrequencies = (points: readonly (readonly number[])[], ctx: z.Refine
       ctx.addIssue({ code: 'custom', path: [i, 0], message: 'frequencies must rise from point to point' });
 };
 
+/**
+ * A level target may rise by 20 dB a decade from some frequency on: from 1/(π·rise_s), where the spectrum of a trapezoidal load
+ * falls by as much, or from where the reactance of `rising_H` reaches it.
+ */
+const rising = {
+  rise_s: positive('rise time', 10).optional(),
+  rising_H: positive('inductance', 1).optional(),
+};
+const oneRise = (
+  target: { rise_s?: number | undefined; rising_H?: number | undefined },
+  ctx: z.RefinementCtx,
+) => {
+  if (target.rise_s !== undefined && target.rising_H !== undefined)
+    ctx.addIssue({
+      code: 'custom',
+      path: ['rising_H'],
+      message: 'give a rise time or an inductance, not both',
+    });
+};
+
 export const targetSchema = z.discriminatedUnion('kind', [
-  z.strictObject({ kind: z.literal('flat'), impedance_ohm: positive('target impedance', 1e6) }),
-  z.strictObject({
-    kind: z.literal('step'),
-    ripple_percent: positive('ripple', 100),
-    step_A: positive('load step', 1e5),
-  }),
+  z
+    .strictObject({ kind: z.literal('flat'), impedance_ohm: positive('target impedance', 1e6), ...rising })
+    .superRefine(oneRise),
+  z
+    .strictObject({
+      kind: z.literal('step'),
+      ripple_percent: positive('ripple', 100),
+      step_A: positive('load step', 1e5),
+      ...rising,
+    })
+    .superRefine(oneRise),
   z.strictObject({
     kind: z.literal('mask'),
     points: z
@@ -98,6 +123,8 @@ export const planeGeometrySchema = z.strictObject({
   /** Effective radius of a capacitor's vias and of the load's, for the path inductance between them. */
   via_radius_m: positive('radius', 0.1).default(1.5e-4),
   load_radius_m: positive('radius', 0.1).default(1.5e-3),
+  /** The two copper layers of the board's stack-up that spacing and permittivity come from, by name; upper one first. */
+  pair: z.tuple([z.string().min(1).max(40), z.string().min(1).max(40)]).optional(),
 });
 export type PlaneGeometry = z.infer<typeof planeGeometrySchema>;
 
@@ -133,6 +160,53 @@ export const bandBasisSchema = z.strictObject({
 });
 export type BandBasis = z.infer<typeof bandBasisSchema>;
 
+const celsius = (what: string) =>
+  z.number().min(-100, `${what} is below −100 °C`).max(300, `${what} is above 300 °C`);
+
+/** Under what the rail must hold: in service at the usual temperature and full age, worst cases over all of it. */
+export const conditionsSchema = z
+  .strictObject({
+    coldest_C: celsius('temperature'),
+    usual_C: celsius('temperature'),
+    hottest_C: celsius('temperature'),
+    /** Hours that the parts have been in use; ageing counts from 1000 h. */
+    age_h: z.number().min(0, 'age must not be negative').max(1e6, 'age is too large'),
+    /** Which tolerances go to their ends in the worst cases. */
+    vary: z.array(z.enum(['capacitance', 'esr', 'esl'])).max(3),
+  })
+  .superRefine((c, ctx) => {
+    if (c.usual_C < c.coldest_C)
+      ctx.addIssue({ code: 'custom', path: ['usual_C'], message: 'must not lie below the coldest' });
+    if (c.hottest_C < c.usual_C)
+      ctx.addIssue({ code: 'custom', path: ['hottest_C'], message: 'must not lie below the usual' });
+    if (new Set(c.vary).size < c.vary.length)
+      ctx.addIssue({ code: 'custom', path: ['vary'], message: 'names a tolerance twice' });
+  });
+export type Conditions = z.infer<typeof conditionsSchema>;
+
+/** What the rail's tolerance is spent on before the bank gets the rest as ripple. */
+export const noiseBudgetSchema = z.strictObject({
+  /** Rail tolerance of the load, ± per cent of the rail's voltage. */
+  tolerance_percent: positive('tolerance', 100),
+  setpoint_percent: notNegative('set-point error', 100),
+  dc_drop_V: notNegative('DC drop', 1e4),
+  regulator_ripple_V: notNegative('ripple', 1e4),
+});
+export type NoiseBudget = z.infer<typeof noiseBudgetSchema>;
+
+/** Ripple in per cent of the rail that a budget leaves for the bank; zero or less: nothing is left. */
+export const rippleLeft_percent = (budget: NoiseBudget, voltage_V: number): number =>
+  budget.tolerance_percent -
+  budget.setpoint_percent -
+  (100 * (budget.dc_drop_V + budget.regulator_ripple_V)) / voltage_V;
+
+export const startUpSchema = z.strictObject({
+  /** Time in which the regulator ramps the rail from zero. */
+  soft_start_s: positive('soft start', 100),
+  /** What the regulator gives before it limits. */
+  current_limit_A: positive('current limit', 1e5),
+});
+
 export const railNameSchema = z
   .string()
   .trim()
@@ -153,8 +227,26 @@ export const railSpecSchema = z
     package: packageSchema.optional(),
     observe: z.enum(['pins', 'die']).default('pins'),
     load_step: loadStepSchema.optional(),
+    conditions: conditionsSchema.optional(),
+    noise_budget: noiseBudgetSchema.optional(),
+    start_up: startUpSchema.optional(),
   })
   .superRefine((rail, ctx) => {
+    if (rail.noise_budget) {
+      const left = rippleLeft_percent(rail.noise_budget, rail.voltage_V);
+      if (!(left > 0))
+        ctx.addIssue({
+          code: 'custom',
+          path: ['noise_budget', 'tolerance_percent'],
+          message: 'nothing is left for the bank: the tolerance is spent',
+        });
+      else if (rail.target.kind === 'step' && Math.abs(rail.target.ripple_percent / left - 1) > 1e-6)
+        ctx.addIssue({
+          code: 'custom',
+          path: ['target', 'ripple_percent'],
+          message: `does not agree with noise_budget, which leaves ${left} %`,
+        });
+    }
     const basis = rail.band_basis;
     if (basis) {
       const expected = [basis.regulator_bandwidth_Hz, basis.knee / basis.rise_s];

@@ -11,8 +11,10 @@ export const bankLineSchema = z.strictObject({
     .int('count must be a whole number')
     .min(0, 'count must not be negative')
     .max(9999, 'count must be at most 9999'),
-  /** Mounting inductance in henry; null: the part's usual mount. */
+  /** Mounting inductance in henry; null: that of the recipe, or else the part's usual mount. */
   mount_H: z.number().min(0).max(1).nullable().default(null),
+  /** One of the board's mount recipes; null: none. */
+  recipeId: idSchema.nullable().default(null),
   /** Farthest distance to the load in metres; null: not planned yet. */
   distance_m: z.number().min(0).max(10).nullable().default(null),
   side: z.enum(['top', 'bottom']).default('top'),
@@ -27,7 +29,7 @@ export const bankSchema = z
   .superRefine((bank, ctx) => {
     const seen = new Set<string>();
     bank.forEach((line, i) => {
-      const key = `${line.partId} ${line.mount_H} ${line.distance_m} ${line.side}`;
+      const key = `${line.partId} ${line.mount_H} ${line.recipeId} ${line.distance_m} ${line.side}`;
       if (seen.has(key))
         ctx.addIssue({ code: 'custom', path: [i], message: 'the same part, mounted alike, stands twice' });
       seen.add(key);
@@ -52,11 +54,20 @@ export const tightestSchema = z.object({
   headroom_dB: z.number(),
 });
 
+/** Headroom at one set of values. */
+export const verdictSchema = z.object({ holds: z.boolean(), tightest: tightestSchema });
+export type Verdict = z.infer<typeof verdictSchema>;
+
 /** What lists show of a rail; computed by the server with the shared engine at each save. */
 export const railSummarySchema = z.object({
   engineVersion: z.string(),
+  /** In service (results of engine 1.0.0: at catalogue values). */
   holds: z.boolean().nullable(),
   tightest: tightestSchema.nullable(),
+  /** At catalogue values; in the worst of all corners, with its name; with the one part open that hurts most, in service. */
+  catalogue: verdictSchema.nullable().default(null),
+  worst: verdictSchema.extend({ corner: z.string() }).nullable().default(null),
+  missing: verdictSchema.extend({ part: z.string() }).nullable().default(null),
   parts: z.int(),
   kinds: z.int(),
   /** null where a part of the bank has no price (or no area). */

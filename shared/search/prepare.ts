@@ -107,5 +107,6 @@ function resonanceOf(branch: Branch): number {
   if (branch.kind !== 'table') return selfResonance_Hz(branch) ?? Number.MAX_VALUE;
   const { inductance_H, elastance_perF } = branch.table.fit;
   const l = inductance_H + branch.l;
-  return l > 0 && elastance_perF > 0 ? Math.sqrt(elastance_perF / l) / (2 * Math.PI) : Number.MAX_VALUE;
+  const d = elastance_perF + branch.d;
+  return l > 0 && d > 0 ? Math.sqrt(d / l) / (2 * Math.PI) : Number.MAX_VALUE;
 }

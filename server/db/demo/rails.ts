@@ -56,6 +56,7 @@ const line = (
   partNumber,
   count,
   mount_H: null,
+  recipeId: null,
   distance_m: distance_mm === null ? null : metres(distance_mm),
   side,
   locked,

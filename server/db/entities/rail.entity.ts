@@ -17,6 +17,13 @@ const withLaterSettings: ValueTransformer = {
   from: (stored: Partial<SearchSettings>): SearchSettings => ({ ...defaults, ...stored }),
 };
 
+/** The same for bank lines. */
+const withLaterFields: ValueTransformer = {
+  to: (bank: BankLine[]) => bank,
+  from: (stored: (Omit<BankLine, 'recipeId'> & Partial<BankLine>)[]): BankLine[] =>
+    stored.map((line) => ({ ...line, recipeId: line.recipeId ?? null })),
+};
+
 @Entity('rail')
 @Index('rail_by_position', ['boardId', 'position', 'id'])
 @Index('rail_name', ['boardId', 'nameKey'], { unique: true })
@@ -31,7 +38,7 @@ export class RailEntity {
   /** Name in lower case: two rails of a board may not differ by case alone. */
   @Column({ name: 'name_key', type: 'text' }) nameKey!: string;
   @Column({ type: 'simple-json' }) spec!: RailSpec;
-  @Column({ type: 'simple-json' }) bank!: BankLine[];
+  @Column({ type: 'simple-json', transformer: withLaterFields }) bank!: BankLine[];
   @Column({ type: 'simple-json', transformer: withLaterSettings }) search!: SearchSettings;
   @Column({ type: 'simple-json' }) summary!: RailSummary;
   /** The summary's own answer again, so that board lists can count without reading it. */

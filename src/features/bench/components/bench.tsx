@@ -103,7 +103,15 @@ export function Bench({ server, personId, canEdit, editTo, onSaved, onResult, re
       setFocusKey(there.key);
     } else {
       const [line] = keyed([
-        { partId: part.id, count: 1, mount_H: null, distance_m: null, side: 'top', locked: false },
+        {
+          partId: part.id,
+          count: 1,
+          mount_H: null,
+          recipeId: null,
+          distance_m: null,
+          side: 'top',
+          locked: false,
+        },
       ]);
       bench.edit({ type: 'add', line });
       setFocusKey(line.key);

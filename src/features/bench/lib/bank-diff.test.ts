@@ -6,6 +6,7 @@ const line = (n: number, count: number, distance_m: number | null = null): BankL
   partId: `00000000-0000-4000-8000-00000000000${n}`,
   count,
   mount_H: null,
+  recipeId: null,
   distance_m,
   side: 'top',
   locked: false,

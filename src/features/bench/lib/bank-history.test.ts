@@ -6,6 +6,7 @@ const line = (key: string, count = 1): DraftLine => ({
   partId: '00000000-0000-4000-8000-000000000001',
   count,
   mount_H: null,
+  recipeId: null,
   distance_m: null,
   side: 'top',
   locked: false,

@@ -45,7 +45,11 @@ export const savedBank = (lines: readonly DraftLine[]): BankLine[] =>
 
 /** Two lines that the server would take for the same: equal part, mount, distance and side. */
 export const isSameLine = (a: BankLine, b: BankLine): boolean =>
-  a.partId === b.partId && a.mount_H === b.mount_H && a.distance_m === b.distance_m && a.side === b.side;
+  a.partId === b.partId &&
+  a.mount_H === b.mount_H &&
+  a.recipeId === b.recipeId &&
+  a.distance_m === b.distance_m &&
+  a.side === b.side;
 
 export function editBank(state: BankHistory, edit: BankEdit): BankHistory {
   switch (edit.type) {

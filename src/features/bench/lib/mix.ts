@@ -26,7 +26,15 @@ export function bankOfMix(
     const placed = lines.find((line) => line.partId === part.id && !line.locked);
     if (placed) return [{ ...placed, count }];
     return keyed([
-      { partId: part.id, count, mount_H: null, distance_m: newPartDistance_m, side: 'top', locked: false },
+      {
+        partId: part.id,
+        count,
+        mount_H: null,
+        recipeId: null,
+        distance_m: newPartDistance_m,
+        side: 'top',
+        locked: false,
+      },
     ]);
   });
   found.sort((a, b) => (parts.get(b.partId)?.capacitance_F ?? 0) - (parts.get(a.partId)?.capacitance_F ?? 0));

@@ -28,6 +28,9 @@ function rail(version: number): RailWithParts {
         engineVersion: '1',
         holds: null,
         tightest: null,
+        catalogue: null,
+        worst: null,
+        missing: null,
         parts: 0,
         kinds: 0,
         cost: 0,
@@ -40,7 +43,7 @@ function rail(version: number): RailWithParts {
 }
 
 const line = (count: number): RailEdit => ({
-  bank: [{ partId: ID, count, mount_H: null, distance_m: null, side: 'top', locked: false }],
+  bank: [{ partId: ID, count, mount_H: null, recipeId: null, distance_m: null, side: 'top', locked: false }],
 });
 
 function saver(

@@ -55,12 +55,17 @@ const rail = (id: string, count: number, holds = true): Rail => ({
     source: { kind: 'rl', resistance_ohm: 0.01, inductance_H: 1e-8 },
     observe: 'pins',
   },
-  bank: [{ partId: 'p1', count, mount_H: null, distance_m: null, side: 'top', locked: false }],
+  bank: [
+    { partId: 'p1', count, mount_H: null, recipeId: null, distance_m: null, side: 'top', locked: false },
+  ],
   search: searchSettingsSchema.parse({}),
   summary: {
     engineVersion: '1',
     holds,
     tightest: null,
+    catalogue: null,
+    worst: null,
+    missing: null,
     parts: count,
     kinds: 1,
     cost: null,
