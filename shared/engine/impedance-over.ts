@@ -63,7 +63,7 @@ function invert({ g, b }: ComplexArray, frequency_Hz: ArrayLike<number>): void {
  * Adds `count` times the admittance of one branch to `total`. For a series branch: one division an element,
  * Y = (R − jX)/(R² + X²) with X = ωL − D/ω, 1/ω divided once for all members.
  */
-function addAdmittance(
+export function addAdmittance(
   branch: Branch,
   count: number,
   omega: Float64Array,

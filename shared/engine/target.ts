@@ -17,6 +17,23 @@ export function targetFromStep(voltage_V: number, ripple_percent: number, step_A
   return (voltage_V * ripple_percent) / 100 / step_A;
 }
 
+/**
+ * Level up to `corner_Hz`, above it rising by 20 dB a decade: an inductive limit, or the counterpart of a load spectrum that falls
+ * as fast. The rise goes on for nine decades, beyond any band.
+ */
+export function risingTarget(impedance_ohm: number, corner_Hz: number): TargetMask {
+  return maskTarget([
+    [corner_Hz, impedance_ohm],
+    [corner_Hz * 1e9, impedance_ohm * 1e9],
+  ]);
+}
+
+/** Where the spectrum of a trapezoidal load begins to fall by a further 20 dB a decade, Hz: 1/(π·t_r) (Ott 2009, ch. 11). */
+export function spectrumCorner_Hz(rise_s: number): number {
+  if (!(rise_s > 0)) throw new EngineError('rise_s', 'the rise time must be above zero');
+  return 1 / (Math.PI * rise_s);
+}
+
 /** Builds a mask from [Hz, ohm] points; throws EngineError when they do not rise or are not positive. */
 export function maskTarget(points: readonly (readonly [number, number])[]): TargetMask {
   if (points.length === 0) throw new EngineError('target.points', 'a mask needs at least one point');

@@ -21,6 +21,7 @@ const SPELLINGS: Readonly<Record<UnitSymbol, readonly string[]>> = {
   'mm²': ['mm²', 'mm2'],
   W: ['W'],
   J: ['J'],
+  C: ['C'],
   '%': ['%'],
   dB: ['dB'],
   '': [],

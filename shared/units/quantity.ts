@@ -28,6 +28,7 @@ export type UnitSymbol =
   | 'mm²'
   | 'W'
   | 'J'
+  | 'C'
   | '%'
   | 'dB'
   | '';

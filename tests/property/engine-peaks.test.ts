@@ -62,7 +62,7 @@ describe('peaks of random rails', () => {
         expect(tightest.headroom_dB).toBeLessThanOrEqual(dense + 1e-9);
         expect(tightest.headroom_dB).toBeGreaterThan(dense - 1.5);
         const all = surfaceMaxima(rail, [LOW, HIGH], mask).map((m) => m.headroom_dB);
-        expect(Math.min(...all)).toBe(tightest.headroom_dB);
+        expect(Math.min(...all)).toBeCloseTo(tightest.headroom_dB, 9);
       }),
       { numRuns: 150, seed: 33 },
     );
