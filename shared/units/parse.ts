@@ -104,6 +104,10 @@ const LENGTHS: Readonly<Record<string, number>> = {
   um: -6,
   µm: -6,
   μm: -6,
+  // As copper is ordered: 35u.
+  u: -6,
+  µ: -6,
+  μ: -6,
   m: 0,
 };
 /** 1 inch is 25.4 mm exactly (International yard and pound agreement, 1959). */

@@ -81,6 +81,8 @@ describe('reading quantities', () => {
   it('reads lengths, bare ones as millimetres', () => {
     expect(parseLength('12')).toEqual({ ok: true, value: 0.012 });
     expect(parseLength('100um')).toEqual({ ok: true, value: 1e-4 });
+    for (const text of ['35u', '35 µ', '35 μm'])
+      expect(parseLength(text)).toEqual({ ok: true, value: 3.5e-5 });
     // 1 inch = 25.4 mm exactly (International yard and pound agreement, 1959)
     expect(parseLength('5 mil')).toEqual({ ok: true, value: 5 * 2.54e-5 });
     expect(parseLength('3 ft').ok).toBe(false);
