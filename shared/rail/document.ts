@@ -21,6 +21,15 @@ export function documentPart(part: Part): DocumentPart {
     rated_voltage_V: part.rated_voltage_V,
     ...(part.height_mm !== null && { height_mm: part.height_mm }),
     termination: part.termination,
+    ...(part.bias_curve !== null && { bias_curve: part.bias_curve }),
+    ...(part.temperature_curve !== null && { temperature_curve: part.temperature_curve }),
+    ...(part.ageing_percent_per_decade !== null && {
+      ageing_percent_per_decade: part.ageing_percent_per_decade,
+    }),
+    ...(part.esr_table !== null && { esr_table: part.esr_table }),
+    ...(part.impedance_table !== null && { impedance_table: part.impedance_table }),
+    ...(part.esr_tolerance_percent !== null && { esr_tolerance_percent: part.esr_tolerance_percent }),
+    ...(part.esl_tolerance_percent !== null && { esl_tolerance_percent: part.esl_tolerance_percent }),
   };
 }
 

@@ -34,6 +34,32 @@ const fields = {
   area_mm2: 1.1,
 };
 
+const behaviour = {
+  bias_curve: [
+    [0, 1],
+    [3.3, 0.92],
+    [16, 0.57],
+  ],
+  temperature_curve: [
+    [-55, 0.9],
+    [25, 1],
+    [125, 0.87],
+  ],
+  ageing_percent_per_decade: 2.5,
+  esr_table: [
+    [1e5, 0.05],
+    [3e7, 0.02],
+  ],
+  impedance_table: [
+    [1e6, 0.039, -1.59],
+    [3e7, 0.021, 0.004],
+    [1e9, 0.12, 1.88],
+  ],
+  esr_tolerance_percent: 25,
+  esl_tolerance_percent: 0,
+};
+const nothingKnown = Object.fromEntries(Object.keys(behaviour).map((name) => [name, null]));
+
 describe('the parts list', () => {
   it('filters by each column', async () => {
     const all = await find('');
@@ -79,6 +105,22 @@ describe('the parts list', () => {
       }
     }
     await engineer.get('/parts?sort=id;DROP').expect(400);
+  });
+
+  it('carries curves and stays small enough to be read whole', async () => {
+    const { text } = await engineer.get('/parts?limit=100').expect(200);
+    const { items } = partPageSchema.parse(JSON.parse(text));
+    expect(items.filter((part) => part.bias_curve).length).toBeGreaterThan(30);
+    expect(items.filter((part) => part.technology === 'ceramic' && !part.bias_curve).length).toBeGreaterThan(
+      5,
+    );
+    expect(items.filter((part) => part.esr_table).map((part) => part.partNumber)).toEqual([
+      'AB-P7343-470U-2V5-6M',
+    ]);
+    expect(items.filter((part) => part.impedance_table).map((part) => part.partNumber)).toEqual([
+      'AB-C0402-X7R-100N-16',
+    ]);
+    expect(text.length).toBeLessThan(300_000);
   });
 
   it('counts what it holds for the filters', async () => {
@@ -139,7 +181,12 @@ describe('a part', () => {
     const before = (await engineer.get(rail)).body.rail;
     const revision = (await engineer.get(`/boards/${DEMO_BOARD}/revisions/B`)).body;
     await librarian
-      .patch(`/parts/${partId('AB-P7343-470U-2V5-6M')}`, { version: 1, esr_ohm: 0.05, unit_cost: 1.88 })
+      .patch(`/parts/${partId('AB-P7343-470U-2V5-6M')}`, {
+        version: 1,
+        esr_ohm: 0.05,
+        esr_table: null,
+        unit_cost: 1.88,
+      })
       .expect(200);
     const after = (await engineer.get(rail)).body.rail;
     expect(after.version).toBe(before.version);
@@ -147,6 +194,59 @@ describe('a part', () => {
     expect(after.summary.cost).toBeCloseTo(before.summary.cost + 4, 9);
     expect((await engineer.get(`/boards/${DEMO_BOARD}`)).body.changedRails).toBe(1);
     expect((await engineer.get(`/boards/${DEMO_BOARD}/revisions/B`)).body).toEqual(revision);
+  });
+
+  it('keeps its curves and tables as they are given, in the library’s list as well', async () => {
+    const { body: part } = await engineer.post('/parts', { ...fields, ...behaviour }).expect(201);
+    expect(partSchema.parse(part)).toMatchObject(behaviour);
+    expect((await engineer.get(`/parts/${part.id}`).expect(200)).body).toEqual(part);
+    expect((await find('?q=ab-new-1')).items).toEqual([part]);
+  });
+
+  it('keeps the curves that a change leaves out and forgets those that it empties', async () => {
+    const { body: part } = await engineer.post('/parts', { ...fields, ...behaviour }).expect(201);
+    const address = `/parts/${part.id}`;
+    const kept = (await engineer.patch(address, { version: 1, esr_ohm: 0.03 }).expect(200)).body;
+    expect(kept).toMatchObject({ ...fields, ...behaviour, esr_ohm: 0.03 });
+    const change = { version: 2, bias_curve: null, esl_tolerance_percent: null };
+    const some = (await engineer.patch(address, change).expect(200)).body;
+    expect(some).toMatchObject({ ...behaviour, bias_curve: null, esl_tolerance_percent: null });
+    const bare = (await engineer.patch(address, { version: 3, ...nothingKnown }).expect(200)).body;
+    expect(bare).toMatchObject({ ...fields, ...nothingKnown, esr_ohm: 0.03 });
+    expect((await find('?q=ab-new-1')).items).toEqual([bare]);
+  });
+
+  it('says at which point a curve is wrong', async () => {
+    const refused = async (wrong: object) =>
+      (await engineer.post('/parts', { ...fields, ...wrong }).expect(422)).body.errors;
+    const at = (path: string, message: string) => [{ path, message: expect.stringContaining(message) }];
+    const bias = (...points: number[][]) => refused({ bias_curve: points });
+    expect(await bias([0, 1], [5, 0.8], [5, 0.7])).toEqual(at('bias_curve[2][0]', 'must rise'));
+    expect(await bias([1, 1], [5, 0.8])).toEqual(at('bias_curve', 'first point is 0 V with factor 1'));
+    expect(await bias([0, 0.9], [5, 0.8])).toEqual(at('bias_curve', 'first point is 0 V with factor 1'));
+    expect(await bias([0, 1], [5, -0.8])).toEqual(at('bias_curve[1][1]', 'above zero'));
+    expect(await bias([0, 1])).toEqual(at('bias_curve', 'at least two points'));
+    const many = Array.from({ length: 201 }, (_, i) => [i - 60, 1]);
+    expect(await refused({ temperature_curve: many })).toEqual(at('temperature_curve', 'at most 200'));
+    const impedance_table = [
+      [1e6, 0.04, -1.6],
+      [1e7, -0.02, -0.1],
+    ];
+    expect(await refused({ impedance_table })).toEqual(at('impedance_table[1][1]', 'must not be negative'));
+    expect(await refused({ esr_tolerance_percent: 95 })).toEqual(at('esr_tolerance_percent', 'at most 90'));
+    expect((await find('?q=ab-new-1')).total).toBe(0);
+  });
+
+  it('renews the results of its rails when its ESR over frequency changes', async () => {
+    const rail = `/boards/${DEMO_BOARD}/rails/${railId('VDD_CORE')}`;
+    const before = (await engineer.get(rail)).body.rail.summary;
+    const esr_table = [
+      [1e3, 0.2],
+      [1e8, 0.05],
+    ];
+    await librarian.patch(`/parts/${partId('AB-P7343-470U-2V5-6M')}`, { version: 1, esr_table }).expect(200);
+    const after = (await engineer.get(rail)).body.rail.summary;
+    expect(after.tightest.headroom_dB).toBeLessThan(before.tightest.headroom_dB - 0.5);
   });
 
   it('refuses numbers that are no numbers', async () => {

@@ -1,4 +1,5 @@
 import type { PartFields } from '@shared/schemas/part.schema';
+import { ceramicBehaviour, POLYMER_TEMPERATURE, UNKNOWN } from './part-curves';
 
 /** What every part of a case shares: parasitics, mount, size. */
 interface CaseFigures {
@@ -67,6 +68,7 @@ export function ceramic(
     ...cases[caseSize],
     termination: 'standard',
     unit_cost,
+    ...ceramicBehaviour(caseSize, dielectric, exact(capacitance_F), rated_voltage_V),
     ...more,
   };
 }
@@ -95,6 +97,8 @@ export function bulk(
     ...cases[caseSize],
     termination: 'standard',
     unit_cost,
+    ...UNKNOWN,
+    ...(technology === 'polymer' && { temperature_curve: POLYMER_TEMPERATURE }),
     ...more,
   };
 }

@@ -1,8 +1,17 @@
 import type { PartFields, PartState } from '@shared/schemas/part.schema';
+import { measuredImpedance, polymerEsr } from './part-curves';
 import { bulk, ceramic } from './part-families';
 
 const n = 1e-9;
 const u = 1e-6;
+
+/** Spreads that the maker would state for its own parts. */
+const spread = (esr_tolerance_percent: number, esl_tolerance_percent: number) => ({
+  esr_tolerance_percent,
+  esl_tolerance_percent,
+});
+
+const hundredNano = ceramic('0402', 'X7R', 100 * n, 16, 0.003, spread(25, 10));
 
 const approved: PartFields[] = [
   ceramic('0201', 'C0G', 100e-12, 25, 0.003),
@@ -19,11 +28,11 @@ const approved: PartFields[] = [
   ceramic('0402', 'X7R', 10 * n, 50, 0.002),
   ceramic('0402', 'X7R', 22 * n, 25, 0.003),
   ceramic('0402', 'X7R', 47 * n, 25, 0.003),
-  ceramic('0402', 'X7R', 100 * n, 16, 0.003),
+  { ...hundredNano, impedance_table: measuredImpedance(hundredNano) },
   ceramic('0402', 'X7R', 220 * n, 16, 0.006),
-  ceramic('0402', 'X7R', 470 * n, 10, 0.009),
+  ceramic('0402', 'X7R', 470 * n, 10, 0.009, spread(20, 10)),
   ceramic('0402', 'X6S', 1 * u, 10, 0.009),
-  ceramic('0402', 'X6S', 2.2 * u, 6.3, 0.014),
+  ceramic('0402', 'X6S', 2.2 * u, 6.3, 0.014, spread(20, 10)),
   ceramic('0402', 'X5R', 4.7 * u, 6.3, 0.021),
   ceramic('0402', 'X5R', 10 * u, 4, 0.034),
   ceramic('0402', 'X6S', 10 * u, 4, 0.048),
@@ -43,7 +52,7 @@ const approved: PartFields[] = [
   ceramic('0805', 'X7R', 1 * u, 50, 0.026),
   ceramic('0805', 'X7R', 4.7 * u, 16, 0.044),
   ceramic('0805', 'X7R', 10 * u, 10, 0.062),
-  ceramic('0805', 'X6S', 22 * u, 6.3, 0.088),
+  ceramic('0805', 'X6S', 22 * u, 6.3, 0.088, spread(20, 10)),
   ceramic('0805', 'X7S', 22 * u, 6.3, 0.112),
   ceramic('0805', 'X5R', 47 * u, 6.3, 0.165),
   ceramic('1206', 'X7R', 1 * u, 100, 0.061),
@@ -54,10 +63,10 @@ const approved: PartFields[] = [
   ceramic('1210', 'X7S', 4.7 * u, 100, 0.24, { termination: 'soft' }),
   ceramic('1210', 'X7R', 22 * u, 16, 0.23),
   ceramic('1210', 'X5R', 100 * u, 6.3, 0.39),
-  bulk('polymer', '7343', 150 * u, 6.3, 0.012, 0.58),
-  bulk('polymer', '7343', 220 * u, 6.3, 0.009, 0.66),
-  bulk('polymer', '7343', 330 * u, 4, 0.007, 0.74),
-  bulk('polymer', '7343', 470 * u, 2.5, 0.006, 0.88),
+  bulk('polymer', '7343', 150 * u, 6.3, 0.012, 0.58, spread(30, 15)),
+  bulk('polymer', '7343', 220 * u, 6.3, 0.009, 0.66, spread(30, 15)),
+  bulk('polymer', '7343', 330 * u, 4, 0.007, 0.74, spread(30, 15)),
+  bulk('polymer', '7343', 470 * u, 2.5, 0.006, 0.88, { ...spread(30, 15), esr_table: polymerEsr(0.006) }),
   bulk('tantalum', '7343', 100 * u, 16, 0.075, 0.52),
   bulk('tantalum', '7343', 220 * u, 10, 0.06, 0.61),
   bulk('aluminium', 'D8', 47 * u, 100, 0.32, 0.24),

@@ -30,6 +30,13 @@ export class PartEntity {
   @Column({ type: 'text', default: 'standard' }) termination!: PartFields['termination'];
   @Column({ name: 'unit_cost', type: 'real', nullable: true }) unit_cost!: number | null;
   @Column({ name: 'area_mm2', type: 'real', nullable: true }) area_mm2!: number | null;
+  @Column({ type: 'simple-json', nullable: true }) bias_curve!: PartFields['bias_curve'];
+  @Column({ type: 'simple-json', nullable: true }) temperature_curve!: PartFields['temperature_curve'];
+  @Column({ type: 'real', nullable: true }) ageing_percent_per_decade!: number | null;
+  @Column({ type: 'simple-json', nullable: true }) esr_table!: PartFields['esr_table'];
+  @Column({ type: 'simple-json', nullable: true }) impedance_table!: PartFields['impedance_table'];
+  @Column({ type: 'real', nullable: true }) esr_tolerance_percent!: number | null;
+  @Column({ type: 'real', nullable: true }) esl_tolerance_percent!: number | null;
   @Column({ type: 'text', default: 'draft' }) state!: PartState;
   @Column({ type: 'integer', default: 1 }) version!: number;
   @Column({ name: 'created_at', type: 'text' }) createdAt!: string;
