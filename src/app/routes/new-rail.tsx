@@ -26,6 +26,8 @@ export function Component() {
     <Page title={TITLE} lead="Type values as you are used to: 4u7, 0.5 nH, 3m, 35 MHz.">
       <SpecFormView
         start={EMPTY_SPEC}
+        boardId={boardId}
+        setup={board.data.setup}
         submitText="Make the rail"
         pending={create.isPending}
         failure={create.error}

@@ -1,4 +1,5 @@
-import { railWithPartsSchema } from '@shared/schemas/rail.schema';
+import type { BoardSetup } from '@shared/schemas/board-setup.schema';
+import { type RailWithParts, railWithPartsSchema } from '@shared/schemas/rail.schema';
 import type { RailSpec } from '@shared/schemas/rail-spec.schema';
 import { useQueryClient } from '@tanstack/react-query';
 import { useRef, useState } from 'react';
@@ -11,21 +12,15 @@ import { paths } from '@/config/paths';
 import { useBoard } from '@/features/boards/api/boards';
 import { cacheRail, useDeleteRail, useRail, useUpdateRail } from '@/features/rails/api/rails';
 import { SpecFormView } from '@/features/rails/components/spec-form';
-import { formOf } from '@/features/rails/lib/spec-form-values';
+import { formOf } from '@/features/rails/lib/form-of';
 import { ApiError, messageOf } from '@/lib/problem';
 import { usePageTitle } from '@/lib/use-page-title';
 import { ReadOnly } from '../read-only';
 
 export function Component() {
   const { boardId = '', railId = '' } = useParams();
-  const navigate = useNavigate();
-  const client = useQueryClient();
   const board = useBoard(boardId);
   const rail = useRail(boardId, railId);
-  const update = useUpdateRail(boardId, railId);
-  const remove = useDeleteRail(boardId);
-  const [removing, setRemoving] = useState(false);
-  const spec = useRef<RailSpec | null>(null);
   usePageTitle(`Specification of ${rail.data?.rail.spec.name ?? 'a rail'}`, board.data?.name);
   if (board.isError && !board.data)
     return <Failure error={board.error} what="the board" retry={() => void board.refetch()} />;
@@ -39,18 +34,32 @@ export function Component() {
       />
     );
   if (!rail.data || !board.data) return <Loading what="the rail" />;
-  const { version, spec: stored } = rail.data.rail;
-  const title = `Specification of ${stored.name}`;
-  if (!board.data.rights.edit) return <ReadOnly title={title} boardId={boardId} railId={railId} />;
+  const { spec } = rail.data.rail;
+  if (!board.data.rights.edit)
+    return <ReadOnly title={`Specification of ${spec.name}`} boardId={boardId} railId={railId} />;
+  return <Editor key={railId} rail={rail.data.rail} setup={board.data.setup} />;
+}
+
+function Editor({ rail, setup }: { rail: RailWithParts['rail']; setup: BoardSetup }) {
+  const { boardId, id: railId } = rail;
+  const navigate = useNavigate();
+  const client = useQueryClient();
+  const update = useUpdateRail(boardId, railId);
+  const remove = useDeleteRail(boardId);
+  const [removing, setRemoving] = useState(false);
+  const [opened] = useState(rail);
+  // A specification that somebody has changed since must not be overwritten unseen; a changed bank does not stand in this form.
+  const since = JSON.stringify(rail.spec) === JSON.stringify(opened.spec) ? rail : opened;
+  const typed = useRef<RailSpec | null>(null);
   const back = () => navigate(paths.bench(boardId, railId));
   const save = (next: RailSpec, from: number) => {
-    spec.current = next;
+    typed.current = next;
     update.mutate({ version: from, spec: next }, { onSuccess: back });
   };
   const conflict = newerIn(update.error);
   return (
     <Page
-      title={title}
+      title={`Specification of ${rail.spec.name}`}
       lead="Type values as you are used to: 4u7, 0.5 nH, 3m, 35 MHz."
       actions={
         <>
@@ -62,12 +71,14 @@ export function Component() {
       }
     >
       <SpecFormView
-        start={formOf(stored)}
+        start={formOf(opened.spec)}
+        boardId={boardId}
+        setup={setup}
         submitText="Save the specification"
         pending={update.isPending}
         failure={conflict ? null : update.error}
         wayOut={<ButtonLink to={paths.board(boardId)}>To the board</ButtonLink>}
-        onSubmit={(next) => save(next, version)}
+        onSubmit={(next) => save(next, since.version)}
       />
       <Dialog title="This rail has changed meanwhile" open={conflict !== null} onClose={() => update.reset()}>
         {conflict && (
@@ -79,7 +90,7 @@ export function Component() {
             <div className="flex flex-wrap gap-3">
               <Button
                 variant="primary"
-                onClick={() => spec.current && save(spec.current, conflict.rail.version)}
+                onClick={() => typed.current && save(typed.current, conflict.rail.version)}
               >
                 Save mine over it
               </Button>
@@ -103,10 +114,13 @@ export function Component() {
             variant="danger"
             disabled={remove.isPending}
             onClick={() =>
-              remove.mutate({ railId, version }, { onSuccess: () => navigate(paths.board(boardId)) })
+              remove.mutate(
+                { railId, version: rail.version },
+                { onSuccess: () => navigate(paths.board(boardId)) },
+              )
             }
           >
-            <span className="max-w-[24ch] truncate">Delete {stored.name}</span>
+            <span className="max-w-[24ch] truncate">Delete {rail.spec.name}</span>
           </Button>
           <Button onClick={() => setRemoving(false)}>Keep it</Button>
         </div>
@@ -116,7 +130,7 @@ export function Component() {
 }
 
 /** The newer state that a refused save came back with. */
-function newerIn(error: unknown) {
+function newerIn(error: unknown): RailWithParts | null {
   if (!(error instanceof ApiError) || error.status !== 409) return null;
   const current = railWithPartsSchema.safeParse(error.problem.current);
   return current.success ? current.data : null;

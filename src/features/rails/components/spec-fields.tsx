@@ -1,27 +1,23 @@
 import type { UnitSymbol } from '@shared/units/quantity';
 import type { ReactNode } from 'react';
 import { Field } from '@/components/ui/field';
-import { Select, Textarea } from '@/components/ui/input';
+import { Checkbox, Input, Select, Textarea } from '@/components/ui/input';
 import { UnitInput } from '@/components/ui/quantity-input';
-import type { SpecErrors, SpecField, SpecForm } from '../lib/spec-form';
+import type { SpecField, SpecForm } from '../lib/spec-form';
+import type { SpecBinding } from './spec-binding';
 
-/** What each field of the form needs: the typed text, what is wrong with it, how to change it. */
-export interface SpecBinding {
-  form: SpecForm;
-  errors: SpecErrors;
-  set: (patch: Partial<SpecForm>) => void;
-}
+/** Fields of one kind of value. */
+type FieldOf<T> = { [K in SpecField]: SpecForm[K] extends T ? K : never }[SpecField];
 
 interface TextProps {
   bind: SpecBinding;
-  field: SpecField;
+  field: FieldOf<string>;
   label: string;
-  unit: UnitSymbol;
   hint?: ReactNode;
 }
 
 /** A quantity as text with its unit. */
-export function QuantityField({ bind, field, label, unit, hint }: TextProps) {
+export function QuantityField({ bind, field, label, unit, hint }: TextProps & { unit: UnitSymbol }) {
   return (
     <Field label={label} hint={hint} error={bind.errors[field]}>
       {(control) => (
@@ -29,7 +25,7 @@ export function QuantityField({ bind, field, label, unit, hint }: TextProps) {
           {...control}
           unit={unit}
           name={field}
-          value={String(bind.form[field])}
+          value={bind.form[field]}
           onChange={(event) => bind.set({ [field]: event.target.value })}
         />
       )}
@@ -37,16 +33,35 @@ export function QuantityField({ bind, field, label, unit, hint }: TextProps) {
   );
 }
 
-export function PointsField({ bind, field, label, hint }: Omit<TextProps, 'unit'>) {
+/** A text that is no quantity with a prefix: a name, a temperature, an age. */
+export function TextField({ bind, field, label, hint, placeholder }: TextProps & { placeholder?: string }) {
   return (
     <Field label={label} hint={hint} error={bind.errors[field]}>
+      {(control) => (
+        <Input
+          {...control}
+          name={field}
+          value={bind.form[field]}
+          placeholder={placeholder}
+          onChange={(event) => bind.set({ [field]: event.target.value })}
+        />
+      )}
+    </Field>
+  );
+}
+
+/** Points, one a line; while one types the hint says what cannot be read yet. */
+export function PointsField({ bind, field, label, hint }: TextProps) {
+  const unread = bind.form[field].trim() === '' ? undefined : bind.live[field];
+  return (
+    <Field label={label} hint={unread ? `${hint}; not yet read: ${unread}` : hint} error={bind.errors[field]}>
       {(control) => (
         <Textarea
           {...control}
           name={field}
           rows={5}
           spellCheck={false}
-          value={String(bind.form[field])}
+          value={bind.form[field]}
           onChange={(event) => bind.set({ [field]: event.target.value })}
         />
       )}
@@ -54,21 +69,28 @@ export function PointsField({ bind, field, label, hint }: Omit<TextProps, 'unit'
   );
 }
 
-interface ChoiceProps<K extends SpecField> {
+interface ChoiceProps<K extends FieldOf<string>> {
   bind: SpecBinding;
   field: K;
   label: string;
+  hint?: ReactNode;
   options: readonly (readonly [SpecForm[K] & string, string])[];
 }
 
-export function ChoiceField<K extends SpecField>({ bind, field, label, options }: ChoiceProps<K>) {
+export function ChoiceField<K extends FieldOf<string>>({
+  bind,
+  field,
+  label,
+  hint,
+  options,
+}: ChoiceProps<K>) {
   return (
-    <Field label={label}>
+    <Field label={label} hint={hint} error={bind.errors[field]}>
       {(control) => (
         <Select
           {...control}
           name={field}
-          value={String(bind.form[field])}
+          value={bind.form[field]}
           onChange={(event) => bind.set({ [field]: event.target.value } as Partial<SpecForm>)}
         >
           {options.map(([value, text]) => (
@@ -82,27 +104,16 @@ export function ChoiceField<K extends SpecField>({ bind, field, label, options }
   );
 }
 
-/** One subject of the form: its name at the left, its fields in a row, what they come to below. */
-export function SpecGroup({
-  title,
-  result,
-  children,
-}: {
-  title: string;
-  result?: string;
-  children: ReactNode;
-}) {
+/** Whether a subject is described at all; its fields appear with it. */
+export function DescribedField({ bind, field }: { bind: SpecBinding; field: FieldOf<boolean> }) {
   return (
-    <fieldset className="grid gap-x-8 gap-y-2 border-t py-5 md:grid-cols-[10rem_1fr]">
-      <legend className="float-left font-semibold md:w-40">{title}</legend>
-      <div className="flex flex-col gap-4">
-        <div className="grid grid-cols-1 gap-4 sm:grid-cols-2 xl:grid-cols-4">{children}</div>
-        {result && (
-          <output className="font-semibold text-deep" aria-live="polite">
-            {result}
-          </output>
-        )}
-      </div>
-    </fieldset>
+    <div className="flex items-center">
+      <Checkbox
+        label="described"
+        name={field}
+        checked={bind.form[field]}
+        onChange={(event) => bind.set({ [field]: event.target.checked })}
+      />
+    </div>
   );
 }

@@ -1,24 +1,29 @@
+import type { BoardSetup } from '@shared/schemas/board-setup.schema';
 import type { RailSpec } from '@shared/schemas/rail-spec.schema';
-import { type FormEvent, type ReactNode, useRef, useState } from 'react';
+import { type FormEvent, type ReactNode, useDeferredValue, useMemo, useRef, useState } from 'react';
 import { Button } from '@/components/ui/button';
-import { Field } from '@/components/ui/field';
-import { Input } from '@/components/ui/input';
-import { Notice } from '@/components/ui/notice';
-import { ApiError, isGone, messageOf } from '@/lib/problem';
-import {
-  bandSentence,
-  errorsAtFields,
-  planeSentence,
-  readSpec,
-  type SpecForm,
-  targetSentence,
-} from '../lib/spec-form';
-import { LoadFields } from './load-fields';
+import { ApiError } from '@/lib/problem';
+import { errorsAtFields } from '../lib/field-of-path';
+import { readSpec } from '../lib/read-spec';
+import { sentencesOf } from '../lib/sentences';
+import type { SpecForm } from '../lib/spec-form';
+import { BandFields } from './band-fields';
+import { ConditionsFields } from './conditions-fields';
+import { PackageFields } from './package-fields';
+import { PlaneFields } from './plane-fields';
 import { SourceFields } from './source-fields';
-import { ChoiceField, PointsField, QuantityField, type SpecBinding, SpecGroup } from './spec-fields';
+import type { SpecBinding } from './spec-binding';
+import { SpecFaults } from './spec-faults';
+import { QuantityField, TextField } from './spec-fields';
+import { SpecGroup } from './spec-group';
+import { TargetFields } from './target-fields';
+import { TimeFields } from './time-fields';
 
 interface SpecFormProps {
   start: SpecForm;
+  /** The board that the rail is on, with its stack-up. */
+  boardId: string;
+  setup: BoardSetup;
   submitText: string;
   pending: boolean;
   /** What the server said to the last try. */
@@ -26,144 +31,58 @@ interface SpecFormProps {
   /** Where to go when the server says that there is no such thing any more. */
   wayOut?: ReactNode;
   onSubmit: (spec: RailSpec) => void;
-  children?: ReactNode;
 }
 
 /** Everything that is said about a rail but its bank. Shows what each group comes to while one types. */
-export function SpecFormView({
-  start,
-  submitText,
-  pending,
-  failure,
-  wayOut,
-  onSubmit,
-  children,
-}: SpecFormProps) {
-  const [form, setForm] = useState(start);
+export function SpecFormView(props: SpecFormProps) {
+  const { setup, failure } = props;
+  const [form, setForm] = useState(props.start);
   const [tried, setTried] = useState(false);
   const element = useRef<HTMLFormElement>(null);
-  const answer = readSpec(form);
-  const own = tried && 'errors' in answer ? answer.errors : {};
+  // Long tables take a while to read: what is typed shows at once, what it comes to a moment later.
+  const settled = useDeferredValue(form);
+  const answer = useMemo(() => readSpec(settled, setup), [settled, setup]);
+  const said = useMemo(() => sentencesOf(settled, setup), [settled, setup]);
+  const live = 'errors' in answer ? answer.errors : {};
+  const own = tried ? live : {};
   const theirs = failure instanceof ApiError ? errorsAtFields(serverFaults(failure)) : {};
-  const errors = { ...theirs, ...own };
-  const bind: SpecBinding = { form, errors, set: (patch) => setForm((now) => ({ ...now, ...patch })) };
+  const bind: SpecBinding = {
+    form,
+    settled,
+    errors: { ...theirs, ...own },
+    live,
+    set: (patch) => setForm((now) => ({ ...now, ...patch })),
+    boardId: props.boardId,
+    setup,
+  };
   const submit = (event: FormEvent) => {
     event.preventDefault();
     setTried(true);
-    if ('spec' in answer) onSubmit(answer.spec);
+    const now = readSpec(form, setup);
+    if ('spec' in now) props.onSubmit(now.spec);
     else
       requestAnimationFrame(() =>
         element.current?.querySelector<HTMLElement>('[aria-invalid="true"]')?.focus(),
       );
   };
-  const faultCount = Object.keys(own).length;
   return (
     <form ref={element} noValidate onSubmit={submit} className="max-w-5xl">
       <SpecGroup title="rail">
-        <Field label="name" error={errors.name}>
-          {(control) => (
-            <Input
-              {...control}
-              name="name"
-              value={form.name}
-              placeholder="VDD_CORE"
-              onChange={(event) => bind.set({ name: event.target.value })}
-            />
-          )}
-        </Field>
+        <TextField bind={bind} field="name" label="name" placeholder="VDD_CORE" />
         <QuantityField bind={bind} field="voltage" label="voltage" unit="V" />
       </SpecGroup>
-      <SpecGroup title="target" result={targetSentence(form)}>
-        <ChoiceField
-          bind={bind}
-          field="targetKind"
-          label="given as"
-          options={[
-            ['step', 'ripple and step'],
-            ['flat', 'impedance'],
-            ['mask', 'a mask'],
-          ]}
-        />
-        {form.targetKind === 'step' && (
-          <>
-            <QuantityField bind={bind} field="ripple" label="ripple allowed" unit="%" />
-            <QuantityField bind={bind} field="step" label="load step" unit="A" />
-          </>
-        )}
-        {form.targetKind === 'flat' && (
-          <QuantityField bind={bind} field="impedance" label="target impedance" unit="Ω" />
-        )}
-        {form.targetKind === 'mask' && (
-          <PointsField
-            bind={bind}
-            field="mask"
-            label="points"
-            hint="one a line: frequency, impedance, e.g. 10k 3m"
-          />
-        )}
-      </SpecGroup>
-      <SpecGroup title="band" result={bandSentence(form)}>
-        <ChoiceField
-          bind={bind}
-          field="bandKind"
-          label="given as"
-          options={[
-            ['direct', 'frequencies'],
-            ['derived', 'from rise time'],
-          ]}
-        />
-        {form.bandKind === 'direct' ? (
-          <>
-            <QuantityField bind={bind} field="bandLow" label="from" unit="Hz" />
-            <QuantityField bind={bind} field="bandHigh" label="to" unit="Hz" />
-          </>
-        ) : (
-          <>
-            <QuantityField
-              bind={bind}
-              field="bandwidth"
-              label="regulator bandwidth"
-              unit="Hz"
-              hint="lower end"
-            />
-            <QuantityField
-              bind={bind}
-              field="rise"
-              label="rise time of the step"
-              unit="s"
-              hint="gives the upper end"
-            />
-            <ChoiceField
-              bind={bind}
-              field="knee"
-              label="knee frequency"
-              options={[
-                ['0.35', '0.35 ÷ rise time'],
-                ['0.5', '0.5 ÷ rise time'],
-              ]}
-            />
-          </>
-        )}
-      </SpecGroup>
-      <SourceFields bind={bind} planes={planeSentence(form)} />
-      <LoadFields bind={bind} />
-      {children}
+      <TargetFields bind={bind} result={said.target} />
+      <BandFields bind={bind} result={said.band} />
+      <SourceFields bind={bind} result={said.source} />
+      <PlaneFields bind={bind} result={said.planes} />
+      <PackageFields bind={bind} result={said.package} />
+      <TimeFields bind={bind} startUp={said.startUp} />
+      <ConditionsFields bind={bind} result={said.conditions} />
       <div className="flex flex-col gap-4 border-t py-5">
-        {Object.keys(own).length > 0 && (
-          <p role="alert" className="text-kingfisher">
-            ▲ {own.form ?? `${faultCount} ${faultCount === 1 ? 'field needs' : 'fields need'} another look`}
-          </p>
-        )}
-        {failure !== null &&
-          failure !== undefined &&
-          Object.keys(theirs).filter((key) => key !== 'form').length === 0 && (
-            <Notice tone="error" title="▲ not saved" action={isGone(failure) && wayOut}>
-              {messageOf(failure)}
-            </Notice>
-          )}
+        <SpecFaults own={own} theirs={theirs} failure={failure} wayOut={props.wayOut} />
         <div>
-          <Button type="submit" variant="primary" disabled={pending}>
-            {pending ? 'Saving …' : submitText}
+          <Button type="submit" variant="primary" disabled={props.pending}>
+            {props.pending ? 'Saving …' : props.submitText}
           </Button>
         </div>
       </div>

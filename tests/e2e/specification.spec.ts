@@ -1,0 +1,107 @@
+import { expect, type Page, test } from '@playwright/test';
+import { demoEmail, openBench, signIn } from './people';
+
+async function openSpecification(page: Page, rail: string): Promise<void> {
+  await openBench(page, rail);
+  await page.getByRole('link', { name: 'edit specification' }).click();
+  await expect(page.getByRole('heading', { name: `Specification of ${rail}` })).toBeVisible();
+}
+
+/** The noise budget's row as `millivolt, per cent`. */
+const budgetRow = (page: Page, name: string) =>
+  page.getByRole('table', { name: 'noise budget' }).getByRole('row', { name }).getByRole('cell');
+
+test.beforeEach(async ({ page }) => {
+  await signIn(page, demoEmail('engineer'));
+});
+
+test('turns the ripple of a rail into a budget, states conditions, and finds it all again', async ({
+  page,
+}) => {
+  await openSpecification(page, 'VDD_IO');
+  await expect(page.getByText('5 % of 1.8 V at 3 A → 30.0 mΩ')).toBeVisible();
+  await page.getByLabel('ripple', { exact: true }).selectOption('budget');
+  await page.getByLabel('rail tolerance, ±').fill('5');
+  await page.getByLabel('set-point error, ±').fill('0.5');
+  await page.getByLabel('DC drop').fill('6m');
+  await page.getByLabel('the regulator’s own ripple').fill('3mV');
+  // 90 mV − 9 mV − 6 mV − 3 mV = 72 mV, 4 % of 1.8 V; 72 mV ÷ 3 A = 24 mΩ
+  await expect(budgetRow(page, 'set-point error')).toHaveText(['9.0 mV', '0.50 %']);
+  await expect(budgetRow(page, 'DC drop')).toHaveText(['6.0 mV', '0.33 %']);
+  await expect(budgetRow(page, 'own ripple')).toHaveText(['3.0 mV', '0.17 %']);
+  await expect(budgetRow(page, 'left for the bank')).toHaveText(['72.0 mV', '4.00 %']);
+  await expect(budgetRow(page, 'rail tolerance')).toHaveText(['90.0 mV', '5.00 %']);
+  await expect(page.getByRole('img', { name: /^rail tolerance ±90\smV/ })).toBeVisible();
+  await expect(page.getByText('4 % of 1.8 V at 3 A → 24.0 mΩ')).toBeVisible();
+
+  await page.getByLabel('of this rail').selectOption('stated');
+  await page.getByLabel('coldest, °C').fill('-20');
+  await page.getByLabel('hottest, °C').fill('85 °C');
+  await page.getByLabel('age, years').fill('87660 h');
+  await page.getByRole('checkbox', { name: 'ESL' }).uncheck();
+  await expect(page.getByText(/^16 corners: cold or hot; new or aged; C and ESR/)).toBeVisible();
+  await page.getByRole('button', { name: 'Save the specification' }).click();
+  await expect(page.getByTestId('headroom')).toBeVisible();
+  await expect(page.getByText('24.0 mΩ').first()).toBeVisible();
+
+  await page.getByRole('link', { name: 'edit specification' }).click();
+  await page.reload();
+  await expect(page.getByLabel('ripple', { exact: true })).toHaveValue('budget');
+  await expect(page.getByLabel('set-point error, ±')).toHaveValue('0.5');
+  await expect(budgetRow(page, 'left for the bank')).toHaveText(['72.0 mV', '4.00 %']);
+  await expect(page.getByLabel('coldest, °C')).toHaveValue('-20');
+  await expect(page.getByLabel('usual, °C')).toHaveValue('45');
+  await expect(page.getByLabel('hottest, °C')).toHaveValue('85');
+  await expect(page.getByLabel('age, years')).toHaveValue('10');
+  await expect(page.getByRole('checkbox', { name: 'ESR' })).toBeChecked();
+  await expect(page.getByRole('checkbox', { name: 'ESL' })).not.toBeChecked();
+});
+
+test('refuses a budget that is overspent and says by how much', async ({ page }) => {
+  await openSpecification(page, 'VDD_AUX');
+  await page.getByLabel('ripple', { exact: true }).selectOption('budget');
+  await page.getByLabel('rail tolerance, ±').fill('3');
+  await page.getByLabel('DC drop').fill('132m');
+  // 132 mV of 3.3 V are 4 %: one per cent more than there is.
+  const sentence = 'nothing is left for the bank: overspent by 33 mV (1 %)';
+  await expect(page.getByText(sentence)).toBeVisible();
+  await page.getByRole('button', { name: 'Save the specification' }).click();
+  await expect(page.getByLabel('rail tolerance, ±')).toBeFocused();
+  await expect(page.getByLabel('rail tolerance, ±')).toHaveAccessibleDescription(`▲ ${sentence}`);
+  await expect(page.getByText('1 field needs another look')).toBeVisible();
+  await page.getByRole('button', { name: 'Back to the bench' }).click();
+  await expect(page.getByTestId('headroom')).toBeVisible();
+  await page.getByRole('link', { name: 'edit specification' }).click();
+  await expect(page.getByLabel('ripple', { exact: true })).toHaveValue('none');
+});
+
+test('reads the source from a file, says what is wrong by its line, and takes planes from the stack-up', async ({
+  page,
+}) => {
+  await openSpecification(page, 'VDD_AUX');
+  await page.getByLabel('output impedance').selectOption('table');
+  const take = (text: string) =>
+    page
+      .getByLabel('file with the source’s points')
+      .setInputFiles({ name: 'buck.csv', mimeType: 'text/csv', buffer: Buffer.from(text) });
+  await take('f (Hz),Re,Im\n1e3,0.01,0.001\n2e3,0.01\n');
+  await expect(page.getByText('▲ buck.csv: line 3: 3 numbers are wanted, 2 stand there')).toBeVisible();
+  await take('f (Hz),Re,Im\n1e3,0.01,0.001\n1e6,0.02,0.9\n');
+  await expect(
+    page.getByText('buck.csv: 2 points read, 1 line above the first number skipped'),
+  ).toBeVisible();
+  await expect(page.getByText(/^2 points cover 1\skHz to 1\sMHz; above 1\sMHz/)).toBeVisible();
+
+  await page.getByLabel('given as').nth(2).selectOption('stackup');
+  const planes = page.getByLabel('planes of the stack-up');
+  await page.getByRole('button', { name: 'Save the specification' }).click();
+  await expect(planes).toHaveAccessibleDescription('▲ choose two planes of the stack-up');
+  await planes.selectOption({ index: 1 });
+  await expect(page.getByText(/lie [\d.]+\smm apart, εr [\d.]+ → /)).toBeVisible();
+  await page.getByRole('button', { name: 'Save the specification' }).click();
+  await expect(page.getByTestId('headroom')).toBeVisible();
+  await page.getByRole('link', { name: 'edit specification' }).click();
+  await expect(page.getByLabel('output impedance')).toHaveValue('table');
+  await expect(page.getByLabel('given as').nth(2)).toHaveValue('stackup');
+  await expect(planes).toHaveValue('0');
+});
