@@ -12,6 +12,9 @@ import { PartForm } from './part-form';
 
 const NAMES = Object.keys(partFieldsSchema.shape) as (keyof PartFields)[];
 
+/** By what they say: curves are lists, and two lists are never the same object. */
+const differs = (a: unknown, b: unknown): boolean => JSON.stringify(a) !== JSON.stringify(b);
+
 interface Props {
   part: Part;
   onDone: () => void;
@@ -41,7 +44,7 @@ export function EditPart({ part, onDone }: Props) {
           what="this part"
           changedBy={conflict.changedBy}
           changedAt={conflict.changedAt}
-          differing={NAMES.filter((name) => typed[name] !== conflict.current[name])}
+          differing={NAMES.filter((name) => differs(typed[name], conflict.current[name]))}
           onLoadNewer={() => {
             void takePart(client, conflict.current);
             setBase(conflict.current);

@@ -3,13 +3,13 @@ import { formatLetterCode, formatQuantity } from '@shared/units/format';
 import { Facts } from '@/components/ui/facts';
 import { formatCost } from '@/lib/format-cost';
 import { dayAndTime } from '@/lib/time';
-import { resonance_Hz } from '../lib/part-curve';
+import { lowestOf } from '../lib/part-curves';
 import { toleranceText } from '../lib/tolerance';
 import { PartStateText } from './part-state';
 
 /** All that the library says about a part. */
 export function PartFacts({ part }: { part: Part }) {
-  const f0 = resonance_Hz(part, part.esl_H + part.mount_H);
+  const lowest = lowestOf(part);
   return (
     <Facts
       rows={[
@@ -26,7 +26,7 @@ export function PartFacts({ part }: { part: Part }) {
         ['ESR', formatQuantity(part.esr_ohm, 'Ω')],
         ['ESL', formatQuantity(part.esl_H, 'H')],
         ['usual mount', formatQuantity(part.mount_H, 'H')],
-        ['self-resonance, mounted', f0 === null ? '—' : formatQuantity(f0, 'Hz')],
+        ['resonance, mounted', lowest === null ? '—' : formatQuantity(lowest[0], 'Hz')],
         ['height', part.height_mm === null ? '—' : formatQuantity(part.height_mm, 'mm', { trim: true })],
         ['area', part.area_mm2 === null ? '—' : formatQuantity(part.area_mm2, 'mm²', { trim: true })],
         ['termination', part.termination],

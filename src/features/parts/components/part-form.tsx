@@ -7,8 +7,10 @@ import { Field } from '@/components/ui/field';
 import { Input, Select } from '@/components/ui/input';
 import { UnsavedGuard } from '@/components/ui/unsaved-guard';
 import { showServerFaults } from '@/lib/server-faults';
+import { atCurves } from '../lib/curve-faults';
 import { type PartFormInput, type PartFormOutput, partFormSchema } from '../lib/part-form.schema';
 import { TOLERANCES } from '../lib/tolerance';
+import { BehaviourFields } from './behaviour-fields';
 import { QuantityField } from './quantity-field';
 
 const NAMES = Object.keys(partFieldsSchema.shape) as FieldPath<PartFormInput>[];
@@ -33,7 +35,7 @@ export function PartForm({ initial, label, busy, save, onCancel, children }: Pro
   const { errors, isDirty, isSubmitting } = form.formState;
   const submit = form.handleSubmit((fields) =>
     save(fields).catch((error: unknown) => {
-      showServerFaults(error, NAMES, form.setError);
+      showServerFaults(atCurves(error), NAMES, form.setError);
     }),
   );
   const quantity = { control, register };
@@ -144,6 +146,7 @@ export function PartForm({ initial, label, busy, save, onCancel, children }: Pro
           )}
         </Field>
       </div>
+      <BehaviourFields form={form} />
       {children}
       <div className="flex gap-3">
         <Button type="submit" variant="primary" disabled={busy}>

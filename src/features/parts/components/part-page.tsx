@@ -5,9 +5,10 @@ import { Loading, Page, Section } from '@/components/ui/page';
 import { paths } from '@/config/paths';
 import { usePageTitle } from '@/lib/use-page-title';
 import { usePart } from '../api/part';
+import { BehaviourFacts } from './behaviour-facts';
 import { EditPart } from './edit-part';
+import { InService } from './in-service';
 import { PartCautions } from './part-cautions';
-import { PartChart } from './part-chart';
 import { PartFacts } from './part-facts';
 import { StateActions } from './state-actions';
 
@@ -48,9 +49,12 @@ export function PartPage({ partId, mayAdd, isLibrarian }: Props) {
       lead={part.description}
       actions={mayEdit && <Button onClick={() => setEditing(true)}>Edit</Button>}
     >
-      <div className="grid gap-x-12 gap-y-8 xl:grid-cols-[23rem_minmax(0,1fr)]">
+      <div className="grid gap-x-10 gap-y-8 xl:grid-cols-[20rem_minmax(0,1fr)] 2xl:grid-cols-[23rem_minmax(0,1fr)]">
         <div className="flex flex-col gap-5">
           <PartFacts part={part} />
+          <Section title="behaviour">
+            <BehaviourFacts part={part} />
+          </Section>
           {isLibrarian && <StateActions part={part} />}
           {!mayEdit && part.state !== 'draft' && (
             <p className="text-stone">
@@ -58,10 +62,8 @@ export function PartPage({ partId, mayAdd, isLibrarian }: Props) {
             </p>
           )}
         </div>
-        <div className="flex min-w-0 flex-col gap-5">
-          <Section title="impedance over frequency">
-            <PartChart part={part} />
-          </Section>
+        <div className="flex min-w-0 flex-col gap-6">
+          <InService key={part.version} part={part} />
           <PartCautions part={part} />
         </div>
       </div>

@@ -41,8 +41,50 @@ describe('the part form', () => {
     expect(paths).toEqual(expect.arrayContaining(['partNumber', 'capacitance_F', 'esr_ohm']));
   });
 
+  it('reads curves one point a line, and nothing as not known', () => {
+    const fields = partFormSchema.parse({
+      ...typed,
+      bias_curve: '# V, factor\n0 1\n3.3 0.62\n6V3 0.24',
+      impedance_table: '1M 39m -1.59\n30M 21m 4m',
+      ageing_percent_per_decade: '2 %',
+    });
+    expect(fields).toMatchObject({
+      bias_curve: [
+        [0, 1],
+        [3.3, 0.62],
+        [6.3, 0.24],
+      ],
+      impedance_table: [
+        [1e6, 0.039, -1.59],
+        [3e7, 0.021, 0.004],
+      ],
+      ageing_percent_per_decade: 2,
+      temperature_curve: null,
+      esr_table: null,
+      esr_tolerance_percent: null,
+    });
+  });
+
+  it.each([
+    ['bias_curve', '0 1\n\n# later\n5 0.6\n3 0.8', 'line 5: voltage must rise from point to point'],
+    ['bias_curve', '0 1\n3.3 x', 'line 2: “x” is not a number'],
+    ['bias_curve', '1 1\n3.3 0.7', 'the first point is 0 V with factor 1'],
+    ['temperature_curve', '-55 0.9\n25 -1', 'line 2: the factor must be above zero'],
+    ['esr_table', '1k 5m', 'a table needs at least two points'],
+    ['impedance_table', '1M 39m\n2M 1 1', 'line 1: 3 numbers are wanted, 2 stand there'],
+  ])('says at %s on which line it is wrong', (name, text, message) => {
+    const issues = partFormSchema.safeParse({ ...typed, [name]: text }).error?.issues ?? [];
+    expect(issues.map((issue) => [issue.path.join('.'), issue.message])).toEqual([[name, message]]);
+  });
+
   it('gives a saved part back unchanged', () => {
-    const fields = partFormSchema.parse(typed);
+    const fields = partFormSchema.parse({
+      ...typed,
+      temperature_curve: '-55 0.9\n25 1\n125 0.87',
+      esr_table: '100 57m\n1M 5.58m',
+      impedance_table: '10k 1.93 -159.2\n1G 0.1194 1.883',
+      esl_tolerance_percent: '12.5',
+    });
     const part: Part = {
       ...fields,
       id: '00000000-0000-4000-8000-000000000001',

@@ -3,6 +3,7 @@ import { formatInput } from '@shared/units/format';
 import { type Parsed, parseLength, parseQuantity } from '@shared/units/parse';
 import type { UnitSymbol } from '@shared/units/quantity';
 import { z } from 'zod';
+import { curveShape, curveText } from './curve-fields';
 
 const { shape } = partFieldsSchema;
 
@@ -16,6 +17,9 @@ export const QUANTITIES = {
   height_mm: 'mm',
   unit_cost: '',
   area_mm2: 'mm²',
+  ageing_percent_per_decade: '%',
+  esr_tolerance_percent: '%',
+  esl_tolerance_percent: '%',
 } as const satisfies Record<string, UnitSymbol>;
 export type QuantityName = keyof typeof QUANTITIES;
 
@@ -63,6 +67,10 @@ export const partFormSchema = z.object({
   height_mm: optional('mm', shape.height_mm.unwrap()),
   unit_cost: optional('', shape.unit_cost.unwrap()),
   area_mm2: optional('mm²', shape.area_mm2.unwrap()),
+  ageing_percent_per_decade: optional('%', shape.ageing_percent_per_decade.unwrap()),
+  esr_tolerance_percent: optional('%', shape.esr_tolerance_percent.unwrap()),
+  esl_tolerance_percent: optional('%', shape.esl_tolerance_percent.unwrap()),
+  ...curveShape,
 });
 export type PartFormInput = z.input<typeof partFormSchema>;
 export type PartFormOutput = z.output<typeof partFormSchema>;
@@ -83,6 +91,13 @@ export const EMPTY_PART: PartFormInput = {
   termination: 'standard',
   unit_cost: '',
   area_mm2: '',
+  ageing_percent_per_decade: '',
+  esr_tolerance_percent: '',
+  esl_tolerance_percent: '',
+  bias_curve: '',
+  temperature_curve: '',
+  esr_table: '',
+  impedance_table: '',
 };
 
 const plain = (value: number | null) => (value === null ? '' : String(value));
@@ -104,4 +119,11 @@ export const partFormInput = (part: Part): PartFormInput => ({
   termination: part.termination,
   unit_cost: plain(part.unit_cost),
   area_mm2: plain(part.area_mm2),
+  ageing_percent_per_decade: plain(part.ageing_percent_per_decade),
+  esr_tolerance_percent: plain(part.esr_tolerance_percent),
+  esl_tolerance_percent: plain(part.esl_tolerance_percent),
+  bias_curve: curveText('bias_curve', part.bias_curve),
+  temperature_curve: curveText('temperature_curve', part.temperature_curve),
+  esr_table: curveText('esr_table', part.esr_table),
+  impedance_table: curveText('impedance_table', part.impedance_table),
 });
