@@ -5,6 +5,7 @@ import { announce } from './announce';
 import { createApp } from './app';
 import { ConfigError, readConfig } from './config/environment';
 import { seedOnFirstRun } from './db/demo/seed';
+import { renewOldResults } from './services/renew-results';
 import { startContext } from './start-context';
 import { stopOnSignals } from './stop';
 
@@ -14,6 +15,7 @@ async function main(): Promise<void> {
   loadEnvironmentFile({ quiet: true });
   const ctx = await startContext(readConfig(process.env));
   if (ctx.config.demo) await seedOnFirstRun(ctx);
+  await renewOldResults(ctx);
   const server = createApp(ctx, { clientFolder: CLIENT_FOLDER }).listen(ctx.config.port, ctx.config.host);
   await new Promise<void>((resolve, reject) => {
     server.once('listening', resolve);

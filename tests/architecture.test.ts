@@ -41,7 +41,7 @@ function target(from: string, specifier: string): string {
 }
 
 const imports = (file: string): string[] =>
-  [...readFileSync(path.join(root, file), 'utf8').matchAll(/(?:from|import)\s*\(?\s*['"]([^'"]+)['"]/g)].map(
+  [...readFileSync(path.join(root, file), 'utf8').matchAll(/(?:from|import)\s*\(?\s*['"]([^'"\n]+)['"]/g)].map(
     (m) => target(file, m[1]),
   );
 

@@ -12,7 +12,7 @@ interface Entry {
 /** Loaded only when called, so that a command starts without the code of the others. */
 export const commands: Record<string, Entry> = {
   analyse: {
-    usage: 'analyse FILE',
+    usage: 'analyse FILE [--conditions]',
     what: 'impedance, peaks and headroom of a rail document; status 1 when it does not hold',
     load: () => import('./analyse'),
   },
@@ -20,6 +20,11 @@ export const commands: Record<string, Entry> = {
     usage: 'search FILE [--seconds N]',
     what: 'the smallest bank for a rail document, with its proof',
     load: () => import('./search'),
+  },
+  step: {
+    usage: 'step FILE [--conditions]',
+    what: 'voltage, droop and overshoot after the load step of a rail document',
+    load: () => import('./step'),
   },
   schema: { usage: 'schema', what: 'the rail document as JSON Schema', load: () => import('./schema') },
   admin: {

@@ -1,7 +1,9 @@
 import { createBoardSchema, setMemberSchema, updateBoardSchema } from '@shared/schemas/board.schema';
+import { setBoardSetupSchema } from '@shared/schemas/board-setup.schema';
 import { pageQuerySchema, versionQuerySchema } from '@shared/schemas/common.schema';
 import { createBoard, deleteBoard, listBoards, readBoard, updateBoard } from '../services/board.service';
 import { removeMember, setMember } from '../services/member.service';
+import { saveSetup } from '../services/setup.service';
 import { created, done, route } from './route';
 
 export const boardRoutes = [
@@ -31,6 +33,11 @@ export const boardRoutes = [
       await deleteBoard(ctx, actor, params.boardId, query.version);
       return done();
     },
+  }),
+  route('put', '/boards/:boardId/setup', {
+    access: 'signed-in',
+    body: setBoardSetupSchema,
+    handle: ({ ctx, actor, params, body }) => saveSetup(ctx, actor, params.boardId, body),
   }),
   route('put', '/boards/:boardId/members/:personId', {
     access: 'signed-in',

@@ -8,6 +8,7 @@ import { BoardMemberEntity } from '../db/entities/board-member.entity';
 import { stale } from '../errors/problems';
 import type { Actor } from './actor';
 import { openBoard } from './board-access';
+import { loadSetup } from './board-setup';
 import { boardSummaries, boardSummary } from './board-summary';
 import { personRef } from './person.service';
 
@@ -43,7 +44,7 @@ export async function boardDetail(
   boardId: string,
 ): Promise<BoardDetail> {
   const summary = await boardSummary(manager, actor, boardId);
-  return { ...summary, members: await membersOf(manager, boardId) };
+  return { ...summary, members: await membersOf(manager, boardId), ...(await loadSetup(manager, boardId)) };
 }
 
 export async function readBoard(ctx: Context, actor: Actor, boardId: string): Promise<BoardDetail> {

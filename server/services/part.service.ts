@@ -1,5 +1,12 @@
 import { randomUUID } from 'node:crypto';
-import { type Part, type PartFields, type PartState, partFieldsSchema } from '@shared/schemas/part.schema';
+import {
+  type Part,
+  type PartFields,
+  type PartState,
+  partFieldsSchema,
+  TOLERANCE_MISFIT,
+  toleranceFits,
+} from '@shared/schemas/part.schema';
 import { type EntityManager, Not } from 'typeorm';
 import type { Context } from '../context';
 import { BoardMemberEntity } from '../db/entities/board-member.entity';
@@ -64,6 +71,7 @@ export async function updatePart(
     requireEditPart(actor, await isEngineerSomewhere(manager, actor), part.state);
     requireCurrent(part, version);
     const fields = partFieldsSchema.parse({ ...pickFields(part), ...change });
+    if (!toleranceFits(fields)) throw invalid([{ path: 'tolerance', message: TOLERANCE_MISFIT }]);
     const keys = partKeys(fields);
     await requireFreeNumber(manager, keys.numberKey, id);
     await save(ctx, manager, actor, part, { ...fields, ...keys });

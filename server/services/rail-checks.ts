@@ -1,5 +1,9 @@
+import { EngineError } from '@shared/engine/errors';
+import { resolveSpec } from '@shared/rail/setup';
+import type { BoardSetup } from '@shared/schemas/board-setup.schema';
 import type { Part } from '@shared/schemas/part.schema';
 import type { BankLine, SearchSettings } from '@shared/schemas/rail.schema';
+import type { RailSpec } from '@shared/schemas/rail-spec.schema';
 import { type EntityManager, Not } from 'typeorm';
 import { RailEntity } from '../db/entities/rail.entity';
 import { RailPartEntity } from '../db/entities/rail-part.entity';
@@ -37,6 +41,26 @@ export async function checkedParts(
   ];
   if (faults.length > 0) throw invalid(faults.slice(0, 50));
   return parts;
+}
+
+/** The specification with its planes as the board's stack-up has them. */
+export function planesFrom(spec: RailSpec, setup: BoardSetup): RailSpec {
+  try {
+    return resolveSpec(spec, setup);
+  } catch (error) {
+    if (!(error instanceof EngineError)) throw error;
+    throw invalid([{ path: 'spec.plane.geometry.pair', message: error.message }]);
+  }
+}
+
+export function requireRecipes(bank: readonly BankLine[], setup: BoardSetup): void {
+  const known = new Set(setup.recipes.map((recipe) => recipe.id));
+  const faults = bank.flatMap((line, i) =>
+    line.recipeId === null || known.has(line.recipeId)
+      ? []
+      : [{ path: `bank[${i}].recipeId`, message: 'the board has no such mount recipe' }],
+  );
+  if (faults.length > 0) throw invalid(faults.slice(0, 50));
 }
 
 export async function storeUsedParts(

@@ -1,5 +1,6 @@
 import { railDocument } from '@shared/rail/document';
 import { summariseRail } from '@shared/rail/summary';
+import { type BoardSetup, EMPTY_SETUP } from '@shared/schemas/board-setup.schema';
 import type { Part } from '@shared/schemas/part.schema';
 import type { BankLine, RailSummary } from '@shared/schemas/rail.schema';
 import type { RailSpec } from '@shared/schemas/rail-spec.schema';
@@ -8,6 +9,7 @@ import type { Context } from '../context';
 import { RailEntity } from '../db/entities/rail.entity';
 import { RailPartEntity } from '../db/entities/rail-part.entity';
 import { partsById } from '../db/repositories/part.repository';
+import { setupOf } from './board-setup';
 import { documentHash } from './document-hash';
 
 /** The stored result of a rail, with its verdict and its document's hash in columns of their own for lists that count. */
@@ -15,8 +17,9 @@ export function railResult(
   spec: RailSpec,
   bank: readonly BankLine[],
   parts: ReadonlyMap<string, Part>,
+  setup: BoardSetup,
 ): { summary: RailSummary; holds: boolean | null; documentHash: string } {
-  const document = railDocument(spec, bank, parts);
+  const document = railDocument(spec, bank, parts, setup);
   const summary = summariseRail(document);
   return { summary, holds: summary.holds, documentHash: documentHash(document) };
 }
@@ -32,7 +35,20 @@ export async function refreshRailsUsing(ctx: Context, manager: EntityManager, pa
     manager,
     rails.flatMap((rail) => rail.bank.map((line) => line.partId)),
   );
-  for (const rail of rails)
-    await manager.update(RailEntity, { id: rail.id }, railResult(rail.spec, rail.bank, parts));
+  const setups = await setupsOf(manager, rails);
+  for (const { id, boardId, spec, bank } of rails)
+    await manager.update(
+      RailEntity,
+      { id },
+      railResult(spec, bank, parts, setups.get(boardId) ?? EMPTY_SETUP),
+    );
   ctx.log.info({ partId, rails: rails.length }, 'results renewed for a changed part');
+}
+
+async function setupsOf(
+  manager: EntityManager,
+  rails: readonly RailEntity[],
+): Promise<Map<string, BoardSetup>> {
+  const ids = [...new Set(rails.map((rail) => rail.boardId))];
+  return new Map(await Promise.all(ids.map(async (id) => [id, await setupOf(manager, id)] as const)));
 }

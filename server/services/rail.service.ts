@@ -17,8 +17,16 @@ import { partsById } from '../db/repositories/part.repository';
 import { conflict, stale } from '../errors/problems';
 import type { Actor } from './actor';
 import { openBoard, touchBoard } from './board-access';
+import { setupOf } from './board-setup';
 import { personRef } from './person.service';
-import { checkedParts, nameKey, requireFreeName, storeUsedParts } from './rail-checks';
+import {
+  checkedParts,
+  nameKey,
+  planesFrom,
+  requireFreeName,
+  requireRecipes,
+  storeUsedParts,
+} from './rail-checks';
 import { railResult } from './rail-results';
 import { loadRail, railList, railWithParts } from './rail-view';
 
@@ -123,7 +131,8 @@ export async function exportRail(
   await openBoard(ctx.db.manager, actor, boardId, 'see');
   const { spec, bank, search } = await loadRail(ctx.db.manager, boardId, railId);
   const ids = [...bank.map((line) => line.partId), ...(search.candidateIds ?? [])];
-  return railDocument(spec, bank, await partsById(ctx.db.manager, ids), search);
+  const parts = await partsById(ctx.db.manager, ids);
+  return railDocument(spec, bank, parts, await setupOf(ctx.db.manager, boardId), search);
 }
 
 async function requireCurrent(manager: EntityManager, boardId: string, railId: string, version: number) {
@@ -136,9 +145,8 @@ async function requireCurrent(manager: EntityManager, boardId: string, railId: s
 async function checked(manager: EntityManager, boardId: string, railId: string, content: RailContent) {
   await requireFreeName(manager, boardId, railId, content.spec.name);
   const parts = await checkedParts(manager, content.bank, content.search);
-  return {
-    ...content,
-    nameKey: nameKey(content.spec.name),
-    ...railResult(content.spec, content.bank, parts),
-  };
+  const setup = await setupOf(manager, boardId);
+  requireRecipes(content.bank, setup);
+  const spec = planesFrom(content.spec, setup);
+  return { ...content, spec, nameKey: nameKey(spec.name), ...railResult(spec, content.bank, parts, setup) };
 }

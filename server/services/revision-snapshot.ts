@@ -9,6 +9,7 @@ import type { RevisionRail } from '@shared/schemas/revision.schema';
 import type { EntityManager } from 'typeorm';
 import { RailEntity } from '../db/entities/rail.entity';
 import { partsById } from '../db/repositories/part.repository';
+import { setupOf } from './board-setup';
 
 /** Everything a revision says, in the order-free form that its hash is taken over. */
 export interface Snapshot {
@@ -33,10 +34,11 @@ export async function snapshotRails(manager: EntityManager, boardId: string): Pr
     manager,
     rails.flatMap((rail) => rail.bank.map((line) => line.partId)),
   );
+  const setup = await setupOf(manager, boardId);
   const results: RevisionRail[] = [];
   let first = 101;
   for (const rail of rails) {
-    const result = revisionRail(rail.id, railDocument(rail.spec, rail.bank, parts), first);
+    const result = revisionRail(rail.id, railDocument(rail.spec, rail.bank, parts, setup), first);
     results.push(result);
     first = nextBlock(first, result.instances.length);
     await setImmediate();

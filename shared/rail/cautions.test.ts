@@ -58,8 +58,9 @@ describe('railCautions', () => {
     const hard = part('HARD', { ...large, termination: 'standard' });
     const soft = part('SOFT', { ...large, termination: 'soft' });
     expect(text([hard])).toBe(
-      'HARD: keep from edges, score lines, connectors and screws, or choose a part with soft terminations.',
+      'HARD: keep from edges, score lines, connectors and screws, or choose a part with soft terminations. A crack can end as an open part or as a short, hard or of a few ohms that heats: the missing-part check covers the open one only.',
     );
+    expect(text([soft])).not.toContain('A crack can end');
     expect(text([soft])).toMatch(/^SOFT: soft terminations bear more bending; keep it from edges/);
     expect(text([hard, soft])).toMatch(/^HARD: keep .* SOFT: soft terminations bear/);
     expect(text([part('UNSAID', large)])).toContain('choose a part with soft terminations');
@@ -75,5 +76,28 @@ describe('railCautions', () => {
   it('says nothing about parts that the bank does not use, and nothing of an empty bank but its voltage', () => {
     const idle = part('A', { technology: 'ceramic', case: '1210' });
     expect(railCautions({ rail, parts: [idle], bank: [] }).map((one) => one.kind)).toEqual(['voltage']);
+  });
+
+  it('warns of tantalum above half its rating, and of energy that hurts below 60 V', () => {
+    const tantalum = part('T', { technology: 'tantalum', rated_voltage_V: 10 });
+    expect(kinds([tantalum], 5)).not.toContain('derating');
+    expect(kinds([tantalum], 5.1)).toContain('derating');
+    // ½ · 2 · 1000 µF · 24² = 0.576 J; at 12 V 0.144 J
+    const bulk = part('B', { capacitance_F: 1e-3 });
+    expect(kinds([bulk], 24)).toContain('energy');
+    expect(kinds([bulk], 12)).not.toContain('energy');
+  });
+
+  it('holds the inrush against the regulator’s limit where it is known', () => {
+    const start_up = { soft_start_s: 5e-3, current_limit_A: 1.2 };
+    const inrush = (capacitance_F: number) =>
+      railCautions({
+        // 470 µF to 12 V in 5 ms: 1.128 A (published-checks inr-own)
+        rail: { ...rail, voltage_V: 12, start_up },
+        parts: [part('A', { capacitance_F })],
+        bank: [{ part: 'A', count: 1 }],
+      }).find((one) => one.kind === 'inrush')?.text;
+    expect(inrush(470e-6)).toBeUndefined();
+    expect(inrush(680e-6)).toContain('1.63\u00a0A, more than the limit of 1.2\u00a0A');
   });
 });

@@ -2,14 +2,21 @@ import type { DocumentPart, RailDocument } from '../schemas/rail-document.schema
 import { formatQuantity, formatVolts } from '../units/format';
 
 export interface Caution {
-  kind: 'voltage' | 'rating' | 'cracks' | 'losses' | 'polarity' | 'inrush';
+  kind: 'voltage' | 'energy' | 'rating' | 'derating' | 'cracks' | 'losses' | 'polarity' | 'inrush';
   title: string;
   text: string;
 }
 
 /** Above this DC voltage a rail is treated as a hazard to touch (product sketch, cautions). */
 export const TOUCH_LIMIT_V = 60;
-/** Start-up ramp for which the mean inrush current is stated. */
+/**
+ * From here on a discharge through a person or a tool can hurt whatever the voltage: 350 mJ is the energy limit of a limited-current
+ * circuit (IEC 60950 2.4 as quoted on a product-safety mailing list, Sept 2002).
+ */
+export const HURTING_ENERGY_J = 0.35;
+/** Share of the rating up to which solid tantalum with MnO2 should be used at 85 °C (a maker's answer of 18 Aug 2015, as quoted). */
+const TANTALUM_SHARE = 0.5;
+/** Start-up ramp for which the mean inrush current is stated where the specification gives none. */
 const RAMP_s = 1e-3;
 const POLARISED = new Set(['polymer', 'tantalum', 'aluminium']);
 /** Ceramics of Class I (EIA-198, IEC 60384-8): they hardly lose capacitance. */
@@ -40,6 +47,10 @@ function bendingText(large: readonly DocumentPart[]): string {
     sentences.push(
       `${names(soft)}: soft terminations bear more bending; keep ${soft.length > 1 ? 'them' : 'it'} ${KEEP} all the same.`,
     );
+  if (hard.length > 0)
+    sentences.push(
+      'A crack can end as an open part or as a short, hard or of a few ohms that heats: the missing-part check covers the open one only.',
+    );
   return sentences.join(' ');
 }
 
@@ -59,12 +70,19 @@ export function railCautions(document: Pick<RailDocument, 'rail' | 'parts' | 'ba
   const bank = used(document);
   const parts = bank.map(({ part }) => part);
   const capacitance_F = bank.reduce((sum, { part, count }) => sum + count * part.capacitance_F, 0);
+  const energy_J = 0.5 * capacitance_F * voltage_V ** 2;
   const cautions: Caution[] = [];
   if (voltage_V > TOUCH_LIMIT_V)
     cautions.push({
       kind: 'voltage',
       title: 'above 60 V DC: energy and shock hazard',
-      text: `The bank stores ${formatQuantity(0.5 * capacitance_F * voltage_V ** 2, 'J')} (½CV² with catalogue values). Discharge it before touching.`,
+      text: `The bank stores ${formatQuantity(energy_J, 'J')} (½CV² with catalogue values). Discharge it before touching.`,
+    });
+  else if (energy_J >= HURTING_ENERGY_J)
+    cautions.push({
+      kind: 'energy',
+      title: 'the bank stores enough to hurt',
+      text: `${formatQuantity(energy_J, 'J')} (½CV² with catalogue values): a slipped tool or a ring across it burns. Discharge it before working on the board.`,
     });
   const under = parts.filter(
     (part) => part.rated_voltage_V !== undefined && part.rated_voltage_V < voltage_V,
@@ -74,6 +92,19 @@ export function railCautions(document: Pick<RailDocument, 'rail' | 'parts' | 'ba
       kind: 'rating',
       title: 'rated below the rail',
       text: `${names(under)}: rated for less than ${formatVolts(voltage_V)}. Do not fit.`,
+    });
+  const stressed = parts.filter(
+    (part) =>
+      part.technology === 'tantalum' &&
+      part.rated_voltage_V !== undefined &&
+      voltage_V > TANTALUM_SHARE * part.rated_voltage_V &&
+      voltage_V <= part.rated_voltage_V,
+  );
+  if (stressed.length > 0)
+    cautions.push({
+      kind: 'derating',
+      title: 'tantalum above half its rating',
+      text: `${names(stressed)}: solid tantalum is usually run at no more than half its rated voltage, less above 85 °C; see the maker’s rule.`,
     });
   const large = parts.filter(isLargeCeramic);
   if (large.length > 0)
@@ -94,13 +125,20 @@ export function railCautions(document: Pick<RailDocument, 'rail' | 'parts' | 'ba
     cautions.push({
       kind: 'losses',
       title: 'Class II dielectrics',
-      text: `${names(lossy)}: capacitance falls with bias, temperature and age; catalogue values do not show it.`,
+      text: `${names(lossy)}: capacitance falls with bias, temperature and age; in service shows how much, estimated where a part has no curve.`,
     });
-  if (capacitance_F > 0)
-    cautions.push({
-      kind: 'inrush',
-      title: 'inrush at start-up',
-      text: `Charging ${formatQuantity(capacitance_F, 'F')} to ${formatVolts(voltage_V)} in 1 ms takes ${formatQuantity((capacitance_F * voltage_V) / RAMP_s, 'A')} on average; check the regulator’s limit and soft start.`,
-    });
+  const inrush = inrushText(document.rail, capacitance_F);
+  if (inrush !== null) cautions.push({ kind: 'inrush', title: 'inrush at start-up', text: inrush });
   return cautions;
+}
+
+/** What to mind about charging the bank; null when the regulator's limit is known and kept. */
+function inrushText({ voltage_V, start_up }: RailDocument['rail'], capacitance_F: number): string | null {
+  if (capacitance_F === 0) return null;
+  const charge = `Charging ${formatQuantity(capacitance_F, 'F')} to ${formatVolts(voltage_V)}`;
+  if (!start_up)
+    return `${charge} in 1 ms takes ${formatQuantity((capacitance_F * voltage_V) / RAMP_s, 'A')} on average; check the regulator’s limit and soft start.`;
+  const current_A = (capacitance_F * voltage_V) / start_up.soft_start_s;
+  if (current_A <= start_up.current_limit_A) return null;
+  return `${charge} in ${formatQuantity(start_up.soft_start_s, 's', { trim: true })} takes ${formatQuantity(current_A, 'A')}, more than the limit of ${formatQuantity(start_up.current_limit_A, 'A', { trim: true })}: the regulator may not start, or start with a step.`;
 }

@@ -1,7 +1,9 @@
+import type { BoardSetup } from '../schemas/board-setup.schema';
 import type { Part } from '../schemas/part.schema';
 import type { BankLine, SearchSettings } from '../schemas/rail.schema';
 import type { DocumentPart, RailDocument } from '../schemas/rail-document.schema';
 import type { RailSpec } from '../schemas/rail-spec.schema';
+import { ownMount_H } from './setup';
 
 /** A library part as it stands in a document, known there by its part number. */
 export function documentPart(part: Part): DocumentPart {
@@ -35,12 +37,14 @@ export function documentPart(part: Part): DocumentPart {
 
 /**
  * A rail with its bank as one document. `parts` by id; lines of count 0 and lines whose part is not in `parts` are left
- * out. With `search`, the candidates that are in `parts` come along.
+ * out. Lines with a recipe get the mounting inductance that it comes to on this board. With `search`, the candidates that are in
+ * `parts` come along.
  */
 export function railDocument(
   spec: RailSpec,
   bank: readonly BankLine[],
   parts: ReadonlyMap<string, Part>,
+  setup: BoardSetup,
   search?: SearchSettings,
 ): RailDocument {
   const used = new Map<string, Part>();
@@ -49,10 +53,12 @@ export function railDocument(
     const part = parts.get(line.partId);
     if (!part || line.count === 0) continue;
     used.set(part.id, part);
+    const mount = ownMount_H(line, spec, setup);
     lines.push({
       part: part.partNumber,
       count: line.count,
-      ...(line.mount_H !== null && { mount_H: line.mount_H }),
+      ...(mount && { mount_H: mount.mount_H }),
+      ...(mount?.recipe && { recipe: mount.recipe }),
       ...(line.distance_m !== null && { distance_m: line.distance_m }),
       side: line.side,
       ...(line.locked && { locked: true }),

@@ -5,19 +5,28 @@ import { type TargetMask, targetAt } from '../engine/target';
 import type { RailDocument } from '../schemas/rail-document.schema';
 import type { Instance, RevisionPeak, RevisionRail } from '../schemas/revision.schema';
 import { formatQuantity } from '../units/format';
+import { checkRail } from './checks';
+import { IN_SERVICE } from './corner';
 import { farthestDistance } from './farthest';
+import { documentIn } from './in-service';
 import { networkOf } from './network';
 import { summariseRail } from './summary';
 import { targetMask } from './target-mask';
 
-/** What a revision keeps of one rail: its document, results by the shared engine, and its capacitors one by one. */
+/**
+ * What a revision keeps of one rail: its document, results by the shared engine, and its capacitors one by one. Peaks and farthest
+ * distances are those in service, where the rail has a result there.
+ */
 export function revisionRail(railId: string, document: RailDocument, firstNumber: number): RevisionRail {
+  const summary = summariseRail(document);
+  const serving = summary.error === null ? documentIn(document, IN_SERVICE) : document;
   return {
     railId,
     document,
-    summary: summariseRail(document),
-    peaks: peaksOf(document),
-    instances: instancesOf(document, firstNumber),
+    summary,
+    peaks: peaksOf(serving),
+    instances: instancesOf(document, serving, firstNumber),
+    checks: checkRail(document),
   };
 }
 
@@ -56,13 +65,13 @@ export function describedPeak(
   };
 }
 
-function instancesOf(document: RailDocument, firstNumber: number): Instance[] {
+function instancesOf(document: RailDocument, serving: RailDocument, firstNumber: number): Instance[] {
   const parts = new Map(document.parts.map((part) => [part.id, part]));
   let number = firstNumber;
   return document.bank.flatMap((line, index) => {
     const part = parts.get(line.part);
     if (!part) return [];
-    const farthest = farthestDistance(document, index);
+    const farthest = farthestDistance(serving, index);
     return Array.from({ length: line.count }, () => ({
       designator: `C${number++}`,
       partNumber: part.id,

@@ -92,5 +92,5 @@ export const boardSetupSchema = z.strictObject({
 export type BoardSetup = z.infer<typeof boardSetupSchema>;
 export const EMPTY_SETUP: BoardSetup = { stackup: null, recipes: [] };
 
-/** A save names the board's version that it started from. */
+/** A save names the setup's version that it started from. */
 export const setBoardSetupSchema = z.strictObject({ version: versionSchema, setup: boardSetupSchema });

@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { boardSetupSchema } from './board-setup.schema';
 import {
   idSchema,
   isoDateSchema,
@@ -49,7 +50,12 @@ export const boardMemberSchema = z.object({
 });
 export type BoardMember = z.infer<typeof boardMemberSchema>;
 
-export const boardDetailSchema = boardSummarySchema.extend({ members: z.array(boardMemberSchema) });
+export const boardDetailSchema = boardSummarySchema.extend({
+  members: z.array(boardMemberSchema),
+  setup: boardSetupSchema,
+  /** Of the setup alone, so that stack-up and name do not get into each other's way. */
+  setupVersion: versionSchema,
+});
 export type BoardDetail = z.infer<typeof boardDetailSchema>;
 
 export const createBoardSchema = z.strictObject({ name: nameSchema, description: noteSchema.default('') });

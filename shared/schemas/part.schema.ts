@@ -134,7 +134,19 @@ export const partSchema = partFieldsSchema.extend({
 });
 export type Part = z.infer<typeof partSchema>;
 
-export const createPartSchema = partFieldsSchema;
+/** B, C and D are picofarads, and stand on parts below 10 pF only: above, makers' tables disagree about them. */
+export const toleranceFits = ({
+  tolerance,
+  capacitance_F,
+}: Pick<PartFields, 'tolerance' | 'capacitance_F'>): boolean =>
+  !/^[BCD]$/.test(tolerance) || capacitance_F < 10e-12;
+export const TOLERANCE_MISFIT = 'B, C and D are picofarads and go with parts below 10 pF';
+
+/** The fields of a part as a whole, with what must hold between them. */
+export const createPartSchema = partFieldsSchema.refine(toleranceFits, {
+  path: ['tolerance'],
+  message: TOLERANCE_MISFIT,
+});
 const { description, dielectric, height_mm, termination, unit_cost, area_mm2 } = partFieldsSchema.shape;
 const behaviour = partFieldsSchema.shape;
 /** What is left out stays as it is: without their defaults, which would stand in for a missing field. */

@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { idSchema, isoDateSchema, personRefSchema, versionSchema } from './common.schema';
+import { tightestSchema } from './headroom.schema';
 import { partSchema } from './part.schema';
 import { objectiveSchema } from './rail-document.schema';
 import { railSpecSchema } from './rail-spec.schema';
@@ -46,13 +47,6 @@ export const searchSettingsSchema = z.strictObject({
   distance_m: z.number().min(0).max(10).nullable().default(null),
 });
 export type SearchSettings = z.infer<typeof searchSettingsSchema>;
-
-export const tightestSchema = z.object({
-  frequency_Hz: z.number(),
-  impedance_ohm: z.number(),
-  target_ohm: z.number(),
-  headroom_dB: z.number(),
-});
 
 /** Headroom at one set of values. */
 export const verdictSchema = z.object({ holds: z.boolean(), tightest: tightestSchema });

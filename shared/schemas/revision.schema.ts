@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { railChecksSchema } from './checks.schema';
 import { idSchema, isoDateSchema, noteSchema, pageOf, personRefSchema } from './common.schema';
 import { railSummarySchema } from './rail.schema';
 import { railDocumentSchema } from './rail-document.schema';
@@ -40,6 +41,8 @@ export const revisionRailSchema = z.object({
   summary: railSummarySchema,
   peaks: z.array(peakSchema),
   instances: z.array(instanceSchema),
+  /** null: cut by an engine before 2.0, or the rail has no result. */
+  checks: railChecksSchema.nullable().default(null),
 });
 export type RevisionRail = z.infer<typeof revisionRailSchema>;
 

@@ -9,6 +9,7 @@ import { afterEach, beforeEach, describe, expect, it } from 'vitest';
 import { demoParts } from '../../server/db/demo/parts';
 import { demoRails } from '../../server/db/demo/rails';
 import { seedDemo, seedOnFirstRun } from '../../server/db/demo/seed';
+import { demoSetup } from '../../server/db/demo/setup';
 import { entities } from '../../server/db/entities';
 import { openTestApp, type TestApp } from '../helpers/app';
 import { DEMO_BOARD, people } from '../helpers/people';
@@ -51,15 +52,34 @@ describe('the demo data', () => {
     const { rails, parts } = railListSchema.parse(body);
     const byId = new Map(parts.map((part: Part) => [part.id, part]));
     const headroom = new Map(rails.map((rail) => [rail.spec.name, rail.summary.tightest?.headroom_dB ?? 0]));
-    for (const rail of rails) railDocumentSchema.parse(railDocument(rail.spec, rail.bank, byId));
+    for (const rail of rails) railDocumentSchema.parse(railDocument(rail.spec, rail.bank, byId, demoSetup));
     expect(rails.filter((rail) => rail.summary.holds).length).toBe(4);
     expect(headroom.get('VDD_CORE')).toBeLessThan(-1.5);
     expect(headroom.get('VDD_CORE')).toBeGreaterThan(-3);
-    expect(headroom.get('VDD_SERDES')).toBeLessThan(0);
-    expect(headroom.get('VDD_SERDES')).toBeGreaterThan(-1);
+    expect(headroom.get('VDD_AUX')).toBeLessThan(-2);
     for (const rail of rails)
       for (const line of rail.bank)
         expect(byId.get(line.partId)?.rated_voltage_V).toBeGreaterThanOrEqual(rail.spec.voltage_V);
+  });
+
+  it('has a rail for each way to hold and yet be short', async () => {
+    const { body } = await (await t.as('reviewer')).get(`/boards/${DEMO_BOARD}/revisions/B`).expect(200);
+    const { railResults } = revisionDetailSchema.parse(body);
+    const checksOf = (name: string) => {
+      const checks = railResults.find(({ document }) => document.rail.name === name)?.checks;
+      if (!checks) throw new Error(`${name} has no checks`);
+      return checks;
+    };
+    const aux = checksOf('VDD_AUX');
+    expect([aux.catalogue.holds, aux.service.holds]).toEqual([true, false]);
+    expect(aux.parts.some((part) => part.estimated)).toBe(true);
+    const serdes = checksOf('VDD_SERDES');
+    expect([serdes.catalogue.holds, serdes.service.holds]).toEqual([true, true]);
+    expect(serdes.pattern?.swing_V).toBeGreaterThan(serdes.allowance_V ?? Number.POSITIVE_INFINITY);
+    expect(serdes.step?.droop_V).toBeLessThan(serdes.allowance_V ?? 0);
+    const bus = checksOf('VBUS_72');
+    expect([bus.service.holds, bus.worst.holds, bus.missing?.holds]).toEqual([true, true, false]);
+    expect(checksOf('VDD_DDR').start_up.holds).toBe(false);
   });
 
   it('keeps each band at what it was found from', () => {

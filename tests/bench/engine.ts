@@ -109,6 +109,7 @@ export function benchEngine(): string {
   const request = {
     spec,
     span_Hz: [1e4, 1e8] as const,
+    corner: null,
     lines: lines.map(({ id, count: n, esr_ohm, capacitance_F, inductance_H }) => ({
       part: { id, capacitance_F, esr_ohm, esl_H: inductance_H, mount_H: 0 },
       count: n,

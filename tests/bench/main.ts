@@ -1,10 +1,12 @@
 import { benchApi } from './api';
 import { benchChart } from './chart';
+import { benchChecks } from './checks';
 import { benchEngine } from './engine';
 import { benchSearch } from './search';
 
 const BENCHES: Record<string, () => string | Promise<string>> = {
   engine: benchEngine,
+  checks: benchChecks,
   search: benchSearch,
   api: benchApi,
   chart: benchChart,

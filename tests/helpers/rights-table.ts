@@ -127,6 +127,14 @@ export const rightsTable: RightsRow[] = [
   { method: 'delete', path: '/boards/:boardId', at: demo, query: '?version=1', ...manageBoard, ok: 204 },
   {
     method: 'put',
+    path: '/boards/:boardId/setup',
+    at: demo,
+    body: { version: 99, setup: { stackup: null, recipes: [] } },
+    ...editBoard,
+    ok: 409,
+  },
+  {
+    method: 'put',
     path: '/boards/:boardId/members/:personId',
     at: { ...demo, personId: people.stranger.id },
     body: { role: 'layout' },

@@ -1,5 +1,6 @@
 import type { Tightest } from '@shared/engine/headroom';
 import type { BankFigures } from '@shared/rail/bank-figures';
+import type { Corner } from '@shared/rail/corner';
 import type { DocumentPart } from '@shared/schemas/rail-document.schema';
 import type { RailSpec } from '@shared/schemas/rail-spec.schema';
 import type { RevisionPeak } from '@shared/schemas/revision.schema';
@@ -16,6 +17,8 @@ export interface BenchLine {
 export interface BenchRequest {
   spec: RailSpec;
   lines: BenchLine[];
+  /** Where in the rail's conditions its parts are looked at; null: at their catalogue values. */
+  corner: Corner | null;
   /** What the chart shows; wider than the band. */
   span_Hz: readonly [number, number];
 }
@@ -32,6 +35,10 @@ export interface BenchMember {
   share: Float64Array;
   /** ESL + mount + path of one capacitor, henry; null where it is not a bank line. */
   inductance_H: number | null;
+  /** C of one capacitor as it was computed with, farad; null where it is not a bank line. */
+  capacitance_F: number | null;
+  /** An estimate stands in that value where the part has no curve of its own. */
+  estimated: boolean;
 }
 
 /** A place where |Z| lies above the target, worst first. */
@@ -45,6 +52,8 @@ export interface BenchAnalysis {
   magnitude_ohm: Float64Array;
   /** The waterline at the same frequencies; NaN outside the band. */
   target_ohm: Float64Array;
+  /** Seen from the die: |Z| with the board a perfect short, at the same frequencies; null at the pins. */
+  floor_ohm: Float64Array | null;
   members: BenchMember[];
   peaks: RevisionPeak[];
   breaks: BenchBreak[];

@@ -25,6 +25,7 @@ const request: BenchRequest = {
     { part: part('none', 1e-6), count: 0, mount_H: null, distance_m: null },
     { part: part('small', 1e-7), count: 5, mount_H: 2e-10, distance_m: null },
   ],
+  corner: null,
   span_Hz: [1e4, 1e8],
 };
 

@@ -3,6 +3,7 @@ import { branchAdmittance } from '@shared/engine/branch';
 import { type Curve, partOf, sampleRail, sweepCurve, withPoints } from '@shared/engine/curve';
 import { HOLD_TOLERANCE, holds, surfaceMaxima, type Tightest } from '@shared/engine/headroom';
 import { makersAt } from '@shared/engine/makers';
+import { boardShorted } from '@shared/engine/package-reach';
 import { peaksOfCurve } from '@shared/engine/peaks';
 import { cavityResonances } from '@shared/engine/plane';
 import { type CompiledRail, compileRail } from '@shared/engine/rail';
@@ -10,6 +11,7 @@ import { memberShares, type UnitAdmittance } from '@shared/engine/shares';
 import { isExtrapolated } from '@shared/engine/table';
 import { targetAt } from '@shared/engine/target';
 import { bankFigures } from '@shared/rail/bank-figures';
+import { partIn, serviceValues } from '@shared/rail/in-service';
 import { lineModel, networkWith } from '@shared/rail/network';
 import { describedPeak } from '@shared/rail/revision';
 import { targetMask } from '@shared/rail/target-mask';
@@ -40,9 +42,9 @@ export function analyseBench(
   kept: KeptSamples | null,
 ): { analysis: BenchAnalysis; samples: KeptSamples } {
   const start = performance.now();
-  const { spec, lines, span_Hz } = request;
+  const { spec, lines, corner, span_Hz } = request;
   const models = lines.map((line) =>
-    lineModel(spec, line.part, {
+    lineModel(spec, corner ? partIn(line.part, spec, corner) : line.part, {
       count: line.count,
       ...(line.mount_H !== null && { mount_H: line.mount_H }),
       ...(line.distance_m !== null && { distance_m: line.distance_m }),
@@ -70,7 +72,8 @@ export function analyseBench(
     frequency_Hz,
     magnitude_ohm: curve.logMagnitude.map(Math.exp),
     target_ohm: frequency_Hz.map((f) => (f >= band[0] && f <= band[1] ? targetAt(target, f) : Number.NaN)),
-    members: membersOver(rail, curve, samples.bank, models),
+    floor_ohm: boardShorted(rail, frequency_Hz),
+    members: membersOver(rail, curve, samples.bank, models, request),
     peaks: exact.map((peak) => describedPeak(peak, target, band)),
     breaks: breaksOf(rail, surface),
     tightest,
@@ -89,11 +92,11 @@ export function analyseBench(
 /** The kept samples with this bank's counts, or new ones where anything but a count has changed. */
 function samplesFor(
   rail: CompiledRail,
-  { spec, lines, span_Hz }: BenchRequest,
+  { spec, lines, corner, span_Hz }: BenchRequest,
   include_Hz: readonly number[],
   kept: KeptSamples | null,
 ): KeptSamples {
-  const key = JSON.stringify([spec, span_Hz, lines.map((line) => ({ ...line, count: 0 }))]);
+  const key = JSON.stringify([spec, span_Hz, corner, lines.map((line) => ({ ...line, count: 0 }))]);
   if (kept?.key !== key) return { key, bank: sampleRail(rail, span_Hz[0], span_Hz[1], { include_Hz }) };
   kept.bank.setCounts(rail.members.map((member) => member.count));
   return kept;
@@ -103,8 +106,10 @@ function membersOver(
   rail: CompiledRail,
   curve: Curve,
   samples: BankSum,
-  models: readonly { inductance_H: number }[],
+  models: readonly { inductance_H: number; capacitance_F: number }[],
+  { lines, spec, corner }: BenchRequest,
 ): BenchMember[] {
+  const estimated = lines.map((line) => corner !== null && serviceValues(line.part, spec, corner).estimated);
   const unit: UnitAdmittance = (member, point, out) => {
     const sample = curve.sample[point];
     if (sample < 0) return branchAdmittance(rail.members[member].branch, curve.frequency_Hz[point], out);
@@ -114,8 +119,7 @@ function membersOver(
   return memberShares(rail, curve.frequency_Hz, unit).map(({ member, re, im, impedance_ohm }) => {
     // Not Math.hypot: ten times as slow, and nothing here comes near overflow.
     const share = re.map((value, i) => Math.sqrt(value * value + im[i] * im[i]));
-    if (member < 0)
-      return { role: 'die', id: 'die', line: -1, magnitude_ohm: null, share, inductance_H: null };
+    if (member < 0) return { role: 'die', id: 'die', line: -1, magnitude_ohm: null, share, ...NO_PART };
     const { role, id, line, count } = rail.members[member];
     return {
       role,
@@ -123,10 +127,18 @@ function membersOver(
       line,
       magnitude_ohm: count > 0 ? impedance_ohm : null,
       share,
-      inductance_H: line < 0 ? null : models[line].inductance_H,
+      ...(line < 0
+        ? NO_PART
+        : {
+            inductance_H: models[line].inductance_H,
+            capacitance_F: models[line].capacitance_F,
+            estimated: estimated[line],
+          }),
     };
   });
 }
+
+const NO_PART = { inductance_H: null, capacitance_F: null, estimated: false };
 
 function breaksOf(rail: CompiledRail, surface: readonly Tightest[]): BenchBreak[] {
   return surface

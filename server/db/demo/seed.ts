@@ -16,6 +16,7 @@ import { demoId } from './demo-id';
 import { demoParts } from './parts';
 import { DEMO_PASSWORD, demoPeople } from './people';
 import { demoRails } from './rails';
+import { demoSetup } from './setup';
 
 const board = { id: demoId('board', 'Tide gateway'), name: 'Tide gateway' };
 const [engineer] = demoPeople;
@@ -83,6 +84,7 @@ async function seedBoard(manager: EntityManager, now: string): Promise<void> {
     ...board,
     description: 'Alder Brook Instruments: gauge gateway for tidal stations, carrier board.',
     ownerId: engineer.id,
+    setup: demoSetup,
     createdAt: now,
     updatedAt: now,
     updatedById: engineer.id,
@@ -101,7 +103,7 @@ async function seedRails(manager: EntityManager, now: string, first: boolean): P
     const lines = first ? (rail.firstBank ?? rail.bank) : rail.bank;
     const bank = lines.map(({ partNumber, ...line }) => ({ ...line, partId: demoId('part', partNumber) }));
     const ids = bank.map((line) => line.partId);
-    const result = railResult(rail.spec, bank, await partsById(manager, ids));
+    const result = railResult(rail.spec, bank, await partsById(manager, ids), demoSetup);
     const stored = { bank, ...result, updatedAt: now, updatedById: engineer.id };
     if (first)
       await manager.insert(RailEntity, {

@@ -1,3 +1,4 @@
+import type { BoardSetup } from '@shared/schemas/board-setup.schema';
 import { Column, Entity, Index, JoinColumn, ManyToOne, PrimaryColumn } from 'typeorm';
 import { PersonEntity } from './person.entity';
 
@@ -14,6 +15,9 @@ export class BoardEntity {
   @JoinColumn({ name: 'owner_id' })
   owner?: PersonEntity;
   @Column({ type: 'integer', default: 1 }) version!: number;
+  /** Stack-up and mount recipes; null: nothing has been said yet. */
+  @Column({ type: 'simple-json', nullable: true }) setup!: BoardSetup | null;
+  @Column({ name: 'setup_version', type: 'integer', default: 1 }) setupVersion!: number;
   @Column({ name: 'created_at', type: 'text' }) createdAt!: string;
   @Column({ name: 'updated_at', type: 'text' }) updatedAt!: string;
   @Column({ name: 'updated_by', type: 'text', nullable: true }) updatedById!: string | null;

@@ -56,7 +56,7 @@ describe('ageing rate', () => {
   it('is none for the others, and a bare part is taken as it stands', () => {
     for (const technology of ['polymer', 'tantalum', 'aluminium', 'film']) {
       const rate = ageingRate({ technology });
-      expect(rate).toMatchObject({ percentPerDecade: 0, estimated: true });
+      expect(rate).toMatchObject({ percentPerDecade: 0, estimated: technology === 'aluminium' });
       expect(rate.basis).toContain(technology);
     }
     expect(ageingRate({})).toEqual({ percentPerDecade: 0, estimated: false, basis: 'as given' });

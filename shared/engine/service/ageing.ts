@@ -52,7 +52,12 @@ export function ageingRate(
   const family = familyOf(part);
   if (family.kind === 'bare') return { percentPerDecade: 0, estimated: false, basis: BASIS.asGiven };
   if (family.kind !== 'ceramic')
-    return { percentPerDecade: 0, estimated: true, basis: BASIS.noAgeingLaw(family.kind) };
+    return {
+      percentPerDecade: 0,
+      // The law is one of ferroelectric ceramics; electrolytic aluminium dries out instead, and by how much nobody has said.
+      estimated: family.kind === 'aluminium',
+      basis: BASIS.noAgeingLaw(family.kind),
+    };
   const { dielectric } = family;
   if (!dielectric) return { percentPerDecade: CLASS_2_RATE, estimated: true, basis: BASIS.unknownDielectric };
   if (dielectric.class === 1)

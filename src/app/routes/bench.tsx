@@ -35,6 +35,7 @@ export function Component() {
     <Bench
       key={railId}
       server={rail.data}
+      setup={board.data.setup}
       personId={session.person.id}
       canEdit={rights.edit}
       editTo={rights.edit ? paths.specification(boardId, railId) : null}

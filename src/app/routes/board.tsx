@@ -63,7 +63,8 @@ export function Component() {
         <RailsTable rails={list} />
       )}
       <p className="text-small text-stone">
-        Figures at catalogue values. Estimates from models: measure each rail before release.
+        Headroom with the parts in service: biased, at the rail’s usual temperature, aged; worst case over all
+        corners of its conditions. Estimates from models: measure each rail before release.
       </p>
     </Page>
   );

@@ -7,7 +7,7 @@ import { useTokens } from './tokens';
 /** A curve over frequency; `style` names what it means, not how it looks. */
 export interface PlotCurve {
   name: string;
-  style: 'total' | 'line' | 'other';
+  style: 'total' | 'line' | 'other' | 'bound' | 'floor';
   frequency_Hz: Float64Array;
   magnitude_ohm: Float64Array;
 }
@@ -18,6 +18,8 @@ interface ImpedancePlotProps {
   curves: readonly PlotCurve[];
   /** The waterline at the total's frequencies, NaN outside the band: where the total lies above, the gap is filled. */
   target_ohm: Float64Array | null;
+  /** Between what and what the impedance moves: shaded. */
+  band?: { frequency_Hz: Float64Array; low_ohm: Float64Array; high_ohm: Float64Array } | null;
   /** A stretch of the axis was dragged over, or (null) double-clicked: the whole again. */
   onZoom: (span_Hz: [number, number] | null) => void;
 }
@@ -37,19 +39,24 @@ const config = {
 };
 
 /** The impedance chart: double-logarithmic, margins fixed so that what stands below lines up with it to the pixel. */
-export default function ImpedancePlot({ x, y, curves, target_ohm, onZoom }: ImpedancePlotProps) {
+export default function ImpedancePlot({ x, y, curves, target_ohm, band, onZoom }: ImpedancePlotProps) {
   const tokens = useTokens();
   const data = useMemo<Data[]>(() => {
     const traces: Data[] = [];
+    if (band) traces.push(...shaded(band, tokens.shallow));
     const lines = curves.filter((curve) => curve.style === 'line');
     if (lines.length > 0) traces.push(joined(lines, tokens.stone));
     const total = curves.find((curve) => curve.style === 'total');
     if (total && target_ohm) traces.push(...broken(total, target_ohm, tokens.kingfisher));
     for (const curve of curves.filter((one) => one.style === 'other'))
       traces.push(trace(curve, { color: tokens.stone, width: 1.4, dash: '5px,4px' }));
+    for (const curve of curves.filter((one) => one.style === 'bound'))
+      traces.push(trace(curve, { color: tokens.deep, width: 1.2, dash: '1.5px,3px' }));
+    for (const curve of curves.filter((one) => one.style === 'floor'))
+      traces.push(trace(curve, { color: tokens.brass, width: 1.2, dash: '7px,3px,1.5px,3px' }));
     if (total) traces.push(trace(total, { color: tokens.ink, width: 2.2 }));
     return traces;
-  }, [curves, target_ohm, tokens]);
+  }, [curves, target_ohm, band, tokens]);
   const layout = useMemo<Partial<Layout>>(
     () => ({
       width: x.width + SCALE_WIDTH,
@@ -147,6 +154,23 @@ function joined(curves: readonly PlotCurve[], color: string): Data {
     hoverinfo: 'skip',
     name: 'bank lines',
   };
+}
+
+function shaded(
+  { frequency_Hz, low_ohm, high_ohm }: NonNullable<ImpedancePlotProps['band']>,
+  color: string,
+): Data[] {
+  const shared = {
+    type: 'scatter' as const,
+    mode: 'lines' as const,
+    x: frequency_Hz,
+    line: { width: 0 },
+    hoverinfo: 'skip' as const,
+  };
+  return [
+    { ...shared, y: low_ohm, name: 'least' },
+    { ...shared, y: high_ohm, name: 'most', fill: 'tonexty', fillcolor: `${color}66` },
+  ];
 }
 
 /** The area between waterline and curve, where the curve lies above. */

@@ -1,4 +1,6 @@
+import type { BoardSetup } from '@shared/schemas/board-setup.schema';
 import type { Part } from '@shared/schemas/part.schema';
+import type { RailSpec } from '@shared/schemas/rail-spec.schema';
 import { formatLength, formatQuantity } from '@shared/units/format';
 import { type KeyboardEvent, useState } from 'react';
 import type { FrequencyAxis } from '@/components/chart/axis';
@@ -13,11 +15,16 @@ export interface RowStrip {
   share: Float64Array;
   /** ESL + mount + path of one capacitor. */
   inductance_H: number | null;
+  /** What is left of the catalogue capacitance; null where catalogue values are shown. */
+  left_F: number | null;
+  estimated: boolean;
 }
 
 interface BankRowProps {
   line: DraftLine;
   part: Part | undefined;
+  spec: RailSpec;
+  setup: BoardSetup;
   axis: FrequencyAxis;
   strip: RowStrip | null;
   /** Share at the pointer's frequency, 1 = all. */
@@ -74,10 +81,7 @@ export function BankRow(props: BankRowProps) {
           >
             <span className="block truncate font-semibold">{name}</span>
             <span className="block truncate text-small text-stone">
-              {formatQuantity(strip?.inductance_H, 'H')}
-              {line.distance_m !== null && ` · ${formatLength(line.distance_m)}`}
-              {line.side === 'bottom' && ' · bottom'}
-              {line.locked && ' · locked'}
+              <RowFacts line={line} part={part} strip={strip} />
             </span>
           </button>
           <div className="flex shrink-0 flex-col items-end">
@@ -104,10 +108,54 @@ export function BankRow(props: BankRowProps) {
         </div>
       </div>
       {open && part && !readOnly && (
-        <LineDetails line={line} part={part} onChange={props.onChange} onRemove={props.onRemove} />
+        <LineDetails
+          line={line}
+          part={part}
+          spec={props.spec}
+          setup={props.setup}
+          onChange={props.onChange}
+          onRemove={props.onRemove}
+        />
       )}
     </div>
   );
+}
+
+/** What stands under a line's name: what is left of its capacitance, and where that is no estimate its inductance and place. */
+function RowFacts({
+  line,
+  part,
+  strip,
+}: {
+  line: DraftLine;
+  part: Part | undefined;
+  strip: RowStrip | null;
+}) {
+  const place = [
+    formatQuantity(strip?.inductance_H, 'H'),
+    line.distance_m !== null && formatLength(line.distance_m),
+    line.side === 'bottom' && 'bottom',
+    line.locked && 'locked',
+  ].filter(Boolean);
+  const left = part && strip?.left_F != null ? leftText(part.capacitance_F, strip.left_F) : null;
+  const whole = [left, strip?.estimated && '≈ estimated', ...place].filter(Boolean).join(' · ');
+  return (
+    <span title={whole}>
+      {left}
+      {strip?.estimated && <span className="text-brass"> ≈ estimated</span>}
+      {left && !strip?.estimated && ' · '}
+      {!strip?.estimated && place.join(' · ')}
+      {strip?.estimated && line.locked && ' · locked'}
+    </span>
+  );
+}
+
+/** `22 → 9.41 µF`: both in the unit of what is left. */
+function leftText(catalogue_F: number, left_F: number): string {
+  const left = formatQuantity(left_F, 'F');
+  const whole = formatQuantity(catalogue_F, 'F', { trim: true });
+  const unit = left.slice(left.indexOf('\u00a0'));
+  return whole.endsWith(unit) ? `${whole.slice(0, -unit.length)} → ${left}` : `${whole} → ${left}`;
 }
 
 /** The share under the pointer, in per cent; its line is kept when there is none, so that rows do not jump. */

@@ -2,19 +2,28 @@ import type { RailSpec } from '@shared/schemas/rail-spec.schema';
 import { Link } from 'react-router-dom';
 import { Checkbox } from '@/components/ui/input';
 import { specFacts } from '../lib/spec-facts';
+import type { ValuesView } from '../lib/values-view';
+import { ValuesSwitch } from './values-switch';
 
 interface BenchFactsProps {
   spec: RailSpec;
   /** Address of the specification form; null: may not be edited. */
   editTo: string | null;
+  view: ValuesView;
+  onView: (view: ValuesView) => void;
   showLines: boolean;
   onShowLines: (show: boolean) => void;
+  showEnvelope: boolean;
+  onShowEnvelope: (show: boolean) => void;
+  /** How many corners the envelope covers; null: not known yet. */
+  corners: number | null;
 }
 
 /** The margin of the score: what the rail is, and what the chart shows. */
-export function BenchFacts({ spec, editTo, showLines, onShowLines }: BenchFactsProps) {
+export function BenchFacts(props: BenchFactsProps) {
+  const { spec, editTo, corners } = props;
   return (
-    <div className="flex flex-col gap-4">
+    <div className="flex flex-col gap-3">
       <h1 className="text-large font-bold">{spec.name}</h1>
       <dl className="grid grid-cols-[5.2rem_1fr] gap-x-1 text-small">
         {specFacts(spec).map(([name, value]) => (
@@ -32,12 +41,24 @@ export function BenchFacts({ spec, editTo, showLines, onShowLines }: BenchFactsP
           edit specification
         </Link>
       )}
-      <Checkbox
-        label="lines"
-        className="text-small text-stone"
-        checked={showLines}
-        onChange={(event) => onShowLines(event.target.checked)}
-      />
+      <ValuesSwitch view={props.view} onView={props.onView} />
+      <div className="flex flex-wrap gap-x-4 gap-y-1 text-small text-stone">
+        <Checkbox
+          label="lines"
+          checked={props.showLines}
+          onChange={(event) => props.onShowLines(event.target.checked)}
+        />
+        <Checkbox
+          label="envelope"
+          checked={props.showEnvelope}
+          onChange={(event) => props.onShowEnvelope(event.target.checked)}
+        />
+      </div>
+      {props.showEnvelope && (
+        <p className="text-small text-stone">
+          shaded: {corners === null ? 'all' : corners} corners; dotted: parts unlike each other
+        </p>
+      )}
     </div>
   );
 }

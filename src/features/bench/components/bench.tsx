@@ -1,9 +1,12 @@
-import { newPartDistance_m } from '@shared/rail/document';
+import { EngineError } from '@shared/engine/errors';
+import { packageReach_Hz } from '@shared/engine/package-reach';
+import { newPartDistance_m, railDocument } from '@shared/rail/document';
+import { targetMask } from '@shared/rail/target-mask';
+import type { BoardSetup } from '@shared/schemas/board-setup.schema';
 import type { Part } from '@shared/schemas/part.schema';
-import type { RailWithParts } from '@shared/schemas/rail.schema';
+import type { RailWithParts, Verdict } from '@shared/schemas/rail.schema';
 import { useQuery } from '@tanstack/react-query';
-import type { BenchAnalysis } from '@workers/analysis/analysis.interface';
-import { type ReactNode, useEffect, useMemo, useRef, useState } from 'react';
+import { type ReactNode, useCallback, useEffect, useMemo, useRef, useState } from 'react';
 import { Button } from '@/components/ui/button';
 import { Notice } from '@/components/ui/notice';
 import { Section } from '@/components/ui/page';
@@ -12,11 +15,15 @@ import { candidatesQuery } from '../api/part-choice';
 import { useAnalysis } from '../hooks/use-analysis';
 import { useBench } from '../hooks/use-bench';
 import { useBenchKeys } from '../hooks/use-bench-keys';
+import { useChecks } from '../hooks/use-checks';
 import { mixIn, proofText, useMixSearch } from '../hooks/use-mix-search';
 import { type DraftLine, isSameLine, keyed, savedBank } from '../lib/bank-history';
 import { benchCautions } from '../lib/cautions';
 import { bankOfMix, searchQuestion } from '../lib/mix';
+import { cornerOfView, NEXT_VIEW, type ValuesView, VIEW_NAMES } from '../lib/values-view';
 import { BenchFacts } from './bench-facts';
+import { BenchSections } from './bench-sections';
+import { LoadStepPanel, StartUpPanel, WorstCasesPanel } from './check-panels';
 import { PartPicker } from './part-picker';
 import { ConflictDialog, SaveStatus } from './save-status';
 import { chartSpan, memberName, Score } from './score';
@@ -25,23 +32,28 @@ import { SidePanel } from './side-panel';
 
 interface BenchProps {
   server: RailWithParts;
+  /** The board's stack-up and mount recipes. */
+  setup: BoardSetup;
   personId: string;
   canEdit: boolean;
   /** Address of the specification form, for who may edit. */
   editTo: string | null;
   onSaved: (answer: RailWithParts) => void;
-  /** The bank as it stands on the bench has a new result, saved or not. */
-  onResult: (result: Pick<BenchAnalysis, 'holds' | 'tightest'>) => void;
+  /** The bank as it stands on the bench has a new result in service, saved or not. */
+  onResult: (result: Verdict) => void;
   /** Puts the save state where the page wants it (the header). */
   renderStatus: (status: ReactNode) => ReactNode;
 }
 
 /** The working screen of one rail. Mounted anew for each rail (by key). */
-export function Bench({ server, personId, canEdit, editTo, onSaved, onResult, renderStatus }: BenchProps) {
+export function Bench(props: BenchProps) {
+  const { server, setup, personId, canEdit, editTo, onSaved, onResult, renderStatus } = props;
   const { spec } = server.rail;
   const bench = useBench({ server, personId, onSaved });
   const [picking, setPicking] = useState(false);
   const [showLines, setShowLines] = useState(true);
+  const [showEnvelope, setShowEnvelope] = useState(false);
+  const [view, setView] = useState<ValuesView>('service');
   const [previewing, setPreviewing] = useState(false);
   const [adopted, setAdopted] = useState<{ bank: string; text: string; proven: boolean } | null>(null);
   /** A line that should have the focus once it is there, so that the keys go on working. */
@@ -61,13 +73,25 @@ export function Bench({ server, personId, canEdit, editTo, onSaved, onResult, re
     () => (mix ? bankOfMix(bench.lines, mix, known, newPartDistance) : null),
     [mix, bench.lines, known, newPartDistance],
   );
-  const present = useAnalysis('bench', spec, bench.lines, known, whole);
-  const found = useAnalysis('preview', spec, mixLines, known, whole);
+  const document = useMemo(
+    () => railDocument(spec, bench.lines, known, setup),
+    [spec, bench.lines, known, setup],
+  );
+  const checks = useChecks(document, whole);
+  const verdicts = checks.verdicts.value;
+  const corner = cornerOfView(view, verdicts?.corners[0]?.corner ?? null);
+  const present = useAnalysis('bench', spec, bench.lines, known, setup, corner, whole);
+  const found = useAnalysis('preview', spec, mixLines, known, setup, corner, whole);
   const tell = useRef(onResult);
   tell.current = onResult;
   useEffect(() => {
-    if (present.analysis) tell.current(present.analysis);
-  }, [present.analysis]);
+    if (verdicts) tell.current(verdicts.service);
+  }, [verdicts]);
+  const reach_Hz = useMemo(
+    () => (spec.package ? packageReach_Hz(spec.package, spec.band_Hz, targetMask(spec)) : null),
+    [spec],
+  );
+  const numberName = useCallback((number: string) => memberName(number, known), [known]);
   const isPreview = previewing && mixLines !== null;
   const shown = isPreview ? found : present;
   const shownLines = isPreview ? mixLines : bench.lines;
@@ -84,8 +108,15 @@ export function Bench({ server, personId, canEdit, editTo, onSaved, onResult, re
     const all = candidates.data;
     if (!all || all.length === 0 || !canEdit) return null;
     const candidateIds = bench.search.candidateIds ?? all.map((part) => part.id);
-    return searchQuestion(spec, bench.lines, known, { ...bench.search, candidateIds });
-  }, [candidates.data, canEdit, bench.search, bench.lines, known, spec]);
+    try {
+      const settings = { ...bench.search, candidateIds };
+      return searchQuestion(spec, bench.lines, known, setup, settings, view !== 'catalogue');
+    } catch (error) {
+      // A part of the bank has no value in service on this rail; the bench says which one.
+      if (error instanceof EngineError) return null;
+      throw error;
+    }
+  }, [candidates.data, canEdit, bench.search, bench.lines, known, spec, setup, view]);
   const asked = useMemo(() => JSON.stringify(question), [question]);
   const outdated = search.state.kind !== 'idle' && search.question !== null && search.question !== asked;
   const startSearch = () => {
@@ -145,8 +176,10 @@ export function Bench({ server, personId, canEdit, editTo, onSaved, onResult, re
     search: startSearch,
     add: () => canEdit && setPicking(true),
     lines: () => setShowLines((on) => !on),
+    envelope: () => setShowEnvelope((on) => !on),
+    values: () => setView((now) => NEXT_VIEW[now]),
   });
-  const cautions = benchCautions(spec, shownLines, known, shown.analysis);
+  const cautions = benchCautions(spec, shownLines, known, setup, shown.analysis);
   return (
     <div className="flex min-w-0 flex-col xl:flex-row">
       {renderStatus(<SaveStatus save={bench.save} />)}
@@ -170,13 +203,29 @@ export function Bench({ server, personId, canEdit, editTo, onSaved, onResult, re
           analysis={shown.analysis}
           other={other}
           before={before}
+          setup={setup}
+          envelope={showEnvelope && !isPreview ? (verdicts?.envelope ?? null) : null}
+          reach_Hz={reach_Hz}
+          showCatalogue={view !== 'catalogue'}
           span_Hz={zoom ?? whole}
           onSpan={setZoom}
           focusKey={isPreview ? null : focusKey}
           onFocused={() => setFocusKey(null)}
           showLines={showLines}
           readOnly={!canEdit || isPreview}
-          facts={<BenchFacts spec={spec} editTo={editTo} showLines={showLines} onShowLines={setShowLines} />}
+          facts={
+            <BenchFacts
+              spec={spec}
+              editTo={editTo}
+              view={view}
+              onView={setView}
+              showLines={showLines}
+              onShowLines={setShowLines}
+              showEnvelope={showEnvelope}
+              onShowEnvelope={setShowEnvelope}
+              corners={verdicts?.corners.length ?? null}
+            />
+          }
           onCount={(key, count) => bench.edit({ type: 'count', key, count, at: Date.now() })}
           onChange={change}
           onRemove={(key) => bench.edit({ type: 'remove', key })}
@@ -206,11 +255,12 @@ export function Bench({ server, personId, canEdit, editTo, onSaved, onResult, re
                 <p className="text-stone">You see this rail; engineers of the board change it.</p>
               )}
               <p className="text-small text-stone max-lg:hidden">
-                ↑↓ line · ←→ count · A add · U undo · F search · L lines
+                ↑↓ line · ←→ count · A add · U undo · F search · L lines · E envelope · V values
               </p>
             </div>
           }
         />
+        <BenchSections spec={spec} document={document} checks={checks} nameOf={numberName} />
         {bench.lines.length === 0 && !isPreview && (
           <p className="max-w-prose pb-4 text-stone">
             The bank is empty: what you see is source and planes alone.
@@ -222,7 +272,19 @@ export function Bench({ server, personId, canEdit, editTo, onSaved, onResult, re
         aria-label="results"
         className="shrink-0 border-t px-6 py-5 xl:w-[18.5rem] xl:border-t-0 xl:border-l"
       >
-        <SidePanel analysis={shown.analysis} error={shown.error} nameOf={(id) => memberName(id, known)}>
+        <SidePanel
+          analysis={shown.analysis}
+          values={view === 'worst' && verdicts ? `worst case: ${verdicts.corners[0].name}` : VIEW_NAMES[view]}
+          error={shown.error}
+          nameOf={(id) => memberName(id, known)}
+          checks={
+            <>
+              <WorstCasesPanel checks={checks} nameOf={numberName} />
+              <LoadStepPanel checks={checks} frequencyHolds={verdicts?.service.holds ?? null} />
+            </>
+          }
+        >
+          <StartUpPanel checks={checks} voltage_V={spec.voltage_V} />
           {canEdit && (
             <Section title="mix search">
               <SearchPanel
@@ -234,6 +296,7 @@ export function Bench({ server, personId, canEdit, editTo, onSaved, onResult, re
                 locked={lockedCount}
                 previewing={isPreview}
                 outdated={outdated}
+                values={view === 'catalogue' ? 'at catalogue values' : 'in service'}
                 adopted={adopted?.bank === JSON.stringify(savedBank(bench.lines)) ? adopted : null}
                 readOnly={!canEdit}
                 onSettings={bench.setSearch}

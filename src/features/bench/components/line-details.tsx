@@ -1,4 +1,7 @@
+import { ownMount_H } from '@shared/rail/setup';
+import type { BoardSetup } from '@shared/schemas/board-setup.schema';
 import type { Part } from '@shared/schemas/part.schema';
+import type { RailSpec } from '@shared/schemas/rail-spec.schema';
 import { formatQuantity } from '@shared/units/format';
 import { useState } from 'react';
 import { Link } from 'react-router-dom';
@@ -9,18 +12,29 @@ import { QuantityInput } from '@/components/ui/quantity-input';
 import { paths } from '@/config/paths';
 import type { DraftLine } from '../lib/bank-history';
 import { MOST_DISTANCE_M, MOST_MOUNT_H } from '../lib/limits';
+import { LineInductance } from './line-inductance';
+
+function recipeHint(setup: BoardSetup, spec: RailSpec): string {
+  if (setup.recipes.length === 0) return 'the board has none yet';
+  return setup.stackup && spec.plane?.geometry?.pair
+    ? 'from the stack-up'
+    : 'needs the planes from the stack-up';
+}
 
 interface LineDetailsProps {
   line: DraftLine;
   part: Part;
+  spec: RailSpec;
+  setup: BoardSetup;
   /** Applies a change; answers why not, when it may not be. */
   onChange: (patch: Partial<DraftLine>) => string | null;
   onRemove: () => void;
 }
 
 /** How a line is mounted and how far from the load: opened under its row. */
-export function LineDetails({ line, part, onChange, onRemove }: LineDetailsProps) {
+export function LineDetails({ line, part, spec, setup, onChange, onRemove }: LineDetailsProps) {
   const [refusal, setRefusal] = useState<string | null>(null);
+  const usual_H = ownMount_H({ ...line, mount_H: null }, spec, setup)?.mount_H ?? part.mount_H;
   const change = (patch: Partial<DraftLine>) => setRefusal(onChange(patch));
   return (
     <div className="relative z-10 mb-3 border-l-2 border-shallow bg-paper py-1 pl-3">
@@ -31,8 +45,25 @@ export function LineDetails({ line, part, onChange, onRemove }: LineDetailsProps
         · {formatQuantity(part.esr_ohm, 'Ω')} ESR · {formatQuantity(part.esl_H, 'H')} ESL ·{' '}
         {formatQuantity(part.rated_voltage_V, 'V', { trim: true })} rated
       </p>
-      <div className="grid max-w-3xl grid-cols-2 gap-4 sm:grid-cols-4">
-        <Field label="mounting inductance" hint={`usual: ${formatQuantity(part.mount_H, 'H')}`}>
+      <div className="grid max-w-4xl grid-cols-2 gap-4 sm:grid-cols-5">
+        <Field label="mount recipe" hint={recipeHint(setup, spec)}>
+          {(control) => (
+            <Select
+              {...control}
+              value={line.recipeId ?? ''}
+              disabled={line.mount_H !== null || setup.recipes.length === 0}
+              onChange={(event) => change({ recipeId: event.target.value || null })}
+            >
+              <option value="">the part’s usual mount</option>
+              {setup.recipes.map((recipe) => (
+                <option key={recipe.id} value={recipe.id}>
+                  {recipe.name}
+                </option>
+              ))}
+            </Select>
+          )}
+        </Field>
+        <Field label="or its inductance" hint={`empty: ${formatQuantity(usual_H, 'H')}`}>
           {(control) => (
             <QuantityInput
               {...control}
@@ -40,7 +71,7 @@ export function LineDetails({ line, part, onChange, onRemove }: LineDetailsProps
               showFault
               most={MOST_MOUNT_H}
               value={line.mount_H}
-              placeholder={formatQuantity(part.mount_H, 'H')}
+              placeholder={formatQuantity(usual_H, 'H')}
               onCommit={(mount_H) => change({ mount_H })}
             />
           )}
@@ -81,6 +112,7 @@ export function LineDetails({ line, part, onChange, onRemove }: LineDetailsProps
           </Button>
         </div>
       </div>
+      <LineInductance line={line} part={part} spec={spec} setup={setup} />
       {refusal && (
         <p role="alert" className="mt-2 text-small text-kingfisher">
           ▲ {refusal}

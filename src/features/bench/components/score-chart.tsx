@@ -2,6 +2,7 @@ import { lazy, Suspense } from 'react';
 import type { FrequencyAxis, ImpedanceAxis } from '@/components/chart/axis';
 import { xOf, yOf } from '@/components/chart/axis';
 import type { PlotCurve } from '@/components/chart/impedance-plot';
+import { PackageReach } from '@/components/chart/package-reach';
 import { ScaleLabels } from '@/components/chart/scale-labels';
 import { Waterline } from '@/components/chart/waterline';
 
@@ -15,6 +16,10 @@ interface ScoreChartProps {
   waterline: readonly (readonly [number, number])[];
   breaks: readonly { frequency_Hz: number; impedance_ohm: number }[];
   cursor_Hz: number | null;
+  /** The range over all corners, shaded. */
+  band: { frequency_Hz: Float64Array; low_ohm: Float64Array; high_ohm: Float64Array } | null;
+  /** From here on the package keeps the board from the die. */
+  reach_Hz: number | null;
   /** A stretch of the axis to look at; null: the whole. */
   onZoom: (span_Hz: [number, number] | null) => void;
   summary: string;
@@ -33,6 +38,8 @@ export function ScoreChart({
   waterline,
   breaks,
   cursor_Hz,
+  band,
+  reach_Hz,
   onZoom,
   summary,
 }: ScoreChartProps) {
@@ -41,7 +48,7 @@ export function ScoreChart({
       <div className="absolute top-0" style={{ left: -SCALE }}>
         {x.width > 0 && (
           <Suspense fallback={<p className="p-20 text-stone">fetching the chart …</p>}>
-            <ImpedancePlot x={x} y={y} curves={curves} target_ohm={target_ohm} onZoom={onZoom} />
+            <ImpedancePlot x={x} y={y} curves={curves} target_ohm={target_ohm} band={band} onZoom={onZoom} />
           </Suspense>
         )}
       </div>
@@ -75,6 +82,7 @@ export function ScoreChart({
                 />
               )}
             </svg>
+            {reach_Hz !== null && <PackageReach x={x} y={y} reach_Hz={reach_Hz} />}
             <ScaleLabels x={x} y={y} />
             <Waterline x={x} y={y} points={waterline} marks={breaks} />
           </>

@@ -1,5 +1,7 @@
 import { targetAt } from '@shared/engine/target';
 import { targetMask } from '@shared/rail/target-mask';
+import type { Envelope } from '@shared/rail/worst-cases';
+import type { BoardSetup } from '@shared/schemas/board-setup.schema';
 import type { Part } from '@shared/schemas/part.schema';
 import type { RailSpec } from '@shared/schemas/rail-spec.schema';
 import { formatQuantity } from '@shared/units/format';
@@ -20,11 +22,18 @@ interface ScoreProps {
   spec: RailSpec;
   lines: readonly DraftLine[];
   parts: ReadonlyMap<string, Part>;
+  setup: BoardSetup;
   analysis: BenchAnalysis | null;
   /** A second curve: the best mix so far while searching, or the present bank under a preview. */
   other: { name: string; analysis: BenchAnalysis } | null;
   /** Counts before, by part, while a preview is shown. */
   before: ReadonlyMap<string, number> | null;
+  /** The range over all corners, where it is to be seen. */
+  envelope: (Envelope & { frequency_Hz: Float64Array }) | null;
+  /** From here on the package keeps the board from the die. */
+  reach_Hz: number | null;
+  /** Catalogue capacitance by part number, shown before what is left of it. */
+  showCatalogue: boolean;
   span_Hz: readonly [number, number];
   onSpan: (span_Hz: [number, number] | null) => void;
   showLines: boolean;
@@ -43,7 +52,8 @@ const PLOT_HEIGHT = 344;
 
 /** Chart and bank as one score: everything hangs from the chart's frequency axis. */
 export function Score(props: ScoreProps) {
-  const { spec, lines, parts, analysis, other, before, span_Hz, onSpan, showLines, readOnly } = props;
+  const { spec, lines, parts, analysis, other, before, envelope, span_Hz, onSpan, showLines, readOnly } =
+    props;
   const [measure, width] = useWidth<HTMLDivElement>();
   const [cursor_Hz, setCursor] = useState<number | null>(null);
   const rows = useRef<HTMLElement>(null);
@@ -59,12 +69,21 @@ export function Score(props: ScoreProps) {
     [analysis, waterline],
   );
   const y = useMemo(() => ({ low_ohm, high_ohm, height: PLOT_HEIGHT }), [low_ohm, high_ohm]);
-  const curves = useMemo(() => curvesOf(analysis, other, showLines), [analysis, other, showLines]);
+  const curves = useMemo(
+    () => curvesOf(analysis, other, showLines, envelope),
+    [analysis, other, showLines, envelope],
+  );
   const breaks = analysis?.breaks ?? NONE;
   const cursorIndex = analysis && cursor_Hz !== null ? nearest(analysis.frequency_Hz, cursor_Hz) : null;
   const strip = (member: BenchMember | undefined) =>
     analysis && member
-      ? { frequency_Hz: analysis.frequency_Hz, share: member.share, inductance_H: member.inductance_H }
+      ? {
+          frequency_Hz: analysis.frequency_Hz,
+          share: member.share,
+          inductance_H: member.inductance_H,
+          left_F: props.showCatalogue ? member.capacitance_F : null,
+          estimated: props.showCatalogue && member.estimated,
+        }
       : null;
   const shareAt = (member: BenchMember | undefined) =>
     member && cursorIndex !== null ? member.share[cursorIndex] : null;
@@ -103,6 +122,8 @@ export function Score(props: ScoreProps) {
             waterline={waterline}
             breaks={breaks}
             cursor_Hz={cursor_Hz}
+            band={envelope}
+            reach_Hz={props.reach_Hz}
             onZoom={onSpan}
             summary={summaryOf(spec, analysis)}
           />
@@ -141,6 +162,8 @@ export function Score(props: ScoreProps) {
               key={line.key}
               line={line}
               part={parts.get(line.partId)}
+              spec={spec}
+              setup={props.setup}
               axis={x}
               strip={strip(member)}
               cursorShare={shareAt(member)}
@@ -168,6 +191,7 @@ function curvesOf(
   analysis: BenchAnalysis | null,
   other: ScoreProps['other'],
   showLines: boolean,
+  envelope: ScoreProps['envelope'],
 ): PlotCurve[] {
   const curves: PlotCurve[] = [];
   if (analysis && showLines)
@@ -179,6 +203,20 @@ function curvesOf(
           frequency_Hz: analysis.frequency_Hz,
           magnitude_ohm: member.magnitude_ohm,
         });
+  if (envelope)
+    curves.push({
+      name: 'parts that differ',
+      style: 'bound',
+      frequency_Hz: envelope.frequency_Hz,
+      magnitude_ohm: envelope.bound_ohm,
+    });
+  if (analysis?.floor_ohm)
+    curves.push({
+      name: 'board shorted',
+      style: 'floor',
+      frequency_Hz: analysis.frequency_Hz,
+      magnitude_ohm: analysis.floor_ohm,
+    });
   if (other)
     curves.push({
       name: other.name,

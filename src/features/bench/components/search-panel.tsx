@@ -25,6 +25,8 @@ interface SearchPanelProps {
   previewing: boolean;
   /** The rail, a mount, a distance, a lock or a limit has changed since: the answer is to another question. */
   outdated: boolean;
+  /** Which values of the parts the mix has to hold with. */
+  values: string;
   /** What was adopted, while the bank is still that. */
   adopted: { text: string; proven: boolean } | null;
   readOnly: boolean;
@@ -65,10 +67,12 @@ export function SearchPanel(props: SearchPanelProps) {
           </button>
         </>
       )}
+      <p className="text-small text-stone">the mix has to hold {props.values}</p>
       <Outcome state={state} objective={settings.minimise} locked={props.locked} />
       {props.outdated && (
         <Notice tone="caution" title="! outdated">
-          The rail, a mount, a distance or a limit has changed since this search began. Search again.
+          The rail, a mount, a distance, a limit or the values have changed since this search began. Search
+          again.
         </Notice>
       )}
       {props.adopted && (

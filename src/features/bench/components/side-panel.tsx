@@ -7,15 +7,19 @@ import { formatCost } from '@/lib/format-cost';
 
 interface SidePanelProps {
   analysis: BenchAnalysis | null;
+  /** The values it was computed with, in words. */
+  values: string;
   error: { message: string; field: string | null } | null;
   nameOf: (member: string | null) => string;
+  /** What is said right after the breaks. */
+  checks: ReactNode;
   children: ReactNode;
 }
 
 const SHOWN_BREAKS = 6;
 
 /** What matters at the right: headroom, what breaks the surface and why, what the bank comes to. */
-export function SidePanel({ analysis, error, nameOf, children }: SidePanelProps) {
+export function SidePanel({ analysis, values, error, nameOf, checks, children }: SidePanelProps) {
   return (
     <div className="flex flex-col gap-7">
       {error && (
@@ -25,7 +29,7 @@ export function SidePanel({ analysis, error, nameOf, children }: SidePanelProps)
       )}
       {analysis && (
         <>
-          <Section title="headroom, catalogue values">
+          <Section title={`headroom, ${values}`}>
             <p
               data-testid="headroom"
               aria-live="polite"
@@ -42,6 +46,7 @@ export function SidePanel({ analysis, error, nameOf, children }: SidePanelProps)
             </p>
           </Section>
           <Breaks analysis={analysis} nameOf={nameOf} />
+          {checks}
           <Section title="bank">
             <dl className="grid grid-cols-[1fr_auto] gap-x-3">
               <dt>parts · kinds</dt>

@@ -1,4 +1,7 @@
+import type { Corner } from '@shared/rail/corner';
 import { documentPart } from '@shared/rail/document';
+import { ownMount_H } from '@shared/rail/setup';
+import type { BoardSetup } from '@shared/schemas/board-setup.schema';
 import type { Part } from '@shared/schemas/part.schema';
 import type { BankLine } from '@shared/schemas/rail.schema';
 import type { RailSpec } from '@shared/schemas/rail-spec.schema';
@@ -24,16 +27,20 @@ export function useAnalysis(
   spec: RailSpec,
   lines: readonly BankLine[] | null,
   parts: ReadonlyMap<string, Part>,
+  setup: BoardSetup,
+  corner: Corner | null,
   span_Hz: readonly [number, number],
 ): AnalysisState {
   const request = useMemo<BenchRequest | null>(() => {
     if (!lines) return null;
-    const bench = lines.flatMap(({ partId, count, mount_H, distance_m }) => {
-      const part = parts.get(partId);
-      return part ? [{ part: documentPart(part), count, mount_H, distance_m }] : [];
+    const bench = lines.flatMap((line) => {
+      const part = parts.get(line.partId);
+      if (!part) return [];
+      const mount_H = ownMount_H(line, spec, setup)?.mount_H ?? null;
+      return [{ part: documentPart(part), count: line.count, mount_H, distance_m: line.distance_m }];
     });
-    return { spec, lines: bench, span_Hz };
-  }, [lines, parts, spec, span_Hz]);
+    return { spec, lines: bench, corner, span_Hz };
+  }, [lines, parts, spec, setup, corner, span_Hz]);
   const [state, setState] = useState<AnalysisState>(NOTHING);
   useEffect(() => {
     if (!request) {

@@ -6,6 +6,8 @@ interface BenchKeys {
   search: () => void;
   add: () => void;
   lines: () => void;
+  envelope: () => void;
+  values: () => void;
 }
 
 /** Keys of the bench, while nothing is being typed and no dialog is open. */
@@ -40,6 +42,8 @@ export function useBenchKeys(keys: BenchKeys): void {
         f: () => current.current.search(),
         a: () => current.current.add(),
         l: () => current.current.lines(),
+        e: () => current.current.envelope(),
+        v: () => current.current.values(),
       };
       if (!act[key]) return;
       event.preventDefault();

@@ -32,9 +32,10 @@ export function bankDifferences(
   });
 }
 
-const fields = ({ count, mount_H, distance_m, side, locked }: BankLine) => [
+const fields = ({ count, mount_H, recipeId, distance_m, side, locked }: BankLine) => [
   count,
   mount_H,
+  recipeId,
   distance_m,
   side,
   locked,

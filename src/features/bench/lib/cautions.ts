@@ -1,5 +1,6 @@
 import { type Caution, railCautions } from '@shared/rail/cautions';
 import { railDocument } from '@shared/rail/document';
+import type { BoardSetup } from '@shared/schemas/board-setup.schema';
 import type { Part } from '@shared/schemas/part.schema';
 import type { BankLine } from '@shared/schemas/rail.schema';
 import type { RailSpec } from '@shared/schemas/rail-spec.schema';
@@ -13,9 +14,10 @@ export function benchCautions(
   spec: RailSpec,
   lines: readonly BankLine[],
   parts: ReadonlyMap<string, Part>,
+  setup: BoardSetup,
   analysis: Pick<BenchAnalysis, 'cavity_Hz' | 'extrapolated'> | null,
 ): Shown[] {
-  const cautions: Shown[] = railCautions(railDocument(spec, lines, parts));
+  const cautions: Shown[] = railCautions(railDocument(spec, lines, parts, setup));
   const used = lines.filter((line) => line.count > 0).flatMap((line) => parts.get(line.partId) ?? []);
   const open = used.filter((part) => part.state !== 'approved');
   if (open.length > 0)

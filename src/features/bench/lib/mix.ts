@@ -1,4 +1,7 @@
+import { IN_SERVICE } from '@shared/rail/corner';
 import { railDocument } from '@shared/rail/document';
+import { documentIn } from '@shared/rail/in-service';
+import type { BoardSetup } from '@shared/schemas/board-setup.schema';
 import type { Part } from '@shared/schemas/part.schema';
 import type { SearchSettings } from '@shared/schemas/rail.schema';
 import type { RailDocument } from '@shared/schemas/rail-document.schema';
@@ -58,16 +61,20 @@ export function boundText(objective: Objective, bound: number): string {
 
 /**
  * What a search is asked: the rail, its locked lines, the candidates and how each is mounted. Counts of lines that are not
- * locked do not matter to it, so changing one leaves an answer as true as it was.
+ * locked do not matter to it, so changing one leaves an answer as true as it was. Throws EngineError where a part has no value in
+ * service on this rail.
  */
 export function searchQuestion(
   spec: RailSpec,
   lines: readonly DraftLine[],
   parts: ReadonlyMap<string, Part>,
+  setup: BoardSetup,
   search: SearchSettings,
+  inService: boolean,
 ): RailDocument {
   const asked = lines
     .filter((line) => !line.locked || line.count > 0)
     .map((line) => (line.locked ? line : { ...line, count: 1 }));
-  return railDocument(spec, asked, parts, search);
+  const document = railDocument(spec, asked, parts, setup, search);
+  return inService ? documentIn(document, IN_SERVICE) : document;
 }

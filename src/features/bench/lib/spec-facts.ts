@@ -1,3 +1,5 @@
+import { conditionsOf } from '@shared/rail/conditions';
+import { risesFrom_Hz, targetMask } from '@shared/rail/target-mask';
 import type { RailSpec } from '@shared/schemas/rail-spec.schema';
 import { formatQuantity, formatVolts } from '@shared/units/format';
 
@@ -17,16 +19,36 @@ function sourceText({ source }: RailSpec): string {
   }
 }
 
+function levelText(
+  ohm: number,
+  rise: { rise_s?: number | undefined; rising_H?: number | undefined },
+): string {
+  const corner = risesFrom_Hz(ohm, rise);
+  const level = formatQuantity(ohm, 'Ω');
+  return corner === null ? level : `${level}, rising from ${q(corner, 'Hz')}`;
+}
+
 function targetText({ target, voltage_V }: RailSpec): string {
   switch (target.kind) {
     case 'flat':
-      return formatQuantity(target.impedance_ohm, 'Ω');
+      return levelText(target.impedance_ohm, target);
     case 'step':
-      return formatQuantity((voltage_V * target.ripple_percent) / 100 / target.step_A, 'Ω');
+      return levelText((voltage_V * target.ripple_percent) / 100 / target.step_A, target);
     case 'mask':
       return `mask, ${target.points.length} points`;
   }
 }
+
+/** `45 °C, 10 a`, with what was assumed said so. */
+export function conditionsText(spec: Pick<RailSpec, 'conditions'>): string {
+  const { conditions, assumed } = conditionsOf(spec);
+  const years = conditions.age_h / HOURS_A_YEAR;
+  const age =
+    years < 0.5 ? `${Math.round(conditions.age_h)}\u00a0h` : `${Number(years.toPrecision(2))}\u00a0a`;
+  return `${conditions.usual_C}\u00a0°C, ${age}${assumed ? ' (assumed)' : ''}`;
+}
+
+const HOURS_A_YEAR = 8766;
 
 /** What stands in the margin of the bench: each fact of the rail in one line. */
 export function specFacts(spec: RailSpec): [name: string, value: string][] {
@@ -42,14 +64,13 @@ export function specFacts(spec: RailSpec): [name: string, value: string][] {
   facts.push(['planes', spec.plane ? q(spec.plane.capacitance_F, 'F') : 'none']);
   if (spec.package) facts.push(['package', q(spec.package.inductance_H, 'H')]);
   facts.push(['seen at', spec.observe]);
-  facts.push(['values', 'catalogue']);
+  facts.push(['in service', conditionsText(spec)]);
   return facts;
 }
 
 /** Corners of the waterline over the band, for drawing. */
 export function waterlinePoints(spec: RailSpec, targetAt: (f: number) => number): [number, number][] {
   const [low, high] = spec.band_Hz;
-  const corners =
-    spec.target.kind === 'mask' ? spec.target.points.map(([f]) => f).filter((f) => f > low && f < high) : [];
+  const corners = Array.from(targetMask(spec).frequency_Hz).filter((f) => f > low && f < high);
   return [low, ...corners, high].map((f) => [f, targetAt(f)]);
 }

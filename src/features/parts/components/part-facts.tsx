@@ -4,7 +4,7 @@ import { Facts } from '@/components/ui/facts';
 import { formatCost } from '@/lib/format-cost';
 import { dayAndTime } from '@/lib/time';
 import { lowestOf } from '../lib/part-curves';
-import { toleranceText } from '../lib/tolerance';
+import { TOLERANCES } from '../lib/tolerance';
 import { PartStateText } from './part-state';
 
 /** All that the library says about a part. */
@@ -21,7 +21,7 @@ export function PartFacts({ part }: { part: Part }) {
           'capacitance',
           `${formatQuantity(part.capacitance_F, 'F', { trim: true })} (${formatLetterCode(Number(part.capacitance_F.toPrecision(12)), 'F')})`,
         ],
-        ['tolerance', `${toleranceText(part.tolerance, part.capacitance_F)} (${part.tolerance})`],
+        ['tolerance', `${TOLERANCES[part.tolerance]} (${part.tolerance})`],
         ['rated voltage', formatQuantity(part.rated_voltage_V, 'V', { trim: true })],
         ['ESR', formatQuantity(part.esr_ohm, 'Ω')],
         ['ESL', formatQuantity(part.esl_H, 'H')],

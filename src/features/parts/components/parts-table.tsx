@@ -6,7 +6,7 @@ import { TextLink } from '@/components/ui/text-link';
 import { paths } from '@/config/paths';
 import { formatCost } from '@/lib/format-cost';
 import type { PartFilter } from '../lib/part-filter';
-import { toleranceText } from '../lib/tolerance';
+import { TOLERANCES } from '../lib/tolerance';
 import { PartStateText } from './part-state';
 import { SortHead } from './sort-head';
 
@@ -53,7 +53,7 @@ function Row({ part, rooms }: { part: Part; rooms: ReturnType<typeof roomsOf> })
       <Td numeric className="font-semibold">
         <Decimal value={part.capacitance_F} unit="F" fraction={rooms.capacitance} />
       </Td>
-      <Td numeric>{toleranceText(part.tolerance, part.capacitance_F)}</Td>
+      <Td numeric>{TOLERANCES[part.tolerance]}</Td>
       <Td numeric>
         <Decimal value={part.rated_voltage_V} unit="V" fraction={rooms.voltage} />
       </Td>

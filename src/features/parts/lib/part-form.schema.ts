@@ -1,4 +1,4 @@
-import { type Part, partFieldsSchema } from '@shared/schemas/part.schema';
+import { type Part, partFieldsSchema, TOLERANCE_MISFIT, toleranceFits } from '@shared/schemas/part.schema';
 import { formatInput } from '@shared/units/format';
 import { type Parsed, parseLength, parseQuantity } from '@shared/units/parse';
 import type { UnitSymbol } from '@shared/units/quantity';
@@ -54,24 +54,26 @@ const optional = <T extends z.ZodType<number | null, number | null>>(unit: UnitS
     .pipe(range);
 
 /** What stands in the form, all of it text as typed → the fields of a part. */
-export const partFormSchema = z.object({
-  ...shape,
-  description: shape.description.unwrap(),
-  dielectric: shape.dielectric.unwrap(),
-  termination: shape.termination.unwrap(),
-  capacitance_F: required('F', shape.capacitance_F),
-  rated_voltage_V: required('V', shape.rated_voltage_V),
-  esr_ohm: required('Ω', shape.esr_ohm),
-  esl_H: required('H', shape.esl_H),
-  mount_H: required('H', shape.mount_H),
-  height_mm: optional('mm', shape.height_mm.unwrap()),
-  unit_cost: optional('', shape.unit_cost.unwrap()),
-  area_mm2: optional('mm²', shape.area_mm2.unwrap()),
-  ageing_percent_per_decade: optional('%', shape.ageing_percent_per_decade.unwrap()),
-  esr_tolerance_percent: optional('%', shape.esr_tolerance_percent.unwrap()),
-  esl_tolerance_percent: optional('%', shape.esl_tolerance_percent.unwrap()),
-  ...curveShape,
-});
+export const partFormSchema = z
+  .object({
+    ...shape,
+    description: shape.description.unwrap(),
+    dielectric: shape.dielectric.unwrap(),
+    termination: shape.termination.unwrap(),
+    capacitance_F: required('F', shape.capacitance_F),
+    rated_voltage_V: required('V', shape.rated_voltage_V),
+    esr_ohm: required('Ω', shape.esr_ohm),
+    esl_H: required('H', shape.esl_H),
+    mount_H: required('H', shape.mount_H),
+    height_mm: optional('mm', shape.height_mm.unwrap()),
+    unit_cost: optional('', shape.unit_cost.unwrap()),
+    area_mm2: optional('mm²', shape.area_mm2.unwrap()),
+    ageing_percent_per_decade: optional('%', shape.ageing_percent_per_decade.unwrap()),
+    esr_tolerance_percent: optional('%', shape.esr_tolerance_percent.unwrap()),
+    esl_tolerance_percent: optional('%', shape.esl_tolerance_percent.unwrap()),
+    ...curveShape,
+  })
+  .refine(toleranceFits, { path: ['tolerance'], message: TOLERANCE_MISFIT });
 export type PartFormInput = z.input<typeof partFormSchema>;
 export type PartFormOutput = z.output<typeof partFormSchema>;
 

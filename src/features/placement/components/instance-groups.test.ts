@@ -54,6 +54,7 @@ const rail = (railId: string, parts: ReturnType<typeof part>[], placed: string[]
     error: null,
   },
   peaks: [],
+  checks: null,
   instances: placed.map((id, i) => instance(`C${i}`, id)),
 });
 

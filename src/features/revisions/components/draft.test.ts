@@ -1,4 +1,5 @@
 import { railDocument } from '@shared/rail/document';
+import { EMPTY_SETUP } from '@shared/schemas/board-setup.schema';
 import type { Part } from '@shared/schemas/part.schema';
 import { type Rail, searchSettingsSchema } from '@shared/schemas/rail.schema';
 import { railDocumentSchema } from '@shared/schemas/rail-document.schema';
@@ -86,7 +87,7 @@ const cut = (...rails: Rail[]) => ({
   railResults: rails.map(({ id, spec, bank }) => ({
     railId: id,
     document: railDocumentSchema.parse(
-      JSON.parse(JSON.stringify(railDocument(spec, bank, new Map([['p1', part]])))),
+      JSON.parse(JSON.stringify(railDocument(spec, bank, new Map([['p1', part]]), EMPTY_SETUP))),
     ),
   })),
 });
@@ -96,23 +97,23 @@ describe('draftOf', () => {
 
   it('finds nothing changed in what was cut, whenever it was saved', () => {
     const saved = { ...a, version: 9, updatedAt: '2027-01-01T00:00:00Z' };
-    const draft = draftOf({ rails: [saved, b], parts: [part] }, cut(a, b));
+    const draft = draftOf({ rails: [saved, b], parts: [part] }, EMPTY_SETUP, cut(a, b));
     expect(draft).toMatchObject({ latest: 'B', next: 'C', added: [], edited: [], byParts: [], deleted: [] });
     expect(draft.short).toEqual(['B']);
   });
 
   it('tells edited, added and deleted rails apart', () => {
-    const draft = draftOf({ rails: [rail('a', 5), rail('c', 1)], parts: [part] }, cut(a, b));
+    const draft = draftOf({ rails: [rail('a', 5), rail('c', 1)], parts: [part] }, EMPTY_SETUP, cut(a, b));
     expect(draft).toMatchObject({ edited: ['A'], added: ['C'], deleted: ['B'], byParts: [] });
   });
 
   it('tells a changed part from an edit', () => {
-    const draft = draftOf({ rails: [a], parts: [{ ...part, esr_ohm: 0.5 }] }, cut(a));
+    const draft = draftOf({ rails: [a], parts: [{ ...part, esr_ohm: 0.5 }] }, EMPTY_SETUP, cut(a));
     expect(draft).toMatchObject({ edited: [], byParts: ['A'] });
   });
 
   it('has all rails new before the first revision', () => {
-    expect(draftOf({ rails: [a, b], parts: [part] }, null)).toMatchObject({
+    expect(draftOf({ rails: [a, b], parts: [part] }, EMPTY_SETUP, null)).toMatchObject({
       latest: null,
       next: 'A',
       total: 2,

@@ -1,5 +1,6 @@
 import { canonicalJson } from '@shared/formats/canonical-json';
 import { railDocument } from '@shared/rail/document';
+import type { BoardSetup } from '@shared/schemas/board-setup.schema';
 import type { RailList } from '@shared/schemas/rail.schema';
 import type { RailDocument } from '@shared/schemas/rail-document.schema';
 import type { RevisionDetail } from '@shared/schemas/revision.schema';
@@ -42,7 +43,7 @@ type Latest = Pick<RevisionDetail, 'letter'> & {
 const own = ({ rail, bank }: RailDocument): string => canonicalJson({ rail, bank });
 
 /** Compares what the rails say, not when they were saved: an edit that was taken back is none. */
-export function draftOf({ rails, parts }: RailList, latest: Latest | null): Draft {
+export function draftOf({ rails, parts }: RailList, setup: BoardSetup, latest: Latest | null): Draft {
   const byId = new Map(parts.map((part) => [part.id, part]));
   const here = new Set(rails.map((rail) => rail.id));
   const cut = new Map(latest?.railResults.map(({ railId, document }) => [railId, document]));
@@ -58,7 +59,7 @@ export function draftOf({ rails, parts }: RailList, latest: Latest | null): Draf
     unknown: rails.filter((rail) => rail.summary.holds === null).map((rail) => rail.spec.name),
   };
   for (const { id, spec, bank } of rails) {
-    const now = railDocument(spec, bank, byId);
+    const now = railDocument(spec, bank, byId, setup);
     const then = cut.get(id);
     if (!then) draft.added.push(spec.name);
     else if (own(now) !== own(then)) draft.edited.push(spec.name);

@@ -10,6 +10,9 @@ const HEAD = (
   <>
     <Th>rail</Th>
     <Th>tightest headroom</Th>
+    <Th>catalogue</Th>
+    <Th>worst case</Th>
+    <Th>one part open</Th>
     <Th numeric>voltage</Th>
     <Th numeric>target there</Th>
     <Th numeric>impedance</Th>
@@ -19,6 +22,8 @@ const HEAD = (
     <Th numeric>area</Th>
   </>
 );
+
+const CIRCUMSTANCES = ['catalogue', 'worst', 'missing'] as const;
 
 /** The anchor of a rail's section on the revision's page. */
 export const railAnchor = (railId: string) => `rail-${railId}`;
@@ -66,6 +71,15 @@ export function RailResultsTable({ rails }: { rails: readonly RevisionRail[] }) 
           <Td className="min-w-56">
             <Headroom summary={summary} />
           </Td>
+          {[summary.catalogue, summary.worst, summary.missing].map((verdict, i) => (
+            <Td key={CIRCUMSTANCES[i]}>
+              {verdict ? (
+                <HeadroomSign holds={verdict.holds} headroom_dB={verdict.tightest.headroom_dB} />
+              ) : (
+                '—'
+              )}
+            </Td>
+          ))}
           <Td numeric>
             <Decimal value={document.rail.voltage_V} unit="V" fraction={rooms.voltage} />
           </Td>

@@ -5,12 +5,13 @@ import { HeadroomSign } from '@/components/ui/headroom-sign';
 import { Notice } from '@/components/ui/notice';
 import { Section } from '@/components/ui/page';
 import { BankTable } from './bank-table';
+import { ChecksList } from './checks-list';
 import { PeaksTable } from './peaks-table';
 import { railAnchor } from './rail-results-table';
 import { specFacts } from './spec-facts';
 
 /** All that a revision keeps of one rail. */
-export function RailSection({ rail: { railId, document, summary, peaks } }: { rail: RevisionRail }) {
+export function RailSection({ rail: { railId, document, summary, peaks, checks } }: { rail: RevisionRail }) {
   const { rail } = document;
   return (
     <article
@@ -31,10 +32,21 @@ export function RailSection({ rail: { railId, document, summary, peaks } }: { ra
             {summary.error}
           </Notice>
         )}
+        {checks ? (
+          <Section title="checks">
+            <ChecksList rail={rail.name} checks={checks} />
+          </Section>
+        ) : (
+          !summary.error && (
+            <p className="text-stone">
+              Cut before in-service values and worst cases were computed: its figures are at catalogue values.
+            </p>
+          )
+        )}
         <Section title="bank">
-          <BankTable document={document} />
+          <BankTable document={document} inService={checks?.parts ?? []} />
         </Section>
-        <Section title="peaks, catalogue values">
+        <Section title={checks ? 'peaks, in service' : 'peaks, catalogue values'}>
           <PeaksTable rail={rail.name} peaks={peaks} />
         </Section>
         <Section title="cautions">

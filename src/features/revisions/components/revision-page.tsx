@@ -61,7 +61,7 @@ export function RevisionPage({ boardId, letter }: { boardId: string; letter: str
     >
       <p className="border-l-2 border-shallow pl-3 text-stone">
         Read only: this is what stood on the board when it was cut, with the parts’ data of that day. Results
-        are engineering estimates from models with catalogue values; measure the rail before release.
+        are engineering estimates from models; measure the rail before release.
       </p>
       <Header revision={revision} />
       <RailResultsTable rails={revision.railResults} />

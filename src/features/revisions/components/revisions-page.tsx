@@ -16,17 +16,13 @@ interface Props {
 }
 
 /** The form that cuts, once it is known what the latest revision holds. */
-function DraftForm({
-  boardId,
-  rails,
-  letter,
-  onCut,
-}: Pick<Props, 'rails' | 'onCut'> & { boardId: string; letter: string | undefined }) {
-  const latest = useRevision(boardId, letter);
+function DraftForm({ board, rails, letter, onCut }: Props & { letter: string | undefined }) {
+  const latest = useRevision(board.id, letter);
   if (latest.isError)
     return <Failure error={latest.error} what={`revision ${letter}`} retry={() => latest.refetch()} />;
   if (letter !== undefined && !latest.data) return <Loading what={`revision ${letter}`} />;
-  return <CutRevisionForm boardId={boardId} draft={draftOf(rails, latest.data ?? null)} onCut={onCut} />;
+  const draft = draftOf(rails, board.setup, latest.data ?? null);
+  return <CutRevisionForm boardId={board.id} draft={draft} onCut={onCut} />;
 }
 
 export function RevisionsPage({ board, rails, onCut }: Props) {
@@ -44,7 +40,7 @@ export function RevisionsPage({ board, rails, onCut }: Props) {
     >
       {board.rights.edit && (
         <Section title={`the draft${latest ? ` after ${latest}` : ''}`}>
-          <DraftForm boardId={board.id} rails={rails} letter={latest} onCut={onCut} />
+          <DraftForm board={board} rails={rails} letter={latest} onCut={onCut} />
         </Section>
       )}
       {items.length === 0 ? (

@@ -1,0 +1,4 @@
+import * as Comlink from 'comlink';
+import { Yield } from './yield';
+
+Comlink.expose(new Yield());
