@@ -29,6 +29,9 @@ describe('points, one a line', () => {
       reason: 'line 4: 2 numbers are wanted, 1 stands there',
       line: 4,
     });
+    expect(readPoints('1e3,0.01,0.001\n2e3,0.01', ['Hz', 'Ω', 'Ω'])).toMatchObject({
+      reason: 'line 2: 3 numbers are wanted, 2 stand there',
+    });
     expect(readPoints('10k 3m\n1M 2 V', ['Hz', 'Ω'])).toMatchObject({ ok: false, line: 2 });
     expect(readPoints('10k 3m\n1M 2V', ['Hz', 'Ω'])).toMatchObject({
       reason: expect.stringMatching(/^line 2: “V”/),

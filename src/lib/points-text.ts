@@ -53,5 +53,5 @@ function cellsOf(line: string, wanted: number): string[] {
     .filter(Boolean);
   if (cells.length === wanted) return cells;
   const byComma = line.split(/\s*[,;]\s*/).filter(Boolean);
-  return byComma.length === wanted ? byComma : cells;
+  return byComma.length === wanted || byComma.length > cells.length ? byComma : cells;
 }

@@ -23,8 +23,8 @@ test('turns the ripple of a rail into a budget, states conditions, and finds it 
   await page.getByLabel('ripple', { exact: true }).selectOption('budget');
   await page.getByLabel('rail tolerance, ±').fill('5');
   await page.getByLabel('set-point error, ±').fill('0.5');
-  await page.getByLabel('DC drop').fill('6m');
-  await page.getByLabel('the regulator’s own ripple').fill('3mV');
+  await page.getByLabel('DC drop', { exact: true }).fill('6m');
+  await page.getByLabel('the regulator’s own ripple', { exact: true }).fill('3mV');
   // 90 mV − 9 mV − 6 mV − 3 mV = 72 mV, 4 % of 1.8 V; 72 mV ÷ 3 A = 24 mΩ
   await expect(budgetRow(page, 'set-point error')).toHaveText(['9.0 mV', '0.50 %']);
   await expect(budgetRow(page, 'DC drop')).toHaveText(['6.0 mV', '0.33 %']);
@@ -34,8 +34,9 @@ test('turns the ripple of a rail into a budget, states conditions, and finds it 
   await expect(page.getByRole('img', { name: /^rail tolerance ±90\smV/ })).toBeVisible();
   await expect(page.getByText('4 % of 1.8 V at 3 A → 24.0 mΩ')).toBeVisible();
 
-  await page.getByLabel('of this rail').selectOption('stated');
+  await page.getByLabel('conditions of this rail').selectOption('stated');
   await page.getByLabel('coldest, °C').fill('-20');
+  await page.getByLabel('usual, °C').fill('40');
   await page.getByLabel('hottest, °C').fill('85 °C');
   await page.getByLabel('age, years').fill('87660 h');
   await page.getByRole('checkbox', { name: 'ESL' }).uncheck();
@@ -50,7 +51,7 @@ test('turns the ripple of a rail into a budget, states conditions, and finds it 
   await expect(page.getByLabel('set-point error, ±')).toHaveValue('0.5');
   await expect(budgetRow(page, 'left for the bank')).toHaveText(['72.0 mV', '4.00 %']);
   await expect(page.getByLabel('coldest, °C')).toHaveValue('-20');
-  await expect(page.getByLabel('usual, °C')).toHaveValue('45');
+  await expect(page.getByLabel('usual, °C')).toHaveValue('40');
   await expect(page.getByLabel('hottest, °C')).toHaveValue('85');
   await expect(page.getByLabel('age, years')).toHaveValue('10');
   await expect(page.getByRole('checkbox', { name: 'ESR' })).toBeChecked();
@@ -61,7 +62,7 @@ test('refuses a budget that is overspent and says by how much', async ({ page })
   await openSpecification(page, 'VDD_AUX');
   await page.getByLabel('ripple', { exact: true }).selectOption('budget');
   await page.getByLabel('rail tolerance, ±').fill('3');
-  await page.getByLabel('DC drop').fill('132m');
+  await page.getByLabel('DC drop', { exact: true }).fill('132m');
   // 132 mV of 3.3 V are 4 %: one per cent more than there is.
   const sentence = 'nothing is left for the bank: overspent by 33 mV (1 %)';
   await expect(page.getByText(sentence)).toBeVisible();
@@ -104,4 +105,34 @@ test('reads the source from a file, says what is wrong by its line, and takes pl
   await expect(page.getByLabel('output impedance')).toHaveValue('table');
   await expect(page.getByLabel('given as').nth(2)).toHaveValue('stackup');
   await expect(planes).toHaveValue('0');
+});
+
+test('asks before it writes over what a colleague has saved meanwhile, even when that has been fetched', async ({
+  page,
+  browser,
+}) => {
+  await page.clock.install();
+  await openSpecification(page, 'VBUS_72');
+  const address = page.url();
+  const other = await (await browser.newContext()).newPage();
+  await signIn(other, demoEmail('engineer'));
+  await other.goto(address);
+  await other.getByLabel('target impedance').fill('0.7');
+  await other.getByRole('button', { name: 'Save the specification' }).click();
+  await expect(other.getByTestId('headroom')).toBeVisible();
+  await other.context().close();
+
+  // Coming back to the tab fetches the rail anew; the form still holds what was typed from the older one.
+  await page.getByLabel('current limit').fill('3.5');
+  await page.clock.fastForward(60_000);
+  const fetched = page.waitForResponse((answer) => /\/rails\/[0-9a-f-]+$/.test(answer.url()) && answer.ok());
+  await page.evaluate(() => document.dispatchEvent(new Event('visibilitychange', { bubbles: true })));
+  await fetched;
+  await page.getByRole('button', { name: 'Save the specification' }).click();
+  const dialog = page.getByRole('dialog', { name: 'This rail has changed meanwhile' });
+  await expect(dialog).toBeVisible();
+  await dialog.getByRole('button', { name: 'Keep the newer one' }).click();
+  await expect(page.getByTestId('headroom')).toBeVisible();
+  await page.getByRole('link', { name: 'edit specification' }).click();
+  await expect(page.getByLabel('target impedance')).toHaveValue('700m');
 });

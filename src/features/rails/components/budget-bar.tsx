@@ -37,9 +37,11 @@ export function BudgetBar({ figures }: { figures: BudgetFigures }) {
           <LeftName pieces={pieces} />
         </g>
       </svg>
-      <p aria-live="polite" className={spent ? 'font-semibold text-kingfisher' : 'sr-only'}>
-        {spent ? `▲ ${overspentText(figures)}` : `${shareText(figures.left)} left for the bank`}
-      </p>
+      {spent && (
+        <p role="status" className="font-semibold text-kingfisher">
+          ▲ {overspentText(figures)}
+        </p>
+      )}
     </div>
   );
 }

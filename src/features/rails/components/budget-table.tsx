@@ -53,7 +53,7 @@ interface RowProps {
 function Row({ name, share, decimals, className, children }: RowProps) {
   return (
     <tr className={className}>
-      <th scope="row" className="py-0.5 pr-3 text-left font-[inherit]">
+      <th scope="row" className="py-0.5 pr-3 text-left [font-weight:inherit]">
         <span className="flex items-center gap-2">
           <span className="shrink-0" style={{ width: SWATCH }}>
             {children}

@@ -23,7 +23,7 @@ export function ConditionsFields({ bind, result }: { bind: SpecBinding; result: 
       <ChoiceField
         bind={bind}
         field="conditionsKind"
-        label="of this rail"
+        label="conditions of this rail"
         options={[
           ['stated', 'state them'],
           ['assumed', 'leave them assumed'],
@@ -49,7 +49,7 @@ function ToleranceChoice({ bind }: { bind: SpecBinding }) {
     });
   return (
     <fieldset className="flex flex-wrap items-center gap-x-6 gap-y-2">
-      <legend className="section-head">tolerances that go to their ends in the worst cases</legend>
+      <legend className="section-head pb-1">tolerances that go to their ends in the worst cases</legend>
       {TOLERANCES.map(([name, text]) => (
         <Checkbox
           key={name}

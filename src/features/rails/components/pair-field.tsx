@@ -1,6 +1,7 @@
 import { Field } from '@/components/ui/field';
 import { Select } from '@/components/ui/input';
 import { TextLink } from '@/components/ui/text-link';
+import { paths } from '@/config/paths';
 import { pairChoices } from '../lib/plane-pairs';
 import type { SpecBinding } from './spec-binding';
 
@@ -11,7 +12,7 @@ export function PairField({ bind }: { bind: SpecBinding }) {
   const index = choices.findIndex(({ upper, lower }) => upper === pairUpper && lower === pairLower);
   const isGone = index < 0 && pairUpper !== '';
   const page = (
-    <TextLink to={`/boards/${bind.boardId}/stack-up`} target="_blank">
+    <TextLink to={paths.stackup(bind.boardId)} target="_blank">
       {bind.setup.stackup ? 'its page, in a new tab' : 'describe it, in a new tab'}
     </TextLink>
   );

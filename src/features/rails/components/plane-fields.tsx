@@ -14,7 +14,7 @@ export function PlaneFields({ bind, result }: { bind: SpecBinding; result: strin
         field="planeKind"
         label="given as"
         options={[
-          ['stackup', bind.setup.stackup ? 'from the stack-up' : 'from the stack-up (none yet)'],
+          ['stackup', bind.setup.stackup ? 'from the stack-up' : 'stack-up: none'],
           ['dimensions', 'dimensions'],
           ['values', 'C, R and L'],
           ['none', 'no planes'],

@@ -107,7 +107,7 @@ export function ChoiceField<K extends FieldOf<string>>({
 /** Whether a subject is described at all; its fields appear with it. */
 export function DescribedField({ bind, field }: { bind: SpecBinding; field: FieldOf<boolean> }) {
   return (
-    <div className="flex items-center">
+    <div className="col-span-full">
       <Checkbox
         label="described"
         name={field}

@@ -71,7 +71,7 @@ export function SpecFormView(props: SpecFormProps) {
         <TextField bind={bind} field="name" label="name" placeholder="VDD_CORE" />
         <QuantityField bind={bind} field="voltage" label="voltage" unit="V" />
       </SpecGroup>
-      <TargetFields bind={bind} result={said.target} />
+      <TargetFields bind={bind} result={said.target} budget={said.budget} />
       <BandFields bind={bind} result={said.band} />
       <SourceFields bind={bind} result={said.source} />
       <PlaneFields bind={bind} result={said.planes} />

@@ -4,7 +4,16 @@ import { ChoiceField, PointsField, QuantityField } from './spec-fields';
 import { SpecGroup } from './spec-group';
 
 /** The waterline: how high it lies, where it rises, and what the ripple behind it is left by. */
-export function TargetFields({ bind, result }: { bind: SpecBinding; result: string }) {
+export function TargetFields({
+  bind,
+  result,
+  budget,
+}: {
+  bind: SpecBinding;
+  result: string;
+  /** What the budget of a target that names no ripple comes to. */
+  budget: string;
+}) {
   const { targetKind, budgetKind } = bind.form;
   const isStep = targetKind === 'step';
   return (
@@ -45,12 +54,14 @@ export function TargetFields({ bind, result }: { bind: SpecBinding; result: stri
           <QuantityField bind={bind} field="impedance" label="target impedance" unit="Ω" />
         )}
         {targetKind === 'mask' ? (
-          <PointsField
-            bind={bind}
-            field="mask"
-            label="points"
-            hint="one a line: frequency, impedance, e.g. 10k 3m"
-          />
+          <div className="sm:col-span-2">
+            <PointsField
+              bind={bind}
+              field="mask"
+              label="points"
+              hint="one a line: frequency, impedance, e.g. 10k 3m"
+            />
+          </div>
         ) : (
           <RiseFields bind={bind} />
         )}
@@ -60,6 +71,7 @@ export function TargetFields({ bind, result }: { bind: SpecBinding; result: stri
           title="noise budget"
           note="What the rail’s tolerance leaves as ripple: load step and worst pattern are held against it."
           below={budgetKind === 'budget' && <BudgetFields bind={bind} />}
+          result={budget}
         >
           <ChoiceField
             bind={bind}
@@ -80,16 +92,18 @@ function RiseFields({ bind }: { bind: SpecBinding }) {
   const { riseKind } = bind.form;
   return (
     <>
-      <ChoiceField
-        bind={bind}
-        field="riseKind"
-        label="towards high frequencies"
-        options={[
-          ['level', 'level'],
-          ['time', 'rises after 1 ÷ (π · rise time)'],
-          ['inductance', 'rises with an inductance'],
-        ]}
-      />
+      <div className="sm:col-span-2">
+        <ChoiceField
+          bind={bind}
+          field="riseKind"
+          label="towards high frequencies"
+          options={[
+            ['level', 'level'],
+            ['time', 'rises after 1 ÷ (π · rise time)'],
+            ['inductance', 'rises with an inductance'],
+          ]}
+        />
+      </div>
       {riseKind === 'time' && (
         <QuantityField
           bind={bind}

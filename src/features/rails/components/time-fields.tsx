@@ -25,7 +25,7 @@ export function TimeFields({ bind, startUp }: { bind: SpecBinding; startUp: stri
       </SpecGroup>
       <SpecGroup
         title="start-up"
-        note="Inrush into the bank is checked with them; without them only the mean current at an assumed soft start is said."
+        note="Inrush into the bank is checked with soft start and current limit; without them only the mean current at an assumed soft start is said."
         result={startUp}
       >
         <DescribedField bind={bind} field="hasStartUp" />

@@ -12,7 +12,7 @@ export function formOf(spec: RailSpec): SpecForm {
   return {
     ...EMPTY_SPEC,
     name: spec.name,
-    voltage: formatInput(spec.voltage_V),
+    voltage: String(spec.voltage_V),
     ...targetFields(spec),
     ...budgetFields(spec),
     ...bandFields(spec),

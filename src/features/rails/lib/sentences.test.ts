@@ -22,6 +22,11 @@ describe('what the target comes to', () => {
     const budget = { budgetKind: 'budget', tolerance: '5', setpoint: '1', regulatorRipple: '9m' } as const;
     expect(said(budget)('target')).toBe('3 % of 0.9 V at 9 A → 3.00 mΩ');
     expect(said({ ...budget, dcDrop: '27m' })('target')).toBe('');
+    expect(said(budget)('budget')).toBe('');
+    const flat = { ...budget, targetKind: 'flat', impedance: '10m' } as const;
+    expect(said(flat)('budget')).toBe('the rail may move by 27 mV (3 %) under its load');
+    expect(said({ ...flat, dcDrop: '27m' })('budget')).toBe('');
+    expect(said({ ...flat, budgetKind: 'none' })('budget')).toBe('');
   });
 
   it('says from where it rises, and where the band makes that pointless', () => {

@@ -1,8 +1,8 @@
 import { type Parsed, parseLength, parseQuantity } from '@shared/units/parse';
 import type { UnitSymbol } from '@shared/units/quantity';
-import { readPoints } from '@/lib/points-text';
 import { parseAge } from './age-text';
 import { parseCelsius } from './celsius-text';
+import { readPointsOnce } from './points-memo';
 import type { SpecErrors, SpecField, SpecForm } from './spec-form';
 
 /** Reads fields and notes at each what was not understood; its value is then NaN. */
@@ -46,7 +46,7 @@ export function specReader(form: SpecForm): SpecReader {
     celsius: (field) => take(field, parseCelsius(text(field))),
     age: (field) => take(field, parseAge(text(field))),
     points: (field, units) => {
-      const read = readPoints(text(field), units);
+      const read = readPointsOnce(text(field), units);
       if (!read.ok) {
         fault(field, read.reason);
         return [];

@@ -3,7 +3,8 @@ import { risesFrom_Hz } from '@shared/rail/target-mask';
 import type { Target } from '@shared/schemas/rail-spec.schema';
 import { formatQuantity, formatVolts } from '@shared/units/format';
 import type { UnitSymbol } from '@shared/units/quantity';
-import { liveBand, liveTarget } from './live';
+import { isSpent, shareText } from './budget';
+import { liveBand, liveBudget, liveTarget } from './live';
 import type { SpecForm } from './spec-form';
 
 const q = (value: number, unit: UnitSymbol) => formatQuantity(value, unit, { trim: true });
@@ -26,6 +27,12 @@ export function targetSentence(form: SpecForm): string {
     case 'mask':
       return maskText(target.points, band);
   }
+}
+
+/** What a budget leaves to a target that names no ripple itself; a step's target has it in its own sentence. */
+export function budgetSentence(form: SpecForm): string {
+  const figures = form.targetKind === 'step' ? null : liveBudget(form);
+  return figures && !isSpent(figures) ? `the rail may move by ${shareText(figures.left)} under its load` : '';
 }
 
 /** `8.50 mΩ up to 31.8 MHz, then 20 dB a decade`. */

@@ -85,9 +85,7 @@ describe('specFacts', () => {
       },
     });
     expect(value(rows, 'start-up')).toBe('1 ms soft start, limit 12 A');
-    expect(value(rows, 'plane')).toBe(
-      '2.2 nF, 100 mm × 60 mm, 0.1 mm apart, from L2 GND and L3 PWR of the stack-up',
-    );
+    expect(value(rows, 'plane')).toBe('2.2 nF, 100 mm × 60 mm, 0.1 mm apart, layers L2 GND and L3 PWR');
     expect(value(specFacts(spec), 'start-up')).toBeUndefined();
   });
 });

@@ -86,7 +86,7 @@ function planeText({ plane }: RailSpec): string {
   const size = plane.geometry
     ? `, ${formatLength(plane.geometry.length_m)} × ${formatLength(plane.geometry.width_m)}, ${formatLength(plane.geometry.spacing_m)} apart`
     : '';
-  const layers = plane.geometry?.pair ? `, from ${plane.geometry.pair.join(' and ')} of the stack-up` : '';
+  const layers = plane.geometry?.pair ? `, layers ${plane.geometry.pair.join(' and ')}` : '';
   return `${q(plane.capacitance_F, 'F')}${size}${layers}`;
 }
 
