@@ -31,6 +31,7 @@ export const router = createBrowserRouter([
           { path: 'boards/new', lazy: () => import('./routes/new-board') },
           { path: 'boards/:boardId', lazy: () => import('./routes/board') },
           { path: 'boards/:boardId/people', lazy: () => import('./routes/board-people') },
+          { path: 'boards/:boardId/stack-up', lazy: () => import('./routes/setup') },
           { path: 'boards/:boardId/rails/new', lazy: () => import('./routes/new-rail') },
           { path: 'boards/:boardId/rails/:railId', lazy: () => import('./routes/bench') },
           {

@@ -8,6 +8,7 @@ export const paths = {
   newBoard: () => '/boards/new',
   board: (boardId: string) => `/boards/${boardId}`,
   boardPeople: (boardId: string) => `/boards/${boardId}/people`,
+  stackup: (boardId: string) => `/boards/${boardId}/stack-up`,
   newRail: (boardId: string) => `/boards/${boardId}/rails/new`,
   bench: (boardId: string, railId: string) => `/boards/${boardId}/rails/${railId}`,
   specification: (boardId: string, railId: string) => `/boards/${boardId}/rails/${railId}/specification`,

@@ -70,6 +70,7 @@ export function SideNav() {
             <Item to={paths.board(boardId)} end>
               Rails
             </Item>
+            <Item to={paths.stackup(boardId)}>Stack-up</Item>
             <Item to={paths.revisions(boardId)}>Revisions</Item>
             <Item to={paths.placement(boardId)}>Placement</Item>
             <Item to={paths.boardPeople(boardId)}>{peoplePageTitle(board.data.rights.manage)}</Item>
