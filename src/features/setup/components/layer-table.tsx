@@ -28,7 +28,7 @@ export function LayerTable({ layers, faults, current, edit }: Props) {
           <th scope="col" className={cx(HEAD, 'border-l-[3px] border-l-transparent text-left')}>
             layer
           </th>
-          <th scope="col" className={cx(HEAD, 'w-[30%] text-left')}>
+          <th scope="col" className={cx(HEAD, 'w-[34%] sm:w-[30%] text-left')}>
             kind
           </th>
           <th scope="col" className={cx(HEAD, 'w-[20%] text-right')}>

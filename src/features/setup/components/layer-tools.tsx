@@ -16,7 +16,7 @@ export function LayerTools({ layers, current, onMove, onInsert, onRemove }: Prop
   const layer = layers[at];
   if (!layer)
     return <p className="mb-2 py-0.5 text-stone">Choose a layer to move it or to add one beside it.</p>;
-  const name = layer.name.trim() || 'this layer';
+  const name = layer.name.trim() || 'a layer without a name';
   return (
     <div role="toolbar" aria-label={`layer ${name}`} className="mb-2 flex flex-wrap items-baseline gap-x-4">
       <span className="max-w-[18ch] truncate font-semibold">{name}</span>

@@ -27,8 +27,8 @@ export function MountBar({ segments, full_H, height, ticks = [] }: Props) {
           key={tick}
           x1={percent(tick, full_H)}
           x2={percent(tick, full_H)}
-          y1={-8}
-          y2={height + 8}
+          y1={-3}
+          y2={height + 3}
           className={tick === 0 ? 'stroke-stone' : 'stroke-hairline'}
         />
       ))}

@@ -73,7 +73,7 @@ export function RecipeEditor({ view, place, faults, edit }: Props) {
       )}
       {mount ? (
         <div className="flex flex-col gap-3">
-          <p>
+          <p aria-live="polite">
             <span className="text-large font-semibold" data-testid="mount-inductance">
               {inductanceText(mount.total_H)}
             </span>{' '}

@@ -44,7 +44,7 @@ export function RecipeList({ views, usage, open, faulty, onOpen, onPutBack }: Pr
             {ticks.map((tick) => (
               <span
                 key={tick}
-                className={cx('absolute whitespace-nowrap', tick > 0 && '-translate-x-1/2')}
+                className={cx('absolute whitespace-nowrap', shiftOf((tick * PICO) / full_H))}
                 style={{ left: `${(100 * tick * PICO) / full_H}%` }}
               >
                 {tick === 0 ? '0' : `${tick} pH`}
@@ -56,3 +56,7 @@ export function RecipeList({ views, usage, open, faulty, onOpen, onPutBack }: Pr
     </div>
   );
 }
+
+/** A figure stands under its hairline, but does not hang over an end of the axis. */
+const shiftOf = (place: number): string =>
+  place === 0 ? '' : place > 0.9 ? '-translate-x-full' : '-translate-x-1/2';

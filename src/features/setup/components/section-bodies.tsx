@@ -40,14 +40,14 @@ export function PartEnds({ geometry, frame }: { geometry: SectionGeometry; frame
   ));
 }
 
-/** Over the part's end, or before it where that is too narrow. */
+/** In the part's end, or beside it over the trace where that is too narrow. */
 function PartName({ from, to, y }: { from: number; to: number; y: number }) {
   const isWide = to - from > 34;
   return (
     <text
-      x={isWide ? (from + to) / 2 : from - 5}
-      y={isWide ? y : y - 6}
-      textAnchor={isWide ? 'middle' : 'end'}
+      x={isWide ? (from + to) / 2 : to + 6}
+      y={y}
+      textAnchor={isWide ? 'middle' : 'start'}
       className="fill-stone"
     >
       part

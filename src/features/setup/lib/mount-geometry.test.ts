@@ -78,7 +78,11 @@ describe('recipes at a place', () => {
     const layers = liveLayers(outside) ?? [];
     const [pair] = pairFigures(layers);
     const top = mountAt(shape(), { layers, pair, side: 'top' });
-    expect('mount' in top && top.mount.viaDepth_m).toBe(0);
+    if (!('mount' in top)) throw new Error(top.reason);
+    expect(top.mount.viaDepth_m).toBe(0);
+    const section = sectionGeometry(shape(), { layers, pair, side: 'top' }, top.mount);
+    expect(section.viaBottom).toBe(section.surface);
+    expect(section.viaEnds[0]).toBe(section.surface);
   });
 });
 
