@@ -12,6 +12,7 @@ import type { Actor } from './actor';
 import { boardDetail } from './board.service';
 import { openBoard, touchBoard } from './board-access';
 import { loadSetup } from './board-setup';
+import { personRef } from './person.service';
 import { railResult } from './rail-results';
 
 /**
@@ -28,14 +29,36 @@ export async function saveSetup(
     await openBoard(manager, actor, boardId, 'edit');
     const { setupVersion } = await loadSetup(manager, boardId);
     const now = ctx.now().toISOString();
-    if (setupVersion !== body.version) throw stale(await boardDetail(manager, actor, boardId), null, now);
+    if (setupVersion !== body.version) throw await staleSetup(manager, actor, boardId);
     const rails = await manager.findBy(RailEntity, { boardId });
     requireUsedRecipes(rails, body.setup);
-    await manager.update(BoardEntity, { id: boardId }, { setup: body.setup, setupVersion: setupVersion + 1 });
+    await manager.update(
+      BoardEntity,
+      { id: boardId },
+      {
+        setup: body.setup,
+        setupVersion: setupVersion + 1,
+        setupUpdatedAt: now,
+        setupUpdatedById: actor.id,
+      },
+    );
     await renewRails(manager, rails, body.setup);
     await touchBoard(manager, boardId, now);
     return boardDetail(manager, actor, boardId);
   });
+}
+
+/** The refusal of a save that started from an older setup, with who saved the newer one and when. */
+async function staleSetup(manager: EntityManager, actor: Actor, boardId: string) {
+  const board = await manager.findOneOrFail(BoardEntity, {
+    where: { id: boardId },
+    relations: { setupUpdatedBy: true },
+  });
+  return stale(
+    await boardDetail(manager, actor, boardId),
+    personRef(board.setupUpdatedBy),
+    board.setupUpdatedAt ?? board.createdAt,
+  );
 }
 
 function requireUsedRecipes(rails: readonly RailEntity[], setup: BoardSetup): void {

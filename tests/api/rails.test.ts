@@ -1,6 +1,7 @@
 import { railListSchema, railWithPartsSchema, searchSettingsSchema } from '@shared/schemas/rail.schema';
 import { railDocumentSchema } from '@shared/schemas/rail-document.schema';
 import { afterEach, beforeEach, describe, expect, it } from 'vitest';
+import { renewOldResults } from '../../server/services/renew-results';
 import { type Caller, openTestApp, type TestApp } from '../helpers/app';
 import { DEMO_BOARD, OTHER_BOARD, partId, people, railId } from '../helpers/people';
 import { railBody, railSpec } from '../helpers/rail-body';
@@ -36,7 +37,11 @@ describe('rails', () => {
     const { rail, parts } = railWithPartsSchema.parse(body);
     expect(rail).toMatchObject({ position: 6, version: 1, updatedBy: { id: people.engineer.id } });
     expect(rail.summary).toMatchObject({ holds: true, parts: 7, kinds: 2, error: null });
-    expect(rail.summary.tightest?.headroom_dB).toBeGreaterThan(0);
+    const { tightest, catalogue, worst, missing } = rail.summary;
+    expect(tightest?.headroom_dB).toBeGreaterThan(0);
+    expect(catalogue?.tightest.headroom_dB).toBeGreaterThan(tightest?.headroom_dB ?? 0);
+    expect(worst?.tightest.headroom_dB).toBeLessThan(tightest?.headroom_dB ?? 0);
+    expect(missing).toMatchObject({ part: expect.stringContaining('AB-'), holds: false });
     expect(rail.search).toEqual(searchSettingsSchema.parse({}));
     expect(parts).toHaveLength(2);
   });
@@ -45,6 +50,23 @@ describe('rails', () => {
     await t.ctx.db.write((manager) => manager.query(`UPDATE rail SET search = '{"minimise":"area"}'`));
     for (const rail of (await list()).rails)
       expect(rail.search).toEqual(searchSettingsSchema.parse({ minimise: 'area' }));
+  });
+
+  it('that an older engine computed are computed anew at start-up', async () => {
+    const before = await list();
+    await t.ctx.db.write((manager) =>
+      manager.query(
+        `UPDATE rail SET summary = json_object('engineVersion', '1.0.0', 'holds', json('true'), 'tightest', NULL,
+           'parts', 0, 'kinds', 0, 'cost', NULL, 'area_mm2', NULL, 'error', NULL), holds = 1`,
+      ),
+    );
+    // Lists read what is stored, also while it is old.
+    expect((await list()).rails[0].summary).toMatchObject({ engineVersion: '1.0.0', worst: null });
+    await expect(renewOldResults(t.ctx)).resolves.toBe(before.rails.length);
+    await expect(renewOldResults(t.ctx)).resolves.toBe(0);
+    const after = await list();
+    expect(after.rails.map((rail) => rail.summary)).toEqual(before.rails.map((rail) => rail.summary));
+    expect(after.rails.map((rail) => rail.version)).toEqual(before.rails.map((rail) => rail.version));
   });
 
   it('say why there is no result', async () => {

@@ -6,7 +6,7 @@ import { railDocumentSchema } from '@shared/schemas/rail-document.schema';
 import { afterEach, beforeEach, describe, expect, it } from 'vitest';
 import { demoSetup } from '../../server/db/demo/setup';
 import { type Caller, openTestApp, type TestApp } from '../helpers/app';
-import { DEMO_BOARD, OTHER_BOARD, partId } from '../helpers/people';
+import { DEMO_BOARD, OTHER_BOARD, partId, people } from '../helpers/people';
 import { railSpec } from '../helpers/rail-body';
 
 const BOARD = `/boards/${DEMO_BOARD}`;
@@ -128,6 +128,7 @@ describe('stack-up and mount recipes', () => {
     await engineer.put(SETUP, { version, setup: first }).expect(200);
     const { body } = await engineer.put(SETUP, { version, setup: demoSetup }).expect(409);
     expect(body.type).toBe('urn:millpond:problem:stale');
+    expect(body.changedBy).toEqual({ id: people.engineer.id, name: expect.any(String) });
     expect(boardDetailSchema.parse(body.current)).toMatchObject({ setup: first, setupVersion: version + 1 });
     expect((await board()).setup).toEqual(first);
   });

@@ -75,7 +75,10 @@ test('searches once, sees mixes and the proof, adopts the proven smallest mix', 
   await openBench(page, 'VDD_CORE');
   expect(await headroom(page)).toBeLessThan(0);
   await page.keyboard.press('f');
-  await expect(page.getByText('best so far')).toBeVisible({ timeout: 5_000 });
+  // Proven in a fraction of a second, the best so far may be the smallest mix before one sees it.
+  await expect(page.getByRole('term').filter({ hasText: /best so far|smallest mix/ })).toBeVisible({
+    timeout: 5_000,
+  });
   await expect(page.getByText(/fewest possible, proven/)).toBeVisible({ timeout: 120_000 });
   const weight = Number((await textOf(page.getByText(/^\d+\sparts$/).first())).split(' ')[0]);
   await page.getByRole('button', { name: 'Preview the mix' }).click();

@@ -26,7 +26,7 @@ test('a rail that holds at catalogue values is short in service, and shows why',
   await expect(worstCases(page)).toContainText(/catalogue.*holds/);
   await expect(worstCases(page)).toContainText(/in service.*short/);
   // The row says what is left, and that an estimate stands in for a curve.
-  await expect(page.getByRole('button', { name: /4\.7\sµF X5R 0402/ })).toContainText(
+  await expect(page.getByRole('button', { name: /^4\.7\sµF X5R 0402, / })).toContainText(
     /4\.7 → .* ≈ estimated/,
   );
   const table = page.getByRole('table', { name: 'values of the bank’s parts in service' });

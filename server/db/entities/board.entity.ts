@@ -6,6 +6,7 @@ import { PersonEntity } from './person.entity';
 @Index('board_by_name', ['name', 'id'])
 @Index('board_by_owner', ['ownerId'])
 @Index('board_by_editor', ['updatedById'])
+@Index('board_by_setup_editor', ['setupUpdatedById'])
 export class BoardEntity {
   @PrimaryColumn({ type: 'text' }) id!: string;
   @Column({ type: 'text' }) name!: string;
@@ -18,6 +19,11 @@ export class BoardEntity {
   /** Stack-up and mount recipes; null: nothing has been said yet. */
   @Column({ type: 'simple-json', nullable: true }) setup!: BoardSetup | null;
   @Column({ name: 'setup_version', type: 'integer', default: 1 }) setupVersion!: number;
+  @Column({ name: 'setup_updated_at', type: 'text', nullable: true }) setupUpdatedAt!: string | null;
+  @Column({ name: 'setup_updated_by', type: 'text', nullable: true }) setupUpdatedById!: string | null;
+  @ManyToOne(() => PersonEntity, { onDelete: 'SET NULL' })
+  @JoinColumn({ name: 'setup_updated_by' })
+  setupUpdatedBy?: PersonEntity | null;
   @Column({ name: 'created_at', type: 'text' }) createdAt!: string;
   @Column({ name: 'updated_at', type: 'text' }) updatedAt!: string;
   @Column({ name: 'updated_by', type: 'text', nullable: true }) updatedById!: string | null;

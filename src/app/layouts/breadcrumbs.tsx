@@ -14,6 +14,7 @@ const PAGES: Record<string, string> = {
   mail: 'Mail',
   account: 'Account',
   specification: 'Specification',
+  'stack-up': 'Stack-up',
 };
 
 /** A step before the last: a long name must not push the page's own off. */

@@ -55,6 +55,7 @@ export function Bench(props: BenchProps) {
   const [showEnvelope, setShowEnvelope] = useState(false);
   const [view, setView] = useState<ValuesView>('service');
   const [previewing, setPreviewing] = useState(false);
+  const [searchWanted, setSearchWanted] = useState(false);
   const [adopted, setAdopted] = useState<{ bank: string; text: string; proven: boolean } | null>(null);
   /** A line that should have the focus once it is there, so that the keys go on working. */
   const [focusKey, setFocusKey] = useState<string | null>(null);
@@ -120,11 +121,22 @@ export function Bench(props: BenchProps) {
   const asked = useMemo(() => JSON.stringify(question), [question]);
   const outdated = search.state.kind !== 'idle' && search.question !== null && search.question !== asked;
   const startSearch = () => {
-    if (!question) return;
+    if (!question) {
+      // Asked before the candidates have come: begins as soon as they have.
+      setSearchWanted(candidates.isPending);
+      return;
+    }
+    setSearchWanted(false);
     setPreviewing(false);
     setAdopted(null);
     void search.start(question);
   };
+
+  const begin = useRef(startSearch);
+  begin.current = startSearch;
+  useEffect(() => {
+    if (searchWanted && question) begin.current();
+  }, [searchWanted, question]);
 
   const addPart = (part: Part) => {
     bench.learn([part]);

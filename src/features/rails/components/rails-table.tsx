@@ -17,7 +17,8 @@ const WIDER = 'hidden lg:table-cell';
 const HEAD = (
   <>
     <Th>rail</Th>
-    <Th>state</Th>
+    <Th>in service</Th>
+    <Th className={WIDE}>worst case</Th>
     <Th numeric className={WIDE}>
       target
     </Th>
@@ -112,6 +113,15 @@ function Row({ rail, columns }: { rail: Rail; columns: ReturnType<typeof columns
         <span className="block text-small text-stone sm:hidden">
           {summary.tightest && `at ${inLine(summary.tightest.frequency_Hz, 'Hz')}`}
         </span>
+      </Td>
+      <Td className={WIDE}>
+        {summary.worst ? (
+          <span title={summary.worst.corner}>
+            <HeadroomSign holds={summary.worst.holds} headroom_dB={summary.worst.tightest.headroom_dB} />
+          </span>
+        ) : (
+          '—'
+        )}
       </Td>
       <Td numeric className={WIDE}>
         {spec.target.kind === 'mask' ? maskText(rail) : columns.target.of(rail)}
