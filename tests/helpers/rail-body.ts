@@ -4,7 +4,7 @@ import { partId } from './people';
 export const railSpec = (name: string): RailSpecInput => ({
   name,
   voltage_V: 1.2,
-  target: { kind: 'flat', impedance_ohm: 0.05 },
+  target: { kind: 'flat', impedance_ohm: 0.06 },
   band_Hz: [10e3, 10e6],
   source: { kind: 'rl', resistance_ohm: 0.002, inductance_H: 20e-9 },
 });
