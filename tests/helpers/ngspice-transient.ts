@@ -41,7 +41,8 @@ export function transientDeck(network: RailNetwork, step: TimedStep): string {
   return [
     ...circuit,
     `Iload ${port} 0 PWL(${pairs})`,
-    '.options reltol=1e-6 abstol=1e-12 vntol=1e-12 chgtol=1e-18 trtol=1',
+    `.save v(${port})`,
+    '.options reltol=1e-5 abstol=1e-9 vntol=1e-9',
     '.control',
     'set filetype=binary',
     `tran MAX_STEP ${end_s} 0 MAX_STEP`,
@@ -58,15 +59,17 @@ export interface Transient {
   voltage_V: Float64Array;
 }
 
-/** Runs a deck with steps of at most `max_s`. */
-export function runTransient(deck: string, max_s: number): Transient {
+/** Runs a deck with steps of at most `max_s`; throws when ngspice gave up before `end_s`. */
+export function runTransient(deck: string, max_s: number, end_s: number): Transient {
   const folder = mkdtempSync(join(tmpdir(), 'millpond-ngspice-'));
   try {
     const output = join(folder, 'out.raw');
     const input = join(folder, 'deck.cir');
     writeFileSync(input, deck.replaceAll('MAX_STEP', max_s.toExponential(6)).replace('OUTPUT', output));
     execFileSync('ngspice', ['-b', input], { stdio: 'ignore', timeout: 300_000 });
-    return readBinary(readFileSync(output));
+    const run = readBinary(readFileSync(output));
+    if (!((run.time_s.at(-1) ?? 0) > 0.999 * end_s)) throw new Error('ngspice gave up');
+    return run;
   } finally {
     rmSync(folder, { recursive: true, force: true });
   }
@@ -106,21 +109,28 @@ export function extremesOf({ time_s, voltage_V }: Transient): StepExtremes {
   };
 }
 
-/** Halves the largest step until droop and overshoot change by less than 0.05 % of the larger of the two. */
-export function convergedTransient(deck: string, first_s: number): { max_s: number; run: Transient } {
-  let max_s = first_s;
-  let run = runTransient(deck, max_s);
-  for (let round = 0; round < 10; round++) {
-    const before = extremesOf(run);
-    max_s /= 2;
-    run = runTransient(deck, max_s);
-    const now = extremesOf(run);
+/**
+ * Quarters the largest step until droop and overshoot have twice changed by less than 0.05 % of the larger of the two: once may be
+ * chance, where ngspice chooses smaller steps by itself.
+ */
+export function convergedTransient(
+  deck: string,
+  first_s: number,
+  end_s: number,
+): StepExtremes & { max_s: number } {
+  let before = extremesOf(runTransient(deck, first_s, end_s));
+  let calm = 0;
+  for (let round = 1; round < 8; round++) {
+    const max_s = first_s / 4 ** round;
+    const now = extremesOf(runTransient(deck, max_s, end_s));
     const scale = Math.max(now.droop_V, now.overshoot_V);
     const change = Math.max(
       Math.abs(now.droop_V - before.droop_V),
       Math.abs(now.overshoot_V - before.overshoot_V),
     );
-    if (change < 5e-4 * scale) return { max_s, run };
+    calm = change < 5e-4 * scale ? calm + 1 : 0;
+    if (calm === 2) return { max_s, ...now };
+    before = now;
   }
   throw new Error('the transient did not converge');
 }
