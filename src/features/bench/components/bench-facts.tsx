@@ -1,9 +1,11 @@
 import type { RailSpec } from '@shared/schemas/rail-spec.schema';
 import { Link } from 'react-router-dom';
 import { Checkbox } from '@/components/ui/input';
+import { WordChoice } from '@/components/ui/word-choice';
 import { specFacts } from '../lib/spec-facts';
-import type { ValuesView } from '../lib/values-view';
-import { ValuesSwitch } from './values-switch';
+import { type ValuesView, VIEW_NAMES } from '../lib/values-view';
+
+const VIEWS = (['catalogue', 'service', 'worst'] as const).map((view) => [view, VIEW_NAMES[view]] as const);
 
 interface BenchFactsProps {
   spec: RailSpec;
@@ -41,7 +43,7 @@ export function BenchFacts(props: BenchFactsProps) {
           edit specification
         </Link>
       )}
-      <ValuesSwitch view={props.view} onView={props.onView} />
+      <WordChoice legend="values shown" options={VIEWS} value={props.view} onChoice={props.onView} />
       <div className="flex flex-wrap gap-x-4 gap-y-1 text-small text-stone">
         <Checkbox
           label="lines"

@@ -2,7 +2,7 @@ import { formatQuantity } from '@shared/units/format';
 import type { RailInTime } from '@workers/checks/checks.interface';
 import { useMemo, useState } from 'react';
 import { TimeChart } from '@/components/chart/time-chart';
-import { cx } from '@/lib/class-names';
+import { WordChoice } from '@/components/ui/word-choice';
 import { type StepWindow, stepWindows } from '../lib/step-windows';
 
 /** The voltage over time for the load step, and for the pattern of the load that adds up all swings. */
@@ -37,12 +37,12 @@ function Step({ time: { step, load, allowance_V } }: { time: RailInTime }) {
           in {formatQuantity(rise_s, 's', { trim: true })}, held {formatQuantity(hold_s, 's', { trim: true })}
           , back in {formatQuantity(fall_s, 's', { trim: true })}
         </p>
-        <Choice
-          name="stretch"
+        <WordChoice
           legend="stretch of time shown"
-          options={windows}
+          options={windows.map((one) => [one.name, one.label] as const)}
           value={shown.name}
           onChoice={setName}
+          className="text-small"
         />
       </div>
       <TimeChart
@@ -78,6 +78,11 @@ function Step({ time: { step, load, allowance_V } }: { time: RailInTime }) {
   );
 }
 
+const WAYS = [
+  ['fall', 'furthest down'],
+  ['rise', 'furthest up'],
+] as const;
+
 function Pattern({ time: { pattern, load, allowance_V, limit_Hz } }: { time: RailInTime }) {
   const [way, setWay] = useState<'fall' | 'rise'>('fall');
   if (!pattern || !load) return null;
@@ -97,15 +102,12 @@ function Pattern({ time: { pattern, load, allowance_V, limit_Hz } }: { time: Rai
           {formatQuantity(limit_Hz, 'Hz', { trim: true })} (ten times the band) are taken as still: neither
           the load nor this network says anything there.
         </p>
-        <Choice
-          name="way"
+        <WordChoice
           legend="direction of the worst pattern"
-          options={[
-            { name: 'fall', label: 'furthest down' },
-            { name: 'rise', label: 'furthest up' },
-          ]}
+          options={WAYS}
           value={way}
           onChoice={setWay}
+          className="text-small whitespace-nowrap"
         />
       </div>
       {run.edges.length > 0 && (
@@ -125,40 +127,5 @@ function Pattern({ time: { pattern, load, allowance_V, limit_Hz } }: { time: Rai
         />
       )}
     </div>
-  );
-}
-
-interface ChoiceProps<T extends string> {
-  name: string;
-  legend: string;
-  options: readonly { name: T; label: string }[];
-  value: T;
-  onChoice: (value: T) => void;
-}
-
-/** A choice in a row of words. */
-function Choice<T extends string>({ name, legend, options, value, onChoice }: ChoiceProps<T>) {
-  return (
-    <fieldset className="flex gap-4 text-small whitespace-nowrap">
-      <legend className="sr-only">{legend}</legend>
-      {options.map((one) => (
-        <label
-          key={one.name}
-          className={cx(
-            'cursor-pointer underline-offset-4 has-focus-visible:outline-2 has-focus-visible:outline-deep',
-            one.name === value ? 'font-bold underline' : 'text-deep hover:underline',
-          )}
-        >
-          <input
-            type="radio"
-            name={name}
-            className="sr-only"
-            checked={one.name === value}
-            onChange={() => onChoice(one.name)}
-          />
-          {one.label}
-        </label>
-      ))}
-    </fieldset>
   );
 }
