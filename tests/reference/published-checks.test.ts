@@ -5,7 +5,7 @@ import type { LineModel, RailNetwork } from '@shared/engine/network';
 import { findPeaks } from '@shared/engine/peaks';
 import { cavityResonances, pathInductance, planeCapacitance } from '@shared/engine/plane';
 import { compileRail, impedanceMagnitude } from '@shared/engine/rail';
-import { targetFromStep } from '@shared/engine/target';
+import { risingTarget, spectrumCorner_Hz, targetAt, targetFromStep } from '@shared/engine/target';
 import { describe, expect, it } from 'vitest';
 
 /** Published values and worked examples; each entry of the fixture names its source and whether it was read, computed or remembered. */
@@ -46,6 +46,21 @@ describe('target impedance', () => {
   compare('zt-lesson', (c) => 1e3 * targetFromStep(c.V_V, c.ripple_pct, c.step_A));
   compare('zt-cpu', (c) => 1e3 * targetFromStep(c.dV_mV * 1e-3, 100, c.dI_A));
   compare('zt-ott-a', (c) => 1e3 * targetFromStep(c.dV_mV * 1e-3, 100, c.dI_A));
+  compare('zt-ott-fbreak', (c) => 1e-6 * spectrumCorner_Hz(c.tr_ns * 1e-9));
+  // So many parts that together they stay under a target that rises from the spectrum's corner: n·Z_t = |Z| of one there.
+  for (const id of ['zt-ott-n', 'zt-ott2-n'])
+    compare(id, (c) => {
+      const target = risingTarget(c.Zt_mohm * 1e-3, spectrumCorner_Hz(c.tr_ns * 1e-9));
+      const one = compileRail(capacitors({ esr_ohm: 0, capacitance_F: 1, inductance_H: c.L_each_nH * 1e-9 }));
+      const above = 7 * target.frequency_Hz[0];
+      return impedanceMagnitude(one, above) / targetAt(target, above);
+    });
+  for (const id of ['zt-ott-C', 'zt-ott2-C'])
+    compare(id, (c) => {
+      const bank = { esr_ohm: 0, capacitance_F: 1e-9, inductance_H: 0 };
+      const z1 = impedanceMagnitude(compileRail(capacitors(bank)), c.f_MHz * 1e6);
+      return (z1 / (c.n * c.Zt_mohm * 1e-3)) * (id === 'zt-ott-C' ? 1e3 : 1);
+    });
   compare('zt-cmin', (c) => {
     // The capacitance whose |Z| is the target at f, through the engine: solve |Z(C)| = Z by its 1/C law.
     const z1 = impedanceMagnitude(
