@@ -80,13 +80,13 @@ export function thinOut({ time_s, fall_V }: Drawing, most: number): Drawing {
   return { time_s: kept.map((i) => time_s[i]), fall_V: kept.map((i) => fall_V[i]) };
 }
 
-/** Puts single points, such as exact extrema, between the others. */
+/** Puts single points, such as exact extrema, between the others, or in place of one at the same time. */
 export function withPoints(
   drawing: Drawing,
   more: readonly (readonly [time_s: number, fall_V: number])[],
 ): Drawing {
   const rows = [...drawing.time_s.map((time, i) => [time, drawing.fall_V[i]] as const), ...more];
   rows.sort((a, b) => a[0] - b[0]);
-  const kept = rows.filter((row, i) => i === 0 || row[0] > rows[i - 1][0]);
+  const kept = rows.filter((row, i) => i + 1 === rows.length || row[0] < rows[i + 1][0]);
   return { time_s: kept.map((row) => row[0]), fall_V: kept.map((row) => row[1]) };
 }

@@ -8,21 +8,27 @@ export interface Turn {
 export const wayOf = (turns: readonly Turn[], sign: 1 | -1): number =>
   turns.reduce((sum, { ohm }, i) => sum + (i > 0 ? Math.max(0, sign * (ohm - turns[i - 1].ohm)) : 0), 0);
 
-/** The turns that are left when swings of less than `least_ohm` are passed over. The first turn stays, the last may go. */
+/** The turns that are left when swings of less than `least_ohm` are passed over: each is that far from the next. */
 export function largeSwings(turns: readonly Turn[], least_ohm: number): Turn[] {
-  const kept = [turns[0]];
-  let best = turns[0];
+  const kept: Turn[] = [];
+  let low = turns[0];
+  let high = turns[0];
   let direction = 0;
   for (const turn of turns) {
-    const beyond = turn.ohm - best.ohm;
-    if (direction * beyond > 0) best = turn;
-    else if (Math.abs(beyond) >= least_ohm && beyond !== 0) {
-      if (direction !== 0) kept.push(best);
-      direction = Math.sign(beyond);
-      best = turn;
+    // Until a swing is large enough the lowest and the highest so far may be where it begins; after that only the way back counts.
+    if (turn.ohm > high.ohm) high = turn;
+    if (turn.ohm < low.ohm) low = turn;
+    if (direction <= 0 && turn.ohm > low.ohm && turn.ohm - low.ohm >= least_ohm) {
+      kept.push(low);
+      direction = 1;
+      high = turn;
+    } else if (direction >= 0 && turn.ohm < high.ohm && high.ohm - turn.ohm >= least_ohm) {
+      kept.push(high);
+      direction = -1;
+      low = turn;
     }
   }
-  if (direction !== 0) kept.push(best);
+  if (direction !== 0) kept.push(direction > 0 ? high : low);
   return kept;
 }
 

@@ -30,7 +30,7 @@ export function worstSwitching(
   const sign = direction === 'fall' ? 1 : -1;
   const placed = turns.map(([, ohm], i) => {
     const at_s = placeOf(turns, i, rise_s, jumps ? NOTCH * rise_s : 0);
-    return { at_s: Math.min(at_s, longest_s), ohm };
+    return { at_s: Number.isFinite(at_s) ? at_s : Math.max(longest_s, turns[i - 1]?.[0] ?? 0), ohm };
   });
   const kept = fewestSwings(placed, sign, LEAVE_OUT, MOST_EDGES);
   const runs = kept
