@@ -15,9 +15,11 @@ const BLOCK = 32;
 const PHASE = 0.39;
 /** A mode of this share of what a line may be off need not be followed. */
 const UNSEEN = 0.25;
-/** Points in one stretch after which ringing is no longer followed, and how many more there are then. */
+/** Points in one stretch and in all after which ringing is no longer followed, and what share of the stretch a step then takes. */
 const MOST_IN_STRETCH = 150_000;
-const COARSE = 1000;
+const MOST_IN_ALL = 600_000;
+const coarsest = (all: number, before: number): number =>
+  all > MOST_IN_ALL ? 1 / 8 : all - before > MOST_IN_STRETCH ? 1e-3 : 0;
 
 /**
  * Adds points of a stretch to a drawing, from its start to `until_s` after it, so close that a straight line between two is off by no
@@ -46,8 +48,7 @@ export function drawStretch(
     rates.bury(1e-3 * chord_V);
     const left_s = until_s - now_s;
     const wanted_s = drawingStep(rates, UNSEEN * chord_V, chord_V, PHASE);
-    const isTooMuch = time_s.length - before > MOST_IN_STRETCH;
-    const finest_s = Math.min(left_s, isTooMuch ? Math.max(wanted_s, left_s / COARSE) : wanted_s);
+    const finest_s = Math.min(left_s, Math.max(wanted_s, until_s * coarsest(time_s.length, before)));
     if (now_s === 0 && jump_V > chord_V) put(1e-3 * finest_s, rates.fall_V + rates.fallsBy(1e-3 * finest_s));
     const many = Math.min(BLOCK, Math.ceil(left_s / finest_s));
     const step_s = Math.min(finest_s, left_s / many);

@@ -118,6 +118,20 @@ describe('a load step', () => {
     expect(long.droop_V).toBeLessThan(0.1001);
   });
 
+  it('draws ringing that is too long to be followed all the way, to its end', () => {
+    // Q = 70 000 at 150 kHz while the load is held for half a minute: millions of swings.
+    const lines = [{ ...network.lines[0], esr_ohm: 1e-7 }];
+    const source = { kind: 'rl' as const, resistance_ohm: 1e-7, inductance_H: 1e-8 };
+    const { time_s, voltage_V } = loadStep(
+      poleForm(compileRail({ ...network, source, lines })),
+      { ...step, hold_s: 30 },
+      1,
+    );
+    expect(time_s.length).toBeLessThanOrEqual(20_000);
+    expect(time_s[time_s.length - 1]).toBeGreaterThan(30);
+    expect(voltage_V.every(Number.isFinite)).toBe(true);
+  });
+
   it('finds no less than dense points do, and hardly more, on random rails', () => {
     fc.assert(
       fc.property(

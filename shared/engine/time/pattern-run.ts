@@ -27,11 +27,12 @@ export interface PatternRun {
 const MOST_POINTS = 8000;
 /** How far a straight line between two points may be off, as a share of the bound. */
 const CHORD = 2e-3;
+/** Share of the total variation below which a bound is rounding. */
 const NOTHING = 1e-9;
 /** How much longer than to its extreme the pattern is shown. */
 const SHOWN = 1.1;
 
-const atRest: PatternRun = {
+const atRest = (): PatternRun => ({
   bound_V: 0,
   edges: [],
   corners: [[0, 0]],
@@ -39,7 +40,7 @@ const atRest: PatternRun = {
   deviation_V: new Float64Array(1),
   simulated_V: 0,
   simulated_time_s: 0,
-};
+});
 
 /** Bound, pattern and its voltage in one direction, for a load of `step_A` whose edges take `rise_s`; see worst-pattern.ts. */
 export function patternRun(
@@ -51,8 +52,7 @@ export function patternRun(
 ): PatternRun {
   const sign = direction === 'fall' ? 1 : -1;
   const bound_V = 0.5 * step_A * (edge.variation_ohm + sign * form.dc_ohm);
-  // A rise of nothing but rounding has no pattern.
-  if (bound_V <= NOTHING * step_A * edge.variation_ohm) return atRest;
+  if (bound_V <= NOTHING * step_A * edge.variation_ohm) return atRest();
   const longest_s = settledAfter(form, rise_s, (0.1 * LEAVE_OUT * bound_V) / step_A);
   const { edges, peak_s } = worstSwitching(edge, direction, longest_s, rise_s, form.inductance_H > 0);
   const current = smoothed(edges, step_A, rise_s);

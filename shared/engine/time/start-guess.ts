@@ -53,7 +53,7 @@ function logAdd(x: number, y: number): number {
 /**
  * Where to begin the search for the zeros of a polynomial, given the logarithms of its coefficients: on circles whose radii
  * are the slopes of the upper convex hull of ln|b_k| over k, as many on each as the edge is long (D. A. Bini, Numerical
- * Algorithms 13, 1996) here in the left half plane, where a passive rail has its poles.
+ * Algorithms 13, 1996), all in the left half plane, where a passive rail has its poles.
  */
 export function startGuess(logB: readonly number[]): { re: Float64Array; im: Float64Array } {
   const hull: number[] = [];

@@ -3,9 +3,9 @@ import { climb, climbScratch, type Ladder } from './ladder';
 import { startGuess } from './start-guess';
 
 const MOST_ROUNDS = 120;
-/** A correction this small, relative to the zero, is rounding, */
+/** A correction this small, relative to the zero, is rounding. */
 const FINE = 4e-16;
-/** and so is one this small that no longer shrinks. */
+/** So is one this small that no longer shrinks. */
 const FAIRLY_FINE = 1e-12;
 /** Between two zeros that all but coincide rounding leaves corrections of about its root, which never end. */
 const NOISE = 1e-6;
