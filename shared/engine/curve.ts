@@ -1,4 +1,4 @@
-import { BankSum, sampleAdmittance } from './bank-sum';
+import { addSamples, BankSum, blankSamples, sampleAdmittance } from './bank-sum';
 import { type Branch, selfResonance_Hz } from './branch';
 import { EngineError } from './errors';
 import { type CompiledRail, railImpedance, scratch, seenImpedance } from './rail';
@@ -56,7 +56,7 @@ export function sweepCurve(
     railImpedance(rail, f, out);
     return point(f, -1);
   };
-  const samples = options.samples ?? sampleRail(rail, low_Hz, high_Hz, options);
+  const samples = options.samples ?? sampleTotal(rail, low_Hz, high_Hz, options);
   const sampled = (i: number): number[] => {
     const { frequency_Hz, total } = samples;
     out[0] = total.g[i];
@@ -107,17 +107,42 @@ export function sampleRail(
   high_Hz: number,
   options: Omit<CurveOptions, 'samples'> = {},
 ): BankSum {
+  const frequency_Hz = sampleGrid(rail, low_Hz, high_Hz, options);
+  return new BankSum(
+    frequency_Hz,
+    rail.members.map((member) => sampleAdmittance(member.branch, frequency_Hz, member.id)),
+    rail.members.map((member) => member.count),
+  );
+}
+
+/** As `sampleRail`, when only the sum is asked for. */
+function sampleTotal(
+  rail: CompiledRail,
+  low_Hz: number,
+  high_Hz: number,
+  options: Omit<CurveOptions, 'samples'>,
+): Pick<BankSum, 'frequency_Hz' | 'total'> {
+  const frequency_Hz = sampleGrid(rail, low_Hz, high_Hz, options);
+  const total = blankSamples(frequency_Hz.length);
+  for (const { branch, count, id } of rail.members)
+    if (count > 0) addSamples(branch, count, frequency_Hz, total, id);
+  return { frequency_Hz, total };
+}
+
+/** The points that a sweep starts from, and between each two their middle in ln f. */
+function sampleGrid(
+  rail: CompiledRail,
+  low_Hz: number,
+  high_Hz: number,
+  options: Omit<CurveOptions, 'samples'>,
+): Float64Array {
   const grid = startGrid(rail, low_Hz, high_Hz, options);
   const frequency_Hz = new Float64Array(2 * grid.length - 1);
   grid.forEach((f, i) => {
     frequency_Hz[2 * i] = f;
     if (i > 0) frequency_Hz[2 * i - 1] = Math.sqrt(grid[i - 1] * f);
   });
-  return new BankSum(
-    frequency_Hz,
-    rail.members.map((member) => sampleAdmittance(member.branch, frequency_Hz, member.id)),
-    rail.members.map((member) => member.count),
-  );
+  return frequency_Hz;
 }
 
 /** Both ends slope one way and the middle the other: two extrema hide between the ends. */

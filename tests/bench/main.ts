@@ -3,10 +3,12 @@ import { benchChart } from './chart';
 import { benchChecks } from './checks';
 import { benchEngine } from './engine';
 import { benchSearch } from './search';
+import { benchTime } from './time';
 
 const BENCHES: Record<string, () => string | Promise<string>> = {
   engine: benchEngine,
   checks: benchChecks,
+  time: benchTime,
   search: benchSearch,
   api: benchApi,
   chart: benchChart,

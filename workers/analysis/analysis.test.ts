@@ -72,7 +72,10 @@ describe('the analysis of a bench', () => {
       samples = kept.samples;
       const { analysis: fresh } = analyseBench(counted(counts), null);
       expect(kept.analysis.tightest.impedance_ohm / fresh.tightest.impedance_ohm).toBeCloseTo(1, 12);
-      expect(kept.analysis.frequency_Hz).toEqual(fresh.frequency_Hz);
+      expect(kept.analysis.frequency_Hz.length).toBe(fresh.frequency_Hz.length);
+      kept.analysis.frequency_Hz.forEach((f, i) => {
+        expect(f / fresh.frequency_Hz[i]).toBeCloseTo(1, 9);
+      });
       kept.analysis.members.forEach((member, k) => {
         member.share.forEach((share, i) => {
           expect(share).toBeCloseTo(fresh.members[k].share[i], 10);
