@@ -41,9 +41,9 @@ function target(from: string, specifier: string): string {
 }
 
 const imports = (file: string): string[] =>
-  [...readFileSync(path.join(root, file), 'utf8').matchAll(/(?:from|import)\s*\(?\s*['"]([^'"\n]+)['"]/g)].map(
-    (m) => target(file, m[1]),
-  );
+  [
+    ...readFileSync(path.join(root, file), 'utf8').matchAll(/(?:from|import)\s*\(?\s*['"]([^'"\n]+)['"]/g),
+  ].map((m) => target(file, m[1]));
 
 const zoneOf = (file: string): string =>
   Object.keys(MAY_IMPORT)
