@@ -6,6 +6,7 @@ import { type KeyboardEvent, useState } from 'react';
 import type { FrequencyAxis } from '@/components/chart/axis';
 import { ShareStrip } from '@/components/chart/share-strip';
 import { cx } from '@/lib/class-names';
+import { shareUnit } from '@/lib/shared-unit';
 import type { DraftLine } from '../lib/bank-history';
 import { partName } from '../lib/part-name';
 import { LineDetails } from './line-details';
@@ -137,7 +138,8 @@ function RowFacts({
     line.side === 'bottom' && 'bottom',
     line.locked && 'locked',
   ].filter(Boolean);
-  const left = part && strip?.left_F != null ? leftText(part.capacitance_F, strip.left_F) : null;
+  const left =
+    part && strip?.left_F != null ? leftText(part.capacitance_F, strip.left_F, strip.estimated) : null;
   const whole = [left, strip?.estimated && '≈ estimated', ...place].filter(Boolean).join(' · ');
   return (
     <span title={whole}>
@@ -150,13 +152,13 @@ function RowFacts({
   );
 }
 
-/** `22 → 9.41 µF`: both in the unit of what is left. */
-function leftText(catalogue_F: number, left_F: number): string {
-  const left = formatQuantity(left_F, 'F');
-  const whole = formatQuantity(catalogue_F, 'F', { trim: true });
-  const unit = left.slice(left.indexOf('\u00a0'));
-  return whole.endsWith(unit) ? `${whole.slice(0, -unit.length)} → ${left}` : `${whole} → ${left}`;
-}
+/** `22 → 9.41 µF`; an estimate is not worth three digits. */
+const leftText = (catalogue_F: number, left_F: number, estimated: boolean): string =>
+  shareUnit(
+    formatQuantity(catalogue_F, 'F', { trim: true }),
+    '→',
+    formatQuantity(left_F, 'F', { digits: estimated ? 2 : 3 }),
+  );
 
 /** The share under the pointer, in per cent; its line is kept when there is none, so that rows do not jump. */
 export function CursorShare({ share }: { share: number | null }) {

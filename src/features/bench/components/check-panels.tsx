@@ -4,6 +4,7 @@ import type { RailInTime, RailVerdicts } from '@workers/checks/checks.interface'
 import type { ReactNode } from 'react';
 import { Section } from '@/components/ui/page';
 import { cx } from '@/lib/class-names';
+import { shareUnit } from '@/lib/shared-unit';
 import type { BenchChecks } from '../hooks/use-checks';
 import { whyPatternFails } from '../lib/pattern-words';
 import { VerdictLine } from './verdict-line';
@@ -137,14 +138,10 @@ function AgainstAllowance({
   );
 }
 
-/** `22.4 of 25.5 mV`; the unit twice only where the two differ. */
-function ofText(value_V: number, allowance_V: number | null): string {
-  const value = formatQuantity(value_V, 'V');
-  if (allowance_V === null) return value;
-  const whole = formatQuantity(allowance_V, 'V');
-  const unit = whole.slice(whole.indexOf('\u00a0'));
-  return value.endsWith(unit) ? `${value.slice(0, -unit.length)} of ${whole}` : `${value} of ${whole}`;
-}
+const ofText = (value_V: number, allowance_V: number | null): string =>
+  allowance_V === null
+    ? formatQuantity(value_V, 'V')
+    : shareUnit(formatQuantity(value_V, 'V'), 'of', formatQuantity(allowance_V, 'V'));
 
 /** What start-up takes, and what the bank stores. */
 export function StartUpPanel({ checks: { inTime }, voltage_V }: { checks: BenchChecks; voltage_V: number }) {

@@ -3,6 +3,7 @@ import type { PartInService } from '@shared/schemas/checks.schema';
 import type { RailSpec } from '@shared/schemas/rail-spec.schema';
 import { formatFixed, formatQuantity, formatVolts } from '@shared/units/format';
 import { Table, Td, Th } from '@/components/ui/table';
+import { shareUnit } from '@/lib/shared-unit';
 
 /** How each part's catalogue value becomes what the board has. */
 export function InServiceTable({
@@ -52,7 +53,7 @@ export function InServiceTable({
             {formatQuantity(part.service_F, 'F')}
           </Td>
           <Td numeric>
-            {formatQuantity(part.lowest_F, 'F')} … {formatQuantity(part.highest_F, 'F')}
+            {shareUnit(formatQuantity(part.lowest_F, 'F'), '…', formatQuantity(part.highest_F, 'F'))}
           </Td>
         </tr>
       ))}
