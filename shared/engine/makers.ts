@@ -10,6 +10,9 @@ export interface Makers {
 /** A member whose susceptance is below this share of the whole admittance makes nothing: it only happens to be there. */
 const MATTERS = 0.1;
 
+/** The package makes a peak only where its reactance is at least this share of what the board shows. */
+const BOARD_RULES = 0.7;
+
 /**
  * Who carries the largest inductive and the largest capacitive current: at an anti-resonance the two lines that pass current
  * back and forth, at a rising edge one alone. Looked at from the die, its capacitance stands against package and board.
@@ -33,7 +36,9 @@ export function makersAt(rail: CompiledRail, frequency_Hz: number): Makers {
     whole = Math.hypot(re / z2 + y[0], throughBoard + y[1]);
   }
   const dieMatters = die > MATTERS * whole;
-  const packageMatters = throughBoard < 0 && package_ohm > Math.max(0, board_ohm);
+  // Where the board itself resonates its impedance is large and nearly real: then its own lines make the peak, not the package.
+  const packageMatters =
+    throughBoard < 0 && package_ohm > Math.max(board_ohm, n2 > 0 ? BOARD_RULES / Math.sqrt(n2) : 0);
   return {
     inductive: packageMatters ? 'package' : node.inductive,
     capacitive: dieMatters ? 'die' : packageMatters ? null : node.capacitive,

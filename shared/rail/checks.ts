@@ -5,12 +5,12 @@ import type { RailSpec } from '../schemas/rail-spec.schema';
 import { conditionsOf } from './conditions';
 import { cornersOf, IN_SERVICE } from './corner';
 import { documentIn, serviceValues } from './in-service';
-import { type RailTime, railStartUp, railTime, worstSwing_V } from './time';
+import { type RailTime, railStartUp, railTime, worstCornerStep, worstSwing_V } from './time';
 import { cornerResults, headroomOf, missingParts } from './worst-cases';
 
 /**
  * Everything that is checked of a rail, in the form that a revision keeps. null where the rail has no result (its summary says
- * why). Start-up takes the bank at catalogue values: that is the most there is to charge.
+ * why). Start-up takes the bank at the upper end of its tolerances and without bias: that is the most there is to charge.
  */
 export function checkRail(document: RailDocument): RailChecks | null {
   try {
@@ -30,7 +30,10 @@ export function checkRail(document: RailDocument): RailChecks | null {
       corners: corners.length,
       missing: missing ?? null,
       allowance_V: time.allowance_V,
+      load: time.load,
+      load_assumed: time.assumed,
       ...timeChecks(time),
+      worst_step: worstCornerStep(document),
       start_up: startUpCheck(document),
     };
   } catch (error) {

@@ -23,6 +23,7 @@ export function documentPart(part: Part): DocumentPart {
     rated_voltage_V: part.rated_voltage_V,
     ...(part.height_mm !== null && { height_mm: part.height_mm }),
     termination: part.termination,
+    ...(part.state !== 'approved' && { state: part.state }),
     ...(part.bias_curve !== null && { bias_curve: part.bias_curve }),
     ...(part.temperature_curve !== null && { temperature_curve: part.temperature_curve }),
     ...(part.ageing_percent_per_decade !== null && {

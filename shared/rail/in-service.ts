@@ -1,5 +1,7 @@
 import { EngineError } from '../engine/errors';
+import type { ImpedanceTable } from '../engine/network';
 import { inService, type ServiceValues } from '../engine/service/in-service';
+import { fitSeries } from '../engine/table';
 import type { DocumentPart, RailDocument } from '../schemas/rail-document.schema';
 import type { RailSpec } from '../schemas/rail-spec.schema';
 import { conditionsOf } from './conditions';
@@ -58,19 +60,46 @@ export function partIn(
         esr_table: part.esr_table.map(([f, r]): [number, number] => [f, r * esr_factor]),
       }),
     ...(part.impedance_table && {
-      table_shift: {
-        inductance_H: esl_H - part.esl_H,
-        elastance_perF: 1 / capacitance_F - 1 / part.capacitance_F,
-        resistance_factor: esr_factor,
-      },
+      table_shift: tableShift(part.impedance_table, values.capacitance_factor, esr_factor, values.esl_factor),
     }),
   };
 }
+
+/** What factors of C, ESR and ESL change of a measured table: by the table's own C and L, not by the catalogue's. */
+export function tableShift(
+  points: NonNullable<DocumentPart['impedance_table']>,
+  capacitance_factor: number,
+  esr_factor: number,
+  esl_factor: number,
+): TableShift {
+  const { inductance_H, elastance_perF } = fitSeries(impedanceTable(points));
+  return {
+    inductance_H: inductance_H * (esl_factor - 1),
+    elastance_perF: elastance_perF * (1 / capacitance_factor - 1),
+    resistance_factor: esr_factor,
+  };
+}
+
+/** Rows of [Hz, Re, Im] as the engine takes them. */
+export const impedanceTable = (points: readonly (readonly [number, number, number])[]): ImpedanceTable => ({
+  frequency_Hz: Float64Array.from(points, (p) => p[0]),
+  re_ohm: Float64Array.from(points, (p) => p[1]),
+  im_ohm: Float64Array.from(points, (p) => p[2]),
+});
 
 /**
  * The same rail with its bank's and search's parts as they are at a corner of its conditions, so that everything that takes a
  * document (analysis, search, farthest distances) can be asked there. The document's own part numbers are its catalogue.
  */
 export function documentIn(document: RailDocument, corner: Corner): RailDocument {
-  return { ...document, parts: document.parts.map((part) => partIn(part, document.rail, corner)) };
+  const parts = document.parts.map((part, i) => {
+    try {
+      return partIn(part, document.rail, corner);
+    } catch (error) {
+      if (!(error instanceof EngineError)) throw error;
+      // Where a part is one of a list its place says more to a reader of the file than its name alone.
+      throw new EngineError(error.field.replace(`parts[${part.id}]`, `parts[${i}]`), error.message);
+    }
+  });
+  return { ...document, parts };
 }

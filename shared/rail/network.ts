@@ -1,19 +1,13 @@
-import type { ImpedanceTable, LineModel, PackageModel, RailNetwork, SourceModel } from '../engine/network';
+import type { LineModel, PackageModel, RailNetwork, SourceModel } from '../engine/network';
 import { pathInductance } from '../engine/plane';
 import type { RailDocument } from '../schemas/rail-document.schema';
 import type { RailSpec, Source } from '../schemas/rail-spec.schema';
-import type { PartInCorner } from './in-service';
+import { impedanceTable, type PartInCorner } from './in-service';
 
 function sourceModel(source: Source): SourceModel {
   if (source.kind !== 'table') return source;
   return { kind: 'table', table: impedanceTable(source.points) };
 }
-
-const impedanceTable = (points: readonly (readonly [number, number, number])[]): ImpedanceTable => ({
-  frequency_Hz: Float64Array.from(points, (p) => p[0]),
-  re_ohm: Float64Array.from(points, (p) => p[1]),
-  im_ohm: Float64Array.from(points, (p) => p[2]),
-});
 
 /** Inductance in henry of the path from a line at `distance_m` to the load; 0 while plane or distance is not known. */
 export function linePath_H(spec: Pick<RailSpec, 'plane'>, distance_m: number | undefined): number {

@@ -80,6 +80,7 @@ function instancesOf(document: RailDocument, serving: RailDocument, firstNumber:
       side: line.side ?? 'top',
       rail: document.rail.name,
       mount_H: line.mount_H ?? part.mount_H,
+      ...(line.recipe && { recipe: line.recipe }),
       distance_m: line.distance_m ?? null,
       farthest_m: farthest.distance_m,
       farthestReason: farthest.reason,

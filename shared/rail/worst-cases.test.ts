@@ -117,7 +117,7 @@ describe('parts in service', () => {
     const over = { ...document, rail: { ...document.rail, voltage_V: 3 } };
     expect(() => documentIn(over, IN_SERVICE)).toThrow(
       expect.objectContaining({
-        field: 'parts[bulk].rated_voltage_V',
+        field: 'parts[0].rated_voltage_V',
         message: expect.stringContaining('bulk'),
       }),
     );

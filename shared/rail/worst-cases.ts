@@ -6,7 +6,7 @@ import { compileRail } from '../engine/rail';
 import type { DocumentPart, RailDocument } from '../schemas/rail-document.schema';
 import { conditionsOf } from './conditions';
 import { type Corner, cornerName, cornersOf } from './corner';
-import { documentIn, type PartInCorner, partIn } from './in-service';
+import { documentIn, type PartInCorner, partIn, tableShift } from './in-service';
 import { networkOf } from './network';
 import { targetMask } from './target-mask';
 
@@ -99,11 +99,12 @@ function rangeOf(part: DocumentPart, selves: readonly PartInCorner[]): [PartInCo
         esr_table: part.esr_table.map(([f, r]): [number, number] => [f, r * factor]),
       }),
       ...(part.impedance_table && {
-        table_shift: {
-          inductance_H: esl_H - part.esl_H,
-          elastance_perF: 1 / capacitance_F - 1 / part.capacitance_F,
-          resistance_factor: factor,
-        },
+        table_shift: tableShift(
+          part.impedance_table,
+          capacitance_F / part.capacitance_F,
+          factor,
+          part.esl_H > 0 ? esl_H / part.esl_H : 1,
+        ),
       }),
     };
   };

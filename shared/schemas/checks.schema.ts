@@ -1,6 +1,6 @@
 import { z } from 'zod';
 import { tightestSchema } from './headroom.schema';
-import { conditionsSchema } from './rail-spec.schema';
+import { conditionsSchema, loadStepSchema } from './rail-spec.schema';
 
 const verdict = z.object({ holds: z.boolean(), tightest: tightestSchema });
 
@@ -71,7 +71,12 @@ export const railChecksSchema = z.object({
   /** Ripple that the bank may use, volt; null: nothing says how much. */
   allowance_V: z.number().nullable(),
   /** null with the reason in `timeReason`. */
+  /** The step that was tried; `assumed` where only the target's own says how large it is. */
+  load: loadStepSchema.nullable(),
+  load_assumed: z.boolean(),
   step: stepCheckSchema.nullable(),
+  /** The corner that takes the step furthest. */
+  worst_step: z.object({ corner: z.string(), droop_V: z.number(), overshoot_V: z.number() }).nullable(),
   pattern: patternCheckSchema.nullable(),
   timeReason: z.string().nullable(),
   /** Members whose tables a series R–L–C stands in for in time. */

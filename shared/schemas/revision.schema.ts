@@ -27,6 +27,8 @@ export const instanceSchema = z.object({
   side: z.enum(['top', 'bottom']),
   rail: z.string(),
   mount_H: z.number(),
+  /** The mount recipe that it comes from, by name. */
+  recipe: z.string().optional(),
   /** Planned distance in metres; null: not planned. */
   distance_m: z.number().nullable(),
   /** The farthest its line may sit before the rail is short; null with `farthestReason`. */

@@ -178,7 +178,7 @@ describe('analyse --conditions', () => {
   it('names the field that stops it: bias over the rating, a curve that does not rise, a tolerance that cannot be', async () => {
     const over = await run('analyse', { ...aged, rail: { ...aged.rail, voltage_V: 7 } }, '--conditions');
     expect(over).toMatchObject({ status: 2, stdout: '' });
-    expect(over.stderr).toContain('rail.json: parts[SMALL].rated_voltage_V: SMALL: ');
+    expect(over.stderr).toContain('rail.json: parts[1].rated_voltage_V: SMALL: ');
     const curve = structuredClone(aged) as typeof document;
     Object.assign(curve.parts[1], {
       bias_curve: [
@@ -192,7 +192,7 @@ describe('analyse --conditions', () => {
     expect(crossed.stderr).toContain('parts[1].bias_curve[2][0]: voltage must rise');
     const letter = structuredClone(aged) as typeof document;
     Object.assign(letter.parts[1], { tolerance: 'D' });
-    expect((await run('analyse', letter, '--conditions')).stderr).toContain('parts[SMALL].tolerance');
+    expect((await run('analyse', letter, '--conditions')).stderr).toContain('parts[1].tolerance');
     const flat = await run('analyse', {
       ...aged,
       rail: {
@@ -239,7 +239,9 @@ describe('step', () => {
   it('says what it lacks: a load step, a source that holds the voltage', async () => {
     const none = await run('step', document);
     expect(none).toMatchObject({ status: 2, stdout: '' });
-    expect(none.stderr).toContain('rail.json: rail.load_step: the document says no load step');
+    expect(none.stderr).toContain(
+      'rail.json: rail.load_step: the document says no load step, nor does its target',
+    );
     const open = await run('step', { ...networkA, rail: { ...networkA.rail, source: { kind: 'open' } } });
     expect(open.stderr).toMatch(/rail\.json: source: .*never settles/);
   });

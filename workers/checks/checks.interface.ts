@@ -1,4 +1,4 @@
-import type { RailTime } from '@shared/rail/time';
+import type { CornerStep, RailTime } from '@shared/rail/time';
 import type { CornerResult, Envelope, MissingPart } from '@shared/rail/worst-cases';
 import type { PartInService, RailChecks } from '@shared/schemas/checks.schema';
 import type { Verdict } from '@shared/schemas/rail.schema';
@@ -28,6 +28,7 @@ export interface RailVerdicts {
 
 /** Behaviour in time, in service. */
 export interface RailInTime extends RailTime {
+  worst_step: CornerStep | null;
   start_up: RailChecks['start_up'];
   elapsed_ms: number;
 }

@@ -88,7 +88,7 @@ describe('the checks of a bench', () => {
     const over = { ...document, rail: { ...document.rail, voltage_V: 3 } };
     await expect(new Checks().verdicts({ ...request, document: over })).resolves.toMatchObject({
       status: 'failed',
-      field: 'parts[bulk].rated_voltage_V',
+      field: 'parts[0].rated_voltage_V',
     });
   });
 

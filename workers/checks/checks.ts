@@ -1,7 +1,7 @@
 import { partInService, startUpCheck } from '@shared/rail/checks';
 import { IN_SERVICE } from '@shared/rail/corner';
 import { documentIn } from '@shared/rail/in-service';
-import { railTime } from '@shared/rail/time';
+import { railTime, worstCornerStep } from '@shared/rail/time';
 import { cornerResults, envelopeOver, headroomOf, missingParts } from '@shared/rail/worst-cases';
 import { guard } from '../host/guard';
 import type { ChecksApi, ChecksRequest, RailInTime, RailVerdicts } from './checks.interface';
@@ -40,7 +40,12 @@ export function verdictsOf({ document, span_Hz }: ChecksRequest): RailVerdicts {
 export function inTimeOf(document: ChecksRequest['document']): RailInTime {
   const start = performance.now();
   const time = railTime(documentIn(document, IN_SERVICE));
-  return { ...time, start_up: startUpCheck(document), elapsed_ms: performance.now() - start };
+  return {
+    ...time,
+    worst_step: worstCornerStep(document),
+    start_up: startUpCheck(document),
+    elapsed_ms: performance.now() - start,
+  };
 }
 
 function evenGrid([low, high]: readonly [number, number]): Float64Array {

@@ -18,15 +18,6 @@ export function benchCautions(
   analysis: Pick<BenchAnalysis, 'cavity_Hz' | 'extrapolated'> | null,
 ): Shown[] {
   const cautions: Shown[] = railCautions(railDocument(spec, lines, parts, setup));
-  const used = lines.filter((line) => line.count > 0).flatMap((line) => parts.get(line.partId) ?? []);
-  const open = used.filter((part) => part.state !== 'approved');
-  if (open.length > 0)
-    cautions.unshift({
-      title: 'not approved',
-      text: open
-        .map((part) => `${part.partNumber} is ${part.state === 'draft' ? 'a draft' : 'retired'}`)
-        .join('; '),
-    });
   if (analysis?.extrapolated)
     cautions.push({
       title: 'the source’s table ends inside the chart',
