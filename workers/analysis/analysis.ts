@@ -109,7 +109,10 @@ function membersOver(
   models: readonly { inductance_H: number; capacitance_F: number }[],
   { lines, spec, corner }: BenchRequest,
 ): BenchMember[] {
-  const estimated = lines.map((line) => corner !== null && serviceValues(line.part, spec, corner).estimated);
+  // Of the capacitance: that is what stands beside the mark.
+  const estimated = lines.map(
+    (line) => corner !== null && serviceValues(line.part, spec, corner).factors.some((one) => one.estimated),
+  );
   const unit: UnitAdmittance = (member, point, out) => {
     const sample = curve.sample[point];
     if (sample < 0) return branchAdmittance(rail.members[member].branch, curve.frequency_Hz[point], out);

@@ -60,7 +60,13 @@ export function Histogram({ values, threshold, unit, label }: HistogramProps) {
           <path d={`M0 ${HEIGHT}H${width}`} className="stroke-hairline" />
           <path d={`M${x(threshold)} 0V${HEIGHT + 4}`} className="stroke-ink" strokeWidth="1.4" />
           {linearTicks(low, high, Math.max(2, Math.floor(width / 90))).map((tick) => (
-            <text key={tick} x={x(tick)} y={HEIGHT + 16} textAnchor="middle" className="fill-stone">
+            <text
+              key={tick}
+              x={Math.min(width - 24, Math.max(24, x(tick)))}
+              y={HEIGHT + 16}
+              textAnchor="middle"
+              className="fill-stone"
+            >
               {String(tick).replace('-', '−')} {unit}
             </text>
           ))}

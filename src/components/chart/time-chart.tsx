@@ -14,6 +14,8 @@ interface TimeChartProps {
   /** Departure from the voltage that the axis calls zero. */
   deviation_V: Float64Array;
   span_s: readonly [number, number];
+  /** What the axis calls zero, e.g. the start of an edge late in the run. */
+  origin_s?: number;
   /** Ripple that the bank may use, both ways; hatched beyond. null: not given. */
   allowance_V: number | null;
   /** A further level to name, e.g. the bound of a worst pattern. */
@@ -45,6 +47,7 @@ function Drawing({
   time_s,
   deviation_V,
   span_s,
+  origin_s = 0,
   allowance_V,
   levels = [],
   marks = [],
@@ -64,7 +67,14 @@ function Drawing({
   const most = Math.max(...load.map(([, amps]) => amps), 1e-12);
   const least = Math.min(...load.map(([, amps]) => amps), 0);
   const loadY = (amps: number) => STRIP * (1 - (amps - least) / (most - least || 1));
-  const ticks = linearTicks(from, to, Math.max(2, Math.floor(width / 110)));
+  /** A mark's name stands outside the curve, but not on the line of the ripple allowed. */
+  const markOffset = (value_V: number): number => {
+    const outside = value_V < 0 ? 14 : -6;
+    const limit = allowance_V === null ? null : y(value_V < 0 ? -allowance_V : allowance_V);
+    const isOnLine = limit !== null && Math.abs(y(value_V) + outside - 4 - limit) < 12;
+    return isOnLine ? (value_V < 0 ? -10 : 18) : outside;
+  };
+  const ticks = linearTicks(from - origin_s, to - origin_s, Math.max(3, Math.floor(width / 110)));
   return (
     <svg
       role="img"
@@ -95,11 +105,13 @@ function Drawing({
           ))}
           {ticks.map((t, i) => (
             <g key={t}>
-              <path d={`M${x(t)} 0V${HEIGHT}`} />
+              <path d={`M${x(t + origin_s)} 0V${HEIGHT}`} />
               <text
-                x={x(t)}
+                x={x(t + origin_s)}
                 y={HEIGHT + 17}
-                textAnchor={i === 0 && x(t) < 20 ? 'start' : x(t) > width - 24 ? 'end' : 'middle'}
+                textAnchor={
+                  i === 0 && x(t + origin_s) < 20 ? 'start' : x(t + origin_s) > width - 24 ? 'end' : 'middle'
+                }
                 stroke="none"
                 className="fill-stone"
               >
@@ -167,7 +179,7 @@ function Drawing({
               />
               <Name
                 x={x(mark.time_s) + (x(mark.time_s) > width * 0.7 ? -8 : 8)}
-                y={y(mark.value_V) + (mark.value_V < 0 ? 14 : -6)}
+                y={y(mark.value_V) + markOffset(mark.value_V)}
                 end={x(mark.time_s) > width * 0.7}
               >
                 {mark.label}

@@ -48,10 +48,10 @@ export function BankRow(props: BankRowProps) {
   const pressed = (key: string): boolean => {
     if (key === 'ArrowUp') onMove(-1);
     else if (key === 'ArrowDown') onMove(1);
+    else if (key === 'Enter') setOpen(!open);
     else if (readOnly) return false;
     else if (key === 'ArrowLeft' || key === '-') onCount(line.count - 1);
     else if (key === 'ArrowRight' || key === '+') onCount(line.count + 1);
-    else if (key === 'Enter') setOpen(!open);
     else if (key === 'Delete') props.onRemove();
     else return false;
     return true;
@@ -74,14 +74,14 @@ export function BankRow(props: BankRowProps) {
             type="button"
             data-row={line.key}
             aria-label={`${name}, ${line.count}`}
-            aria-expanded={readOnly ? undefined : open}
+            aria-expanded={open}
             onKeyDown={onKeyDown}
-            onClick={() => !readOnly && setOpen(!open)}
+            onClick={() => setOpen(!open)}
             className="min-w-0 text-left"
             title={part?.partNumber}
           >
             <span className="block truncate font-semibold">{name}</span>
-            <span className="block truncate text-small text-stone">
+            <span className="block text-small text-stone">
               <RowFacts line={line} part={part} strip={strip} />
             </span>
           </button>
@@ -108,12 +108,14 @@ export function BankRow(props: BankRowProps) {
           )}
         </div>
       </div>
-      {open && part && !readOnly && (
+      {open && part && (
         <LineDetails
           line={line}
           part={part}
           spec={props.spec}
           setup={props.setup}
+          shown_H={strip?.inductance_H ?? null}
+          readOnly={readOnly}
           onChange={props.onChange}
           onRemove={props.onRemove}
         />
@@ -122,7 +124,7 @@ export function BankRow(props: BankRowProps) {
   );
 }
 
-/** What stands under a line's name: what is left of its capacitance, and where that is no estimate its inductance and place. */
+/** What stands under a line's name: what is left of its capacitance, its inductance, its place. */
 function RowFacts({
   line,
   part,
@@ -138,17 +140,17 @@ function RowFacts({
     line.side === 'bottom' && 'bottom',
     line.locked && 'locked',
   ].filter(Boolean);
-  const left =
-    part && strip?.left_F != null ? leftText(part.capacitance_F, strip.left_F, strip.estimated) : null;
-  const whole = [left, strip?.estimated && '≈ estimated', ...place].filter(Boolean).join(' · ');
   return (
-    <span title={whole}>
-      {left}
-      {strip?.estimated && <span className="text-brass"> ≈ estimated</span>}
-      {left && !strip?.estimated && ' · '}
-      {!strip?.estimated && place.join(' · ')}
-      {strip?.estimated && line.locked && ' · locked'}
-    </span>
+    <>
+      {part && strip?.left_F != null && (
+        <span className="whitespace-nowrap">
+          {leftText(part.capacitance_F, strip.left_F, strip.estimated)}
+          {strip.estimated && <span className="text-brass"> ≈ estimated</span>}
+          {' · '}
+        </span>
+      )}
+      {place.join(' · ')}
+    </>
   );
 }
 

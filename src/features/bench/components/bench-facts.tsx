@@ -56,6 +56,9 @@ export function BenchFacts(props: BenchFactsProps) {
           onChange={(event) => props.onShowEnvelope(event.target.checked)}
         />
       </div>
+      {spec.observe === 'die' && (
+        <p className="text-small text-stone">dash-dot: package and die, the board shorted</p>
+      )}
       {props.showEnvelope && (
         <p className="text-small text-stone">
           shaded: {corners === null ? 'all' : corners} corners; dotted: parts unlike each other

@@ -19,6 +19,7 @@ import { useChecks } from '../hooks/use-checks';
 import { mixIn, proofText, useMixSearch } from '../hooks/use-mix-search';
 import { type DraftLine, isSameLine, keyed, savedBank } from '../lib/bank-history';
 import { benchCautions } from '../lib/cautions';
+import { failingChecks } from '../lib/failing-checks';
 import { bankOfMix, searchQuestion } from '../lib/mix';
 import { cornerOfView, NEXT_VIEW, type ValuesView, VIEW_NAMES } from '../lib/values-view';
 import { BenchFacts } from './bench-facts';
@@ -44,6 +45,8 @@ interface BenchProps {
   /** Puts the save state where the page wants it (the header). */
   renderStatus: (status: ReactNode) => ReactNode;
 }
+
+const NO_QUESTION = { asked: null, fault: null };
 
 /** The working screen of one rail. Mounted anew for each rail (by key). */
 export function Bench(props: BenchProps) {
@@ -74,9 +77,11 @@ export function Bench(props: BenchProps) {
     () => (mix ? bankOfMix(bench.lines, mix, known, newPartDistance) : null),
     [mix, bench.lines, known, newPartDistance],
   );
+  const isPreview = previewing && mixLines !== null;
+  const shownLines = isPreview ? mixLines : bench.lines;
   const document = useMemo(
-    () => railDocument(spec, bench.lines, known, setup),
-    [spec, bench.lines, known, setup],
+    () => railDocument(spec, shownLines, known, setup),
+    [spec, shownLines, known, setup],
   );
   const checks = useChecks(document, whole);
   const verdicts = checks.verdicts.value;
@@ -85,17 +90,16 @@ export function Bench(props: BenchProps) {
   const found = useAnalysis('preview', spec, mixLines, known, setup, corner, whole);
   const tell = useRef(onResult);
   tell.current = onResult;
+  const isOwn = checks.verdicts.current && !isPreview;
   useEffect(() => {
-    if (verdicts) tell.current(verdicts.service);
-  }, [verdicts]);
+    if (verdicts && isOwn) tell.current(verdicts.service);
+  }, [verdicts, isOwn]);
   const reach_Hz = useMemo(
     () => (spec.package ? packageReach_Hz(spec.package, spec.band_Hz, targetMask(spec)) : null),
     [spec],
   );
   const numberName = useCallback((number: string) => memberName(number, known), [known]);
-  const isPreview = previewing && mixLines !== null;
   const shown = isPreview ? found : present;
-  const shownLines = isPreview ? mixLines : bench.lines;
   const other = isPreview
     ? present.analysis && { name: 'present bank', analysis: present.analysis }
     : found.analysis && { name: 'best mix', analysis: found.analysis };
@@ -107,21 +111,22 @@ export function Bench(props: BenchProps) {
   const lockedCount = bench.lines.reduce((sum, line) => (line.locked ? sum + line.count : sum), 0);
   const question = useMemo(() => {
     const all = candidates.data;
-    if (!all || all.length === 0 || !canEdit) return null;
+    if (!all || all.length === 0 || !canEdit) return NO_QUESTION;
     const candidateIds = bench.search.candidateIds ?? all.map((part) => part.id);
     try {
       const settings = { ...bench.search, candidateIds };
-      return searchQuestion(spec, bench.lines, known, setup, settings, view !== 'catalogue');
+      const asked = searchQuestion(spec, bench.lines, known, setup, settings, view !== 'catalogue');
+      return { asked, fault: null };
     } catch (error) {
-      // A part of the bank has no value in service on this rail; the bench says which one.
-      if (error instanceof EngineError) return null;
+      // A part of the bank has no value in service on this rail: nothing can be searched before it goes.
+      if (error instanceof EngineError) return { asked: null, fault: error.message };
       throw error;
     }
   }, [candidates.data, canEdit, bench.search, bench.lines, known, spec, setup, view]);
-  const asked = useMemo(() => JSON.stringify(question), [question]);
+  const asked = useMemo(() => JSON.stringify(question.asked), [question]);
   const outdated = search.state.kind !== 'idle' && search.question !== null && search.question !== asked;
   const startSearch = () => {
-    if (!question) {
+    if (!question.asked) {
       // Asked before the candidates have come: begins as soon as they have.
       setSearchWanted(candidates.isPending);
       return;
@@ -129,13 +134,13 @@ export function Bench(props: BenchProps) {
     setSearchWanted(false);
     setPreviewing(false);
     setAdopted(null);
-    void search.start(question);
+    void search.start(question.asked);
   };
 
   const begin = useRef(startSearch);
   begin.current = startSearch;
   useEffect(() => {
-    if (searchWanted && question) begin.current();
+    if (searchWanted && question.asked) begin.current();
   }, [searchWanted, question]);
 
   const addPart = (part: Part) => {
@@ -193,7 +198,7 @@ export function Bench(props: BenchProps) {
   });
   const cautions = benchCautions(spec, shownLines, known, setup, shown.analysis);
   return (
-    <div className="flex min-w-0 flex-col xl:flex-row">
+    <div className="grid min-h-full min-w-0 grid-cols-[minmax(0,1fr)] xl:grid-cols-[minmax(0,1fr)_18.5rem] xl:grid-rows-[auto_1fr]">
       {renderStatus(<SaveStatus save={bench.save} />)}
       <ConflictDialog
         save={bench.save}
@@ -202,7 +207,7 @@ export function Bench(props: BenchProps) {
         parts={known}
         onSettle={bench.settle}
       />
-      <div className="min-w-0 flex-1 py-5 pr-5 pl-6">
+      <div className="min-w-0 py-5 pr-5 pl-6">
         {isPreview && (
           <p className="mb-3 border-l-2 border-deep pl-3">
             <strong>Preview of the mix found.</strong> The bank is unchanged; its curve is dashed.
@@ -216,7 +221,7 @@ export function Bench(props: BenchProps) {
           other={other}
           before={before}
           setup={setup}
-          envelope={showEnvelope && !isPreview ? (verdicts?.envelope ?? null) : null}
+          envelope={showEnvelope ? (verdicts?.envelope ?? null) : null}
           reach_Hz={reach_Hz}
           showCatalogue={view !== 'catalogue'}
           span_Hz={zoom ?? whole}
@@ -267,12 +272,13 @@ export function Bench(props: BenchProps) {
                 <p className="text-stone">You see this rail; engineers of the board change it.</p>
               )}
               <p className="text-small text-stone max-lg:hidden">
-                ↑↓ line · ←→ count · A add · U undo · F search · L lines · E envelope · V values
+                {canEdit
+                  ? '↑↓ line · ←→ count · A add · U undo · F search · L lines · E envelope · V values'
+                  : '↑↓ line · Enter opens it · L lines · E envelope · V values'}
               </p>
             </div>
           }
         />
-        <BenchSections spec={spec} document={document} checks={checks} nameOf={numberName} />
         {bench.lines.length === 0 && !isPreview && (
           <p className="max-w-prose pb-4 text-stone">
             The bank is empty: what you see is source and planes alone.
@@ -280,19 +286,21 @@ export function Bench(props: BenchProps) {
           </p>
         )}
       </div>
-      <aside
-        aria-label="results"
-        className="shrink-0 border-t px-6 py-5 xl:w-[18.5rem] xl:border-t-0 xl:border-l"
-      >
+      <aside aria-label="results" className="border-t px-6 py-5 xl:row-span-2 xl:border-t-0 xl:border-l">
         <SidePanel
           analysis={shown.analysis}
           values={view === 'worst' && verdicts ? `worst case: ${verdicts.corners[0].name}` : VIEW_NAMES[view]}
+          failing={failingChecks(verdicts, checks.inTime.value)}
           error={shown.error}
           nameOf={(id) => memberName(id, known)}
           checks={
             <>
               <WorstCasesPanel checks={checks} nameOf={numberName} />
-              <LoadStepPanel checks={checks} frequencyHolds={verdicts?.service.holds ?? null} />
+              <LoadStepPanel
+                checks={checks}
+                frequencyHolds={verdicts?.service.holds ?? null}
+                band_Hz={spec.band_Hz}
+              />
             </>
           }
         >
@@ -303,7 +311,7 @@ export function Bench(props: BenchProps) {
                 settings={bench.search}
                 newPartDistance_m={newPartDistance}
                 candidates={candidates.data}
-                candidatesError={candidates.isError ? messageOf(candidates.error) : null}
+                candidatesError={candidates.isError ? messageOf(candidates.error) : (question.fault ?? null)}
                 state={search.state}
                 locked={lockedCount}
                 previewing={isPreview}
@@ -335,6 +343,9 @@ export function Bench(props: BenchProps) {
           </Section>
         </SidePanel>
       </aside>
+      <div className="min-w-0 py-5 pr-5 pl-6">
+        <BenchSections spec={spec} document={document} checks={checks} nameOf={numberName} />
+      </div>
       {picking && (
         <PartPicker open voltage_V={spec.voltage_V} onPick={addPart} onClose={() => setPicking(false)} />
       )}

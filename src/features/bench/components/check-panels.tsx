@@ -70,9 +70,11 @@ function VerdictList({ verdicts, nameOf }: { verdicts: RailVerdicts; nameOf: (pa
 export function LoadStepPanel({
   checks: { inTime },
   frequencyHolds,
+  band_Hz,
 }: {
   checks: BenchChecks;
   frequencyHolds: boolean | null;
+  band_Hz: readonly [number, number];
 }) {
   const time = inTime.value;
   const title = time?.load
@@ -84,7 +86,11 @@ export function LoadStepPanel({
       {!time && !inTime.error && <p className="text-stone">working …</p>}
       {time && (
         <Pending when={!inTime.current}>
-          {time.reason && <p className="text-stone">none: {time.reason}</p>}
+          {time.reason ? (
+            <p className="text-stone">none: {time.reason}</p>
+          ) : (
+            <p className="text-small text-stone">in service, whichever values are shown</p>
+          )}
           <dl data-testid="load-step">
             {time.step && (
               <AgainstAllowance name="droop" value_V={time.step.droop_V} allowance_V={time.allowance_V} />
@@ -96,6 +102,14 @@ export function LoadStepPanel({
                 allowance_V={time.allowance_V}
               />
             )}
+            {time.worst_step && (
+              <AgainstAllowance
+                name="in the worst corner"
+                title={`load step, ${time.worst_step.corner}`}
+                value_V={Math.max(time.worst_step.droop_V, time.worst_step.overshoot_V)}
+                allowance_V={time.allowance_V}
+              />
+            )}
             {time.pattern && (
               <AgainstAllowance
                 name="worst pattern"
@@ -104,31 +118,41 @@ export function LoadStepPanel({
               />
             )}
           </dl>
-          <PatternWarning time={time} frequencyHolds={frequencyHolds} />
+          <PatternWarning time={time} frequencyHolds={frequencyHolds} band_Hz={band_Hz} />
         </Pending>
       )}
     </Section>
   );
 }
 
-function PatternWarning({ time, frequencyHolds }: { time: RailInTime; frequencyHolds: boolean | null }) {
-  const why = whyPatternFails(time, frequencyHolds);
+function PatternWarning({
+  time,
+  frequencyHolds,
+  band_Hz,
+}: {
+  time: RailInTime;
+  frequencyHolds: boolean | null;
+  band_Hz: readonly [number, number];
+}) {
+  const why = whyPatternFails(time, frequencyHolds, band_Hz);
   return why ? <p className="mt-1 text-small text-kingfisher">▲ {why}</p> : null;
 }
 
 function AgainstAllowance({
   name,
+  title,
   value_V,
   allowance_V,
 }: {
   name: string;
+  title?: string;
   value_V: number;
   allowance_V: number | null;
 }) {
   const over = allowance_V !== null && value_V > allowance_V;
   return (
     <div className="flex items-baseline justify-between gap-3">
-      <dt>{name}</dt>
+      <dt title={title}>{name}</dt>
       <dd className={cx('whitespace-nowrap', over && 'text-kingfisher')}>
         {over && <span aria-hidden>▲ </span>}
         {ofText(value_V, allowance_V)}
@@ -149,6 +173,7 @@ export function StartUpPanel({ checks: { inTime }, voltage_V }: { checks: BenchC
   if (!start) return null;
   return (
     <Section title="inrush and energy">
+      <p className="text-small text-stone">at most: upper tolerance, new, unbiased</p>
       <dl data-testid="start-up">
         <Row name={`charge to ${formatVolts(voltage_V)}`}>{formatQuantity(start.charge_C, 'C')}</Row>
         <Row name="stored energy">{formatQuantity(start.energy_J, 'J')}</Row>

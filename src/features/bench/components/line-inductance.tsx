@@ -19,13 +19,24 @@ export function LineInductance({
   part,
   spec,
   setup,
+  shown_H,
 }: {
   line: DraftLine;
   part: Part;
   spec: RailSpec;
   setup: BoardSetup;
+  /** What the curve was computed with; differs where a worst case takes the ESL to its end. */
+  shown_H: number | null;
 }) {
   const pieces = piecesOf(line, part, spec, setup);
+  const nominal_H = pieces.reduce((sum, piece) => sum + piece.inductance_H, 0);
+  if (shown_H !== null && Math.abs(shown_H / nominal_H - 1) > 1e-6)
+    pieces.push({
+      name: 'ESL tolerance',
+      inductance_H: shown_H - nominal_H,
+      formula: 'in the worst case shown',
+      source: 'library, or ±20 % where it says none',
+    });
   const total = pieces.reduce((sum, piece) => sum + piece.inductance_H, 0);
   return (
     <details className="mt-3 text-small">
@@ -84,7 +95,7 @@ function pathPieces(line: DraftLine, spec: RailSpec): Piece[] {
     {
       name: 'path',
       inductance_H: linePath_H(spec, line.distance_m),
-      formula: `μ₀/2π · ${formatLength(h)} · ln(${formatLength(line.distance_m)}² / (${formatLength(r1)} · ${formatLength(r2)}))`,
+      formula: `μ₀/2π · ${formatLength(h)} · ln((${formatLength(line.distance_m)})² / (${formatLength(r1)} · ${formatLength(r2)}))`,
       source: 'opposite line currents between wide planes',
     },
   ];

@@ -49,6 +49,7 @@ function Step({ time: { step, load, allowance_V } }: { time: RailInTime }) {
         time_s={step.time_s}
         deviation_V={deviation}
         span_s={shown.span_s}
+        origin_s={shown.origin_s}
         allowance_V={allowance_V}
         marks={[
           {
@@ -83,24 +84,27 @@ const WAYS = [
   ['rise', 'furthest up'],
 ] as const;
 
-function Pattern({ time: { pattern, load, allowance_V, limit_Hz } }: { time: RailInTime }) {
+function Pattern({ time: { pattern, step, load, allowance_V, limit_Hz } }: { time: RailInTime }) {
   const [way, setWay] = useState<'fall' | 'rise'>('fall');
   if (!pattern || !load) return null;
   const run = pattern[way];
   const sign = way === 'fall' ? -1 : 1;
+  const ringsOn =
+    step !== null && (step.droop_V > pattern.fall.bound_V || step.overshoot_V > pattern.rise.bound_V);
   return (
     <div>
       <div className="mb-2 flex flex-wrap items-baseline justify-between gap-x-6 gap-y-1">
         <p className="max-w-4xl text-small text-stone">
-          Worst pattern: no load between 0 and {formatQuantity(load.step_A, 'A', { trim: true })} with edges
-          of {formatQuantity(load.rise_s, 's', { trim: true })} takes the rail further down than{' '}
+          Worst pattern: leaving still what rings above {formatQuantity(limit_Hz, 'Hz', { trim: true })}, no
+          load between 0 and {formatQuantity(load.step_A, 'A', { trim: true })} with edges of{' '}
+          {formatQuantity(load.rise_s, 's', { trim: true })} takes the rail further down than{' '}
           <strong className="text-ink">{formatQuantity(pattern.fall.bound_V, 'V')}</strong> from its voltage
           without load, or further up than{' '}
           <strong className="text-ink">{formatQuantity(pattern.rise.bound_V, 'V')}</strong>. The pattern drawn
           has {run.edges.length} edges, each timed so that its swing adds to those before, and comes to{' '}
-          {formatQuantity(run.simulated_V, 'V')}. Resonances above{' '}
-          {formatQuantity(limit_Hz, 'Hz', { trim: true })} (ten times the band) are taken as still: neither
-          the load nor this network says anything there.
+          {formatQuantity(run.simulated_V, 'V')}. Higher up neither the load nor a network of lumped parts
+          says anything.
+          {ringsOn && ' The load step above goes further, since it rings up there as well.'}
         </p>
         <WordChoice
           legend="direction of the worst pattern"

@@ -140,9 +140,7 @@ export function Score(props: ScoreProps) {
             data-axis
             className="section-head flex justify-between max-lg:ml-[var(--score-left)]"
           >
-            <span className="truncate">
-              share of the load current, on the axis above; a bar on top: above 100 %
-            </span>
+            <span className="truncate">share of the load current; a bar on top: above 100 %</span>
             <CursorReading analysis={analysis} index={cursorIndex} />
           </div>
         </div>

@@ -115,7 +115,7 @@ export function SearchPanel(props: SearchPanelProps) {
         {(state.kind === 'idle' || state.kind === 'failed') && (
           <Button
             variant="primary"
-            disabled={!candidates || candidates.length === 0 || faulty}
+            disabled={!candidates || candidates.length === 0 || faulty || props.candidatesError !== null}
             onClick={props.onSearch}
           >
             Search the smallest mix

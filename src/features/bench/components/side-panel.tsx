@@ -9,6 +9,8 @@ interface SidePanelProps {
   analysis: BenchAnalysis | null;
   /** The values it was computed with, in words. */
   values: string;
+  /** What does not hold besides. */
+  failing: readonly string[];
   error: { message: string; field: string | null } | null;
   nameOf: (member: string | null) => string;
   /** What is said right after the breaks. */
@@ -19,7 +21,7 @@ interface SidePanelProps {
 const SHOWN_BREAKS = 6;
 
 /** What matters at the right: headroom, what breaks the surface and why, what the bank comes to. */
-export function SidePanel({ analysis, values, error, nameOf, checks, children }: SidePanelProps) {
+export function SidePanel({ analysis, values, failing, error, nameOf, checks, children }: SidePanelProps) {
   return (
     <div className="flex flex-col gap-7">
       {error && (
@@ -44,22 +46,27 @@ export function SidePanel({ analysis, values, error, nameOf, checks, children }:
               {analysis.holds ? 'holds' : 'short'}: {formatQuantity(analysis.tightest.impedance_ohm, 'Ω')} at{' '}
               {formatQuantity(analysis.tightest.frequency_Hz, 'Hz')}
             </p>
+            {analysis.holds && failing.length > 0 && (
+              <p className="text-small text-kingfisher">▲ not: {failing.join(', ')}</p>
+            )}
           </Section>
           <Breaks analysis={analysis} nameOf={nameOf} />
-          {checks}
-          <Section title="bank">
-            <dl className="grid grid-cols-[1fr_auto] gap-x-3">
-              <dt>parts · kinds</dt>
-              <dd className="text-right" data-testid="parts-kinds">
-                {analysis.figures.parts} · {analysis.figures.kinds}
-              </dd>
-              <dt>cost</dt>
-              <dd className="text-right">{formatCost(analysis.figures.cost)}</dd>
-              <dt>area</dt>
-              <dd className="text-right">{formatQuantity(analysis.figures.area_mm2, 'mm²')}</dd>
-            </dl>
-          </Section>
         </>
+      )}
+      {checks}
+      {analysis && (
+        <Section title="bank">
+          <dl className="grid grid-cols-[1fr_auto] gap-x-3">
+            <dt>parts · kinds</dt>
+            <dd className="text-right" data-testid="parts-kinds">
+              {analysis.figures.parts} · {analysis.figures.kinds}
+            </dd>
+            <dt>cost</dt>
+            <dd className="text-right">{formatCost(analysis.figures.cost)}</dd>
+            <dt>area</dt>
+            <dd className="text-right">{formatQuantity(analysis.figures.area_mm2, 'mm²')}</dd>
+          </dl>
+        </Section>
       )}
       {children}
     </div>

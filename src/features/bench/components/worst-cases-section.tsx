@@ -18,7 +18,7 @@ export function WorstCasesSection({
   const [all, setAll] = useState(false);
   return (
     <div className="grid gap-x-10 gap-y-6 2xl:grid-cols-2">
-      <div>
+      <div className="min-w-0">
         <p className="mb-1 text-small text-stone">
           {corners.length} corners that move all parts alike, each at its own tightest frequency
         </p>
@@ -40,7 +40,7 @@ export function WorstCasesSection({
         )}
       </div>
       {missing.length > 0 && (
-        <div>
+        <div className="min-w-0">
           <p className="mb-1 text-small text-stone">
             missing part, in service: one capacitor of the line open, all others fitted
           </p>

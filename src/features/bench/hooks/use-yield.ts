@@ -17,13 +17,20 @@ const client = new YieldClient();
 /** Monte Carlo on demand; its answer stays beside the question that it was asked, so that an older one shows as such. */
 export function useYield() {
   const [state, setState] = useState<YieldState>({ kind: 'idle' });
+  /** How far a draw had come that was stopped; null: none was. */
+  const [stoppedAt, setStoppedAt] = useState<number | null>(null);
+  const done = useRef(0);
   const run = useRef(0);
   const start = useCallback(async (document: RailDocument, seed: number) => {
     const mine = ++run.current;
     const question = yieldQuestion(document);
     setState({ kind: 'running', progress: null });
+    setStoppedAt(null);
+    done.current = 0;
     const answer = await client.run({ document, draws: YIELD_DRAWS, seed }, (progress) => {
-      if (mine === run.current) setState({ kind: 'running', progress });
+      if (mine !== run.current) return;
+      done.current = progress.done;
+      setState({ kind: 'running', progress });
     });
     if (mine !== run.current) return;
     run.current++;
@@ -34,6 +41,7 @@ export function useYield() {
   const stop = useCallback(() => {
     run.current++;
     void client.cancel();
+    setStoppedAt(done.current);
     setState({ kind: 'idle' });
   }, []);
   useEffect(
@@ -43,7 +51,7 @@ export function useYield() {
     },
     [],
   );
-  return { state, start, stop };
+  return { state, stoppedAt, start, stop };
 }
 
 export const yieldQuestion = (document: RailDocument): string => JSON.stringify(document);

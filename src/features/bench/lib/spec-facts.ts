@@ -44,7 +44,7 @@ export function conditionsText(spec: Pick<RailSpec, 'conditions'>): string {
   const { conditions, assumed } = conditionsOf(spec);
   const years = conditions.age_h / HOURS_A_YEAR;
   const age =
-    years < 0.5 ? `${Math.round(conditions.age_h)}\u00a0h` : `${Number(years.toPrecision(2))}\u00a0a`;
+    years < 0.5 ? `${Math.round(conditions.age_h)}\u00a0h` : `${Number(years.toPrecision(2))}\u00a0years`;
   return `${conditions.usual_C}\u00a0°C, ${age}${assumed ? ' (assumed)' : ''}`;
 }
 

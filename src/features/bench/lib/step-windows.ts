@@ -4,6 +4,8 @@ export interface StepWindow {
   name: 'rise' | 'fall' | 'whole';
   label: string;
   span_s: [number, number];
+  /** What its axis counts from. */
+  origin_s: number;
 }
 
 type Step = NonNullable<RailInTime['step']>;
@@ -28,8 +30,8 @@ export function stepWindows(step: Step, { rise_s, hold_s, fall_s }: Load): StepW
     Math.max(end - fallAt, fall_s),
   );
   return [
-    { name: 'rise', label: 'around the rise', span_s: after(0, rise) },
-    { name: 'fall', label: 'around the fall', span_s: after(fallAt, fall) },
-    { name: 'whole', label: 'whole', span_s: [Math.min(0, step.time_s[0]), end] },
+    { name: 'rise', label: 'around the rise', span_s: after(0, rise), origin_s: 0 },
+    { name: 'fall', label: 'from the start of the fall', span_s: after(fallAt, fall), origin_s: fallAt },
+    { name: 'whole', label: 'whole', span_s: [Math.min(0, step.time_s[0]), end], origin_s: 0 },
   ];
 }
