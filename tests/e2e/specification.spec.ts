@@ -71,6 +71,7 @@ test('refuses a budget that is overspent and says by how much', async ({ page })
   await expect(page.getByLabel('rail tolerance, ±')).toHaveAccessibleDescription(`▲ ${sentence}`);
   await expect(page.getByText('1 field needs another look')).toBeVisible();
   await page.getByRole('button', { name: 'Back to the bench' }).click();
+  await page.getByRole('button', { name: 'Leave' }).click();
   await expect(page.getByTestId('headroom')).toBeVisible();
   await page.getByRole('link', { name: 'edit specification' }).click();
   await expect(page.getByLabel('ripple', { exact: true })).toHaveValue('none');
@@ -135,4 +136,65 @@ test('asks before it writes over what a colleague has saved meanwhile, even when
   await expect(page.getByTestId('headroom')).toBeVisible();
   await page.getByRole('link', { name: 'edit specification' }).click();
   await expect(page.getByLabel('target impedance')).toHaveValue('700m');
+});
+
+test('asks before typed work is thrown away: by a link, the button, the browser’s back and a reload', async ({
+  page,
+}) => {
+  await openSpecification(page, 'VBUS_72');
+  const asks = page.getByRole('dialog', { name: 'Leave without saving?' });
+  const stay = async () => {
+    await asks.getByRole('button', { name: 'Stay here' }).click();
+    await expect(page.getByLabel('current limit')).toHaveValue('3.75');
+  };
+  await page.getByLabel('current limit').fill('1');
+  await page.getByRole('button', { name: 'Back to the bench' }).click();
+  await asks.getByRole('button', { name: 'Leave' }).click();
+  await page.getByRole('link', { name: 'edit specification' }).click();
+  const limit = await page.getByLabel('current limit').inputValue();
+  await page.getByLabel('current limit').fill('3.75');
+  await page.getByRole('link', { name: 'Rails', exact: true }).click();
+  await stay();
+  await page.getByRole('button', { name: 'Back to the bench' }).click();
+  await stay();
+  await page.goBack();
+  await stay();
+  const reload = page.waitForEvent('dialog');
+  const reloaded = page.reload();
+  const dialog = await reload;
+  expect(dialog.type()).toBe('beforeunload');
+  await dialog.accept();
+  await reloaded;
+  await expect(page.getByLabel('current limit')).toHaveValue(limit);
+  await page.getByRole('button', { name: 'Back to the bench' }).click();
+  await expect(page.getByTestId('headroom')).toBeVisible();
+});
+
+test('a new rail that has been begun is not lost unasked; once made it asks nothing', async ({ page }) => {
+  await page.getByRole('link', { name: 'Tide gateway' }).first().click();
+  await page.getByRole('link', { name: 'Add a rail' }).first().click();
+  await page.getByLabel('name').fill('VDD_SPARE');
+  await page.getByRole('link', { name: 'Rails', exact: true }).click();
+  await page.getByRole('button', { name: 'Stay here' }).click();
+  await page.getByLabel('voltage', { exact: true }).fill('1.2');
+  await page.getByLabel('load step', { exact: true }).fill('2');
+  await page.getByLabel('given as').nth(1).selectOption('derived');
+  await page.getByLabel('rise time of the step').fill('35n');
+  await page.getByRole('button', { name: 'Make the rail' }).click();
+  await expect(page.getByRole('heading', { name: 'VDD_SPARE' })).toBeVisible();
+});
+
+test('a deleted rail leads to the board, and nobody asks the server for it again', async ({ page }) => {
+  await openSpecification(page, 'VDD_SPARE');
+  const missing: string[] = [];
+  page.on('response', (answer) => {
+    if (answer.status() === 404) missing.push(answer.url());
+  });
+  await page.getByLabel('voltage', { exact: true }).fill('1.3');
+  await page.getByRole('button', { name: 'Delete the rail' }).click();
+  await page.getByRole('button', { name: 'Delete VDD_SPARE' }).click();
+  await expect(page.getByRole('table', { name: 'rails of this board' })).toBeVisible();
+  await expect(page.getByRole('dialog')).toHaveCount(0);
+  await expect(page.getByRole('link', { name: 'VDD_SPARE' })).toHaveCount(0);
+  expect(missing).toEqual([]);
 });

@@ -1,4 +1,4 @@
-import { useNavigate, useParams } from 'react-router-dom';
+import { useParams } from 'react-router-dom';
 import { ButtonLink } from '@/components/ui/button';
 import { Failure } from '@/components/ui/failure';
 import { Loading, Page } from '@/components/ui/page';
@@ -7,6 +7,7 @@ import { useBoard } from '@/features/boards/api/boards';
 import { useCreateRail } from '@/features/rails/api/rails';
 import { SpecFormView } from '@/features/rails/components/spec-form';
 import { EMPTY_SPEC } from '@/features/rails/lib/spec-form-values';
+import { useLeave } from '@/lib/use-leave';
 import { usePageTitle } from '@/lib/use-page-title';
 import { ReadOnly } from '../read-only';
 
@@ -14,9 +15,9 @@ const TITLE = 'New rail';
 
 export function Component() {
   const { boardId = '' } = useParams();
-  const navigate = useNavigate();
   const board = useBoard(boardId);
   const create = useCreateRail(boardId);
+  const { isLeaving, leave } = useLeave();
   usePageTitle(TITLE, board.data?.name);
   if (board.isError && !board.data)
     return <Failure error={board.error} what="the board" retry={() => void board.refetch()} />;
@@ -30,10 +31,11 @@ export function Component() {
         setup={board.data.setup}
         submitText="Make the rail"
         pending={create.isPending}
+        done={isLeaving}
         failure={create.error}
         wayOut={<ButtonLink to={paths.boards()}>All boards</ButtonLink>}
         onSubmit={(spec) =>
-          create.mutate(spec, { onSuccess: ({ rail }) => navigate(paths.bench(boardId, rail.id)) })
+          create.mutate(spec, { onSuccess: ({ rail }) => leave(paths.bench(boardId, rail.id)) })
         }
       />
     </Page>

@@ -2,7 +2,7 @@ import type { BoardSetup } from '@shared/schemas/board-setup.schema';
 import { type RailWithParts, railWithPartsSchema } from '@shared/schemas/rail.schema';
 import type { RailSpec } from '@shared/schemas/rail-spec.schema';
 import { useQueryClient } from '@tanstack/react-query';
-import { useRef, useState } from 'react';
+import { useEffect, useRef, useState } from 'react';
 import { useNavigate, useParams } from 'react-router-dom';
 import { Button, ButtonLink } from '@/components/ui/button';
 import { Dialog } from '@/components/ui/dialog';
@@ -10,10 +10,11 @@ import { Failure } from '@/components/ui/failure';
 import { Loading, Page } from '@/components/ui/page';
 import { paths } from '@/config/paths';
 import { useBoard } from '@/features/boards/api/boards';
-import { cacheRail, useDeleteRail, useRail, useUpdateRail } from '@/features/rails/api/rails';
+import { cacheRail, forgetRail, useDeleteRail, useRail, useUpdateRail } from '@/features/rails/api/rails';
 import { SpecFormView } from '@/features/rails/components/spec-form';
 import { formOf } from '@/features/rails/lib/form-of';
 import { ApiError, messageOf } from '@/lib/problem';
+import { useLeave } from '@/lib/use-leave';
 import { usePageTitle } from '@/lib/use-page-title';
 import { ReadOnly } from '../read-only';
 
@@ -47,14 +48,20 @@ function Editor({ rail, setup }: { rail: RailWithParts['rail']; setup: BoardSetu
   const update = useUpdateRail(boardId, railId);
   const remove = useDeleteRail(boardId);
   const [removing, setRemoving] = useState(false);
+  const { isLeaving, leave } = useLeave();
   const [opened] = useState(rail);
   // A specification that somebody has changed since must not be overwritten unseen; a changed bank does not stand in this form.
   const since = JSON.stringify(rail.spec) === JSON.stringify(opened.spec) ? rail : opened;
   const typed = useRef<RailSpec | null>(null);
-  const back = () => navigate(paths.bench(boardId, railId));
+  const bench = paths.bench(boardId, railId);
+  // As long as this page shows the rail, it stays in the cache: without it, it would be asked for again.
+  const isDeleted = remove.isSuccess;
+  useEffect(() => {
+    if (isDeleted) return () => forgetRail(client, boardId, railId);
+  }, [isDeleted, client, boardId, railId]);
   const save = (next: RailSpec, from: number) => {
     typed.current = next;
-    update.mutate({ version: from, spec: next }, { onSuccess: back });
+    update.mutate({ version: from, spec: next }, { onSuccess: () => leave(bench) });
   };
   const conflict = newerIn(update.error);
   return (
@@ -66,7 +73,7 @@ function Editor({ rail, setup }: { rail: RailWithParts['rail']; setup: BoardSetu
           <Button variant="danger" onClick={() => setRemoving(true)}>
             Delete the rail
           </Button>
-          <Button onClick={back}>Back to the bench</Button>
+          <Button onClick={() => navigate(bench)}>Back to the bench</Button>
         </>
       }
     >
@@ -75,7 +82,8 @@ function Editor({ rail, setup }: { rail: RailWithParts['rail']; setup: BoardSetu
         boardId={boardId}
         setup={setup}
         submitText="Save the specification"
-        pending={update.isPending}
+        pending={update.isPending || remove.isPending}
+        done={isLeaving}
         failure={conflict ? null : update.error}
         wayOut={<ButtonLink to={paths.board(boardId)}>To the board</ButtonLink>}
         onSubmit={(next) => save(next, since.version)}
@@ -97,7 +105,7 @@ function Editor({ rail, setup }: { rail: RailWithParts['rail']; setup: BoardSetu
               <Button
                 onClick={() => {
                   cacheRail(client, conflict);
-                  back();
+                  leave(bench);
                 }}
               >
                 Keep the newer one
@@ -116,7 +124,7 @@ function Editor({ rail, setup }: { rail: RailWithParts['rail']; setup: BoardSetu
             onClick={() =>
               remove.mutate(
                 { railId, version: rail.version },
-                { onSuccess: () => navigate(paths.board(boardId)) },
+                { onSuccess: () => leave(paths.board(boardId)) },
               )
             }
           >

@@ -6,7 +6,7 @@ import {
   railWithPartsSchema,
 } from '@shared/schemas/rail.schema';
 import type { RailSpecInput } from '@shared/schemas/rail-spec.schema';
-import { type QueryClient, queryOptions, useMutation, useQuery, useQueryClient } from '@tanstack/react-query';
+import { hashKey, type QueryClient, queryOptions, useMutation, useQuery, useQueryClient } from '@tanstack/react-query';
 import { command, request } from '@/lib/api-client';
 
 /** All rails of a board with the parts they use: one fetch feeds the table, the side list and the bench. */
@@ -84,8 +84,18 @@ export function useDeleteRail(boardId: string) {
     mutationFn: ({ railId, version }: { railId: string; version: number }) =>
       command('DELETE', `/boards/${boardId}/rails/${railId}?version=${version}`),
     onSuccess: (_, { railId }) => {
-      client.removeQueries({ queryKey: ['boards', boardId, 'rails', railId] });
-      return client.invalidateQueries({ queryKey: ['boards'] });
+      client.setQueryData(railsQuery(boardId).queryKey, (list: RailList | undefined) =>
+        list ? { ...list, rails: list.rails.filter((one) => one.id !== railId) } : list,
+      );
+      const deleted = hashKey(railQuery(boardId, railId).queryKey);
+      return client.invalidateQueries({
+        queryKey: ['boards'],
+        predicate: ({ queryHash }) => queryHash !== deleted,
+      });
     },
   });
 }
+
+/** A deleted rail leaves the cache; not while a page still shows it, which would ask the server for it again. */
+export const forgetRail = (client: QueryClient, boardId: string, railId: string): void =>
+  client.removeQueries({ queryKey: railQuery(boardId, railId).queryKey });

@@ -2,7 +2,9 @@ import type { BoardSetup } from '@shared/schemas/board-setup.schema';
 import type { RailSpec } from '@shared/schemas/rail-spec.schema';
 import { type FormEvent, type ReactNode, useDeferredValue, useMemo, useRef, useState } from 'react';
 import { Button } from '@/components/ui/button';
+import { UnsavedGuard } from '@/components/ui/unsaved-guard';
 import { ApiError } from '@/lib/problem';
+import { differs } from '../lib/differs';
 import { errorsAtFields } from '../lib/field-of-path';
 import { readSpec } from '../lib/read-spec';
 import { sentencesOf } from '../lib/sentences';
@@ -26,6 +28,8 @@ interface SpecFormProps {
   setup: BoardSetup;
   submitText: string;
   pending: boolean;
+  /** What is typed is saved or given up: leaving no longer asks. */
+  done: boolean;
   /** What the server said to the last try. */
   failure: unknown;
   /** Where to go when the server says that there is no such thing any more. */
@@ -36,7 +40,8 @@ interface SpecFormProps {
 /** Everything that is said about a rail but its bank. Shows what each group comes to while one types. */
 export function SpecFormView(props: SpecFormProps) {
   const { setup, failure } = props;
-  const [form, setForm] = useState(props.start);
+  const [start] = useState(props.start);
+  const [form, setForm] = useState(start);
   const [tried, setTried] = useState(false);
   const element = useRef<HTMLFormElement>(null);
   // Long tables take a while to read: what is typed shows at once, what it comes to a moment later.
@@ -86,6 +91,7 @@ export function SpecFormView(props: SpecFormProps) {
           </Button>
         </div>
       </div>
+      <UnsavedGuard dirty={differs(form, start) && !props.pending && !props.done} />
     </form>
   );
 }
