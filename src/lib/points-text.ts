@@ -1,5 +1,6 @@
 import { parseQuantity } from '@shared/units/parse';
 import type { UnitSymbol } from '@shared/units/quantity';
+import { headerFault } from './points-header';
 
 /** `lines[i]` is the line, counted from 1, that `rows[i]` stands on: blank lines and notes hold no point. */
 export type PointsRead =
@@ -7,8 +8,8 @@ export type PointsRead =
   | { ok: false; reason: string; line?: number };
 
 /**
- * Points, one a line, their numbers parted by blanks, tabs or semicolons: `10k 3m`. What begins with # is a note. `examples`
- * stand in the sentence that asks for a first line.
+ * Points, one a line, their numbers parted by blanks, tabs or semicolons: `10k 3m`. What begins with # is a note; a note that
+ * says other units than are wanted stops the reading. `examples` stand in the sentence that asks for a first line.
  */
 export function readPoints(
   text: string,
@@ -18,10 +19,12 @@ export function readPoints(
   const rows: number[][] = [];
   const lines: number[] = [];
   const all = text.split(/\r\n|\r|\n/);
+  const misled = misledBy(all, units);
+  if (misled) return misled;
   for (let i = 0; i < all.length; i++) {
     const content = all[i].trim();
     const line = i + 1;
-    if (content === '' || content.startsWith('#')) continue;
+    if (!holdsPoint(content)) continue;
     const cells = cellsOf(content, units.length);
     if (cells.length !== units.length)
       return {
@@ -41,6 +44,20 @@ export function readPoints(
   return rows.length === 0
     ? { ok: false, reason: `write at least one line, e.g. ${examples.slice(0, units.length).join(' ')}` }
     : { ok: true, rows, lines };
+}
+
+const holdsPoint = (content: string): boolean => content !== '' && !content.startsWith('#');
+
+/** The first note that says something else of the numbers than they are read as. */
+function misledBy(all: readonly string[], units: readonly UnitSymbol[]): PointsRead | null {
+  const first = all.find((line) => holdsPoint(line.trim()));
+  const cells = cellsOf(first?.trim() ?? '', units.length);
+  for (let i = 0; i < all.length; i++) {
+    if (!all[i].trim().startsWith('#')) continue;
+    const fault = headerFault(all[i], units, cells);
+    if (fault) return { ok: false, reason: `line ${i + 1}: ${fault}`, line: i + 1 };
+  }
+  return null;
 }
 
 const EXAMPLES = ['10k', '3m', '5m'];
