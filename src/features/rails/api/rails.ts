@@ -6,7 +6,14 @@ import {
   railWithPartsSchema,
 } from '@shared/schemas/rail.schema';
 import type { RailSpecInput } from '@shared/schemas/rail-spec.schema';
-import { hashKey, type QueryClient, queryOptions, useMutation, useQuery, useQueryClient } from '@tanstack/react-query';
+import {
+  hashKey,
+  type QueryClient,
+  queryOptions,
+  useMutation,
+  useQuery,
+  useQueryClient,
+} from '@tanstack/react-query';
 import { command, request } from '@/lib/api-client';
 
 /** All rails of a board with the parts they use: one fetch feeds the table, the side list and the bench. */
