@@ -24,12 +24,12 @@ const positive = (max: number) => z.number().gt(0, 'must be above zero').max(max
 const notNegative = (max: number) => z.number().min(0, 'must not be negative').max(max, 'is too large');
 
 /** How a value goes with another: [x, value] with x rising. */
-const curve = (what: string, lowest: number, highest: number) =>
+const curve = (what: string, lowest: number, highest: number, most: number, tooMuch: string) =>
   z
     .array(
       z.tuple([
         z.number().min(lowest, `${what} is below ${lowest}`).max(highest, `${what} is above ${highest}`),
-        z.number().gt(0, 'the factor must be above zero').max(10, 'the factor is too large'),
+        z.number().gt(0, 'the factor must be above zero').max(most, tooMuch),
       ]),
     )
     .min(2, 'a curve needs at least two points')
@@ -41,12 +41,46 @@ const curve = (what: string, lowest: number, highest: number) =>
     });
 
 /** C ÷ C(0 V) over DC voltage: [volt, factor], from 0 V on, with factor 1 there. */
-export const biasCurveSchema = curve('voltage', 0, 1e5).refine(
+export const biasCurveSchema = curve('voltage', 0, 1e5, 1.5, 'C ÷ C(0 V) is above 1.5').refine(
   (points) => points[0][0] === 0 && Math.abs(points[0][1] - 1) < 1e-9,
   'the first point is 0 V with factor 1',
 );
-/** C ÷ C(25 °C) over temperature: [°C, factor]. */
-export const temperatureCurveSchema = curve('temperature', -100, 300);
+
+/** What every factor of a temperature curve is counted from, and how far from 1 it may be read off there. */
+const REFERENCE_C = 25;
+const READING_ERROR = 0.05;
+
+/** The factor at 25 °C, straight between the points; null: the curve does not reach it. */
+function factorAtReference(points: readonly (readonly [number, number])[]): number | null {
+  const above = points.findIndex(([t]) => t >= REFERENCE_C);
+  if (above < 0) return null;
+  const [t, factor] = points[above];
+  if (t === REFERENCE_C) return factor;
+  if (above === 0) return null;
+  const [t0, factor0] = points[above - 1];
+  return factor0 + ((factor - factor0) * (REFERENCE_C - t0)) / (t - t0);
+}
+
+/** C ÷ C(25 °C) over temperature: [°C, factor], with factor 1 at 25 °C. */
+export const temperatureCurveSchema = curve(
+  'temperature',
+  -100,
+  300,
+  10,
+  'the factor is too large',
+).superRefine((points, ctx) => {
+  const factor = factorAtReference(points);
+  if (factor === null)
+    ctx.addIssue({
+      code: 'custom',
+      message: 'the curve must reach 25 °C, which its factors are counted from',
+    });
+  else if (!(Math.abs(factor - 1) <= READING_ERROR + 1e-12))
+    ctx.addIssue({
+      code: 'custom',
+      message: `C ÷ C(25 °C) must be 1 at 25 °C; this curve is ${Number(factor.toPrecision(3))} there`,
+    });
+});
 
 const rising = (points: readonly (readonly number[])[], ctx: z.RefinementCtx) => {
   for (let i = 1; i < points.length; i++)

@@ -226,6 +226,9 @@ describe('a part', () => {
     expect(await bias([0, 0.9], [5, 0.8])).toEqual(at('bias_curve', 'first point is 0 V with factor 1'));
     expect(await bias([0, 1], [5, -0.8])).toEqual(at('bias_curve[1][1]', 'above zero'));
     expect(await bias([0, 1])).toEqual(at('bias_curve', 'at least two points'));
+    expect(await bias([0, 1], [5, 1.6])).toEqual(at('bias_curve[1][1]', 'above 1.5'));
+    const warm = (...points: number[][]) => refused({ temperature_curve: points });
+    expect(await warm([-55, 0.9], [20, 1])).toEqual(at('temperature_curve', 'must reach 25 °C'));
     const many = Array.from({ length: 201 }, (_, i) => [i - 60, 1]);
     expect(await refused({ temperature_curve: many })).toEqual(at('temperature_curve', 'at most 200'));
     const impedance_table = [

@@ -50,6 +50,7 @@ describe('what is known of a part', () => {
       ],
       temperature_curve: [
         [-40, 0.9],
+        [25, 1],
         [85, 0.9],
       ],
       ageing_percent_per_decade: 3,
