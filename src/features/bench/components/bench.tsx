@@ -1,4 +1,3 @@
-import { EngineError } from '@shared/engine/errors';
 import { packageReach_Hz } from '@shared/engine/package-reach';
 import { newPartDistance_m, railDocument } from '@shared/rail/document';
 import { targetMask } from '@shared/rail/target-mask';
@@ -7,8 +6,6 @@ import type { Part } from '@shared/schemas/part.schema';
 import type { RailWithParts, Verdict } from '@shared/schemas/rail.schema';
 import { useQuery } from '@tanstack/react-query';
 import { type ReactNode, useCallback, useEffect, useMemo, useRef, useState } from 'react';
-import { Button } from '@/components/ui/button';
-import { Notice } from '@/components/ui/notice';
 import { Section } from '@/components/ui/page';
 import { messageOf } from '@/lib/problem';
 import { candidatesQuery } from '../api/part-choice';
@@ -20,10 +17,13 @@ import { mixIn, proofText, useMixSearch } from '../hooks/use-mix-search';
 import { type DraftLine, isSameLine, keyed, savedBank } from '../lib/bank-history';
 import { benchCautions } from '../lib/cautions';
 import { failingChecks } from '../lib/failing-checks';
-import { bankOfMix, searchQuestion } from '../lib/mix';
+import { bankOfMix } from '../lib/mix';
+import { askedOf, NO_QUESTION } from '../lib/search-question';
 import { cornerOfView, NEXT_VIEW, type ValuesView, VIEW_NAMES } from '../lib/values-view';
 import { BenchFacts } from './bench-facts';
+import { BenchFooter } from './bench-footer';
 import { BenchSections } from './bench-sections';
+import { CautionsPanel } from './cautions-panel';
 import { LoadStepPanel, StartUpPanel, WorstCasesPanel } from './check-panels';
 import { PartPicker } from './part-picker';
 import { ConflictDialog, SaveStatus } from './save-status';
@@ -45,8 +45,6 @@ interface BenchProps {
   /** Puts the save state where the page wants it (the header). */
   renderStatus: (status: ReactNode) => ReactNode;
 }
-
-const NO_QUESTION = { asked: null, fault: null };
 
 /** The working screen of one rail. Mounted anew for each rail (by key). */
 export function Bench(props: BenchProps) {
@@ -109,20 +107,13 @@ export function Bench(props: BenchProps) {
   );
 
   const lockedCount = bench.lines.reduce((sum, line) => (line.locked ? sum + line.count : sum), 0);
-  const question = useMemo(() => {
-    const all = candidates.data;
-    if (!all || all.length === 0 || !canEdit) return NO_QUESTION;
-    const candidateIds = bench.search.candidateIds ?? all.map((part) => part.id);
-    try {
-      const settings = { ...bench.search, candidateIds };
-      const asked = searchQuestion(spec, bench.lines, known, setup, settings, view !== 'catalogue');
-      return { asked, fault: null };
-    } catch (error) {
-      // A part of the bank has no value in service on this rail: nothing can be searched before it goes.
-      if (error instanceof EngineError) return { asked: null, fault: error.message };
-      throw error;
-    }
-  }, [candidates.data, canEdit, bench.search, bench.lines, known, spec, setup, view]);
+  const question = useMemo(
+    () =>
+      canEdit && candidates.data
+        ? askedOf(candidates.data, spec, bench.lines, known, setup, bench.search, view !== 'catalogue')
+        : NO_QUESTION,
+    [candidates.data, canEdit, bench.search, bench.lines, known, spec, setup, view],
+  );
   const asked = useMemo(() => JSON.stringify(question.asked), [question]);
   const outdated = search.state.kind !== 'idle' && search.question !== null && search.question !== asked;
   const startSearch = () => {
@@ -247,36 +238,14 @@ export function Bench(props: BenchProps) {
           onChange={change}
           onRemove={(key) => bench.edit({ type: 'remove', key })}
           footer={
-            <div className="flex flex-wrap items-center justify-between gap-4 py-3">
-              {canEdit ? (
-                <div className="flex gap-5">
-                  <Button variant="plain" onClick={() => setPicking(true)}>
-                    + add a part
-                  </Button>
-                  <Button
-                    variant="plain"
-                    disabled={!bench.canUndo}
-                    onClick={() => bench.edit({ type: 'undo' })}
-                  >
-                    undo
-                  </Button>
-                  <Button
-                    variant="plain"
-                    disabled={!bench.canRedo}
-                    onClick={() => bench.edit({ type: 'redo' })}
-                  >
-                    redo
-                  </Button>
-                </div>
-              ) : (
-                <p className="text-stone">You see this rail; engineers of the board change it.</p>
-              )}
-              <p className="text-small text-stone max-lg:hidden">
-                {canEdit
-                  ? '↑↓ line · ←→ count · A add · U undo · F search · L lines · E envelope · V values'
-                  : '↑↓ line · Enter opens it · L lines · E envelope · V values'}
-              </p>
-            </div>
+            <BenchFooter
+              canEdit={canEdit}
+              canUndo={bench.canUndo}
+              canRedo={bench.canRedo}
+              onAdd={() => setPicking(true)}
+              onUndo={() => bench.edit({ type: 'undo' })}
+              onRedo={() => bench.edit({ type: 'redo' })}
+            />
           }
         />
         {bench.lines.length === 0 && !isPreview && (
@@ -328,19 +297,7 @@ export function Bench(props: BenchProps) {
               />
             </Section>
           )}
-          <Section title="cautions">
-            <div className="flex flex-col gap-3">
-              {cautions.map((one) => (
-                <Notice key={one.title} tone="caution" title={`! ${one.title}`} className="text-small">
-                  {one.text}
-                </Notice>
-              ))}
-              <p className="text-small text-stone">
-                Estimates from models: measure the rail before release. Local codes, the applicable safety
-                standard and a qualified engineer’s judgement come first.
-              </p>
-            </div>
-          </Section>
+          <CautionsPanel cautions={cautions} />
         </SidePanel>
       </aside>
       <div className="min-w-0 py-5 pr-5 pl-6">

@@ -80,7 +80,7 @@ interface RowProps {
 function Row({ name, holds, headroom_dB, at }: RowProps) {
   return (
     <tr>
-      <Td>{name}</Td>
+      <Td className="min-w-36">{name}</Td>
       <Td>
         {headroom_dB === null ? (
           <span className="text-kingfisher">▲ nothing left</span>
