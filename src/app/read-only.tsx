@@ -1,3 +1,4 @@
+import type { ReactNode } from 'react';
 import { ButtonLink } from '@/components/ui/button';
 import { EmptyState, Page } from '@/components/ui/page';
 import { paths } from '@/config/paths';
@@ -7,12 +8,15 @@ interface Props {
   boardId: string;
   /** The rail that was to be changed; without one the way back is the board. */
   railId?: string;
+  /** What there is to look at. */
+  children?: ReactNode;
 }
 
 /** For whoever may see a board but not edit it: said before anything is typed, with the way back. */
-export function ReadOnly({ title, boardId, railId }: Props) {
+export function ReadOnly({ title, boardId, railId, children }: Props) {
   return (
     <Page title={title}>
+      {children}
       <EmptyState
         title="Read only for you"
         action={

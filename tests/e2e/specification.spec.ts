@@ -198,3 +198,27 @@ test('a deleted rail leads to the board, and nobody asks the server for it again
   await expect(page.getByRole('link', { name: 'VDD_SPARE' })).toHaveCount(0);
   expect(missing).toEqual([]);
 });
+
+test('a reviewer reads what is specified, and that only engineers change it', async ({ browser }) => {
+  const page = await (await browser.newContext()).newPage();
+  await signIn(page, demoEmail('reviewer'));
+  await openBench(page, 'VDD_CORE');
+  await page.goto(`${page.url()}/specification`);
+  await expect(page.getByText('Only engineers of this board add rails and change them')).toBeVisible();
+  await expect(page.locator('dt', { hasText: 'band' })).toBeVisible();
+  await expect(page.locator('dt', { hasText: 'conditions' })).toBeVisible();
+  await page.context().close();
+});
+
+test('refuses a source whose header says another unit', async ({ page }) => {
+  await openSpecification(page, 'VDD_AUX');
+  await page.getByLabel('output impedance').selectOption('table');
+  await page.getByLabel('file with the source’s points').setInputFiles({
+    name: 'buck.csv',
+    mimeType: 'text/csv',
+    buffer: Buffer.from('f (MHz),Re,Im\n0.001,0.01,0.001\n1,0.02,0.9\n'),
+  });
+  await expect(
+    page.getByText('▲ buck.csv: line 1: the header “f (MHz),Re,Im” says MHz: give frequencies in Hz'),
+  ).toBeVisible();
+});

@@ -6,6 +6,7 @@ import { useEffect, useRef, useState } from 'react';
 import { useNavigate, useParams } from 'react-router-dom';
 import { Button, ButtonLink } from '@/components/ui/button';
 import { Dialog } from '@/components/ui/dialog';
+import { Facts } from '@/components/ui/facts';
 import { Failure } from '@/components/ui/failure';
 import { Loading, Page } from '@/components/ui/page';
 import { paths } from '@/config/paths';
@@ -13,6 +14,7 @@ import { useBoard } from '@/features/boards/api/boards';
 import { cacheRail, forgetRail, useDeleteRail, useRail, useUpdateRail } from '@/features/rails/api/rails';
 import { SpecFormView } from '@/features/rails/components/spec-form';
 import { formOf } from '@/features/rails/lib/form-of';
+import { specFacts } from '@/features/revisions/components/spec-facts';
 import { ApiError, messageOf } from '@/lib/problem';
 import { useLeave } from '@/lib/use-leave';
 import { usePageTitle } from '@/lib/use-page-title';
@@ -37,7 +39,11 @@ export function Component() {
   if (!rail.data || !board.data) return <Loading what="the rail" />;
   const { spec } = rail.data.rail;
   if (!board.data.rights.edit)
-    return <ReadOnly title={`Specification of ${spec.name}`} boardId={boardId} railId={railId} />;
+    return (
+      <ReadOnly title={`Specification of ${spec.name}`} boardId={boardId} railId={railId}>
+        <Facts rows={specFacts(spec)} className="max-w-3xl" />
+      </ReadOnly>
+    );
   return <Editor key={railId} rail={rail.data.rail} setup={board.data.setup} />;
 }
 
