@@ -37,13 +37,32 @@ describe('the checks of a revision', () => {
       'one part open',
       'load step, droop',
       'load step, overshoot',
+      'load step, worst corner',
       'worst pattern of the load',
       'inrush',
     ]);
     expect(rows[3]).toMatchObject({ holds: false, note: expect.stringContaining('one BULK') });
-    expect(rows[4].note).toBe('of 50.0\u00a0mV');
+    expect(rows[4].note).toMatch(/^of 50\.0\u00a0mV; 0\u00a0A \+ 2\u00a0A in .* \(assumed\)$/);
+    expect(rows[6].note).toMatch(/^of 50\.0\u00a0mV; (droop|overshoot), /);
     // 204 µF to 1 V in 1 ms: 0.204 A over a limit of 0.1 A
-    expect(rows[7]).toMatchObject({ holds: false, figure: '204\u00a0mA' });
+    expect(rows[8]).toMatchObject({ holds: false });
+    expect(rows[8].note).toMatch(/; a soft start of [\d.]+\u00a0ms would keep within it$/);
+  });
+
+  it('name the larger of droop and overshoot in the worst corner, and what stands in for tables', () => {
+    const rows = checkRows({
+      ...checks,
+      load_assumed: false,
+      approximated: ['BULK'],
+      worst_step: { corner: 'cold, aged', droop_V: 0.02, overshoot_V: 0.06 },
+    });
+    expect(rows[4].note).toMatch(/; ≈ in time taken as series R–L–C: BULK$/);
+    expect(rows[4].note).not.toContain('assumed');
+    expect(rows[6]).toMatchObject({
+      holds: false,
+      figure: '60.0\u00a0mV',
+      note: 'of 50.0\u00a0mV; overshoot, cold, aged',
+    });
   });
 
   it('say so where nothing is given to hold a figure against', () => {
@@ -53,6 +72,6 @@ describe('the checks of a revision', () => {
       start_up: { ...checks.start_up, limit_A: null, current_A: null, holds: null },
     });
     expect(rows.find((row) => row.name === 'worst pattern of the load')?.holds).toBeNull();
-    expect(rows[7]).toMatchObject({ holds: null, figure: '—', note: expect.stringContaining('not given') });
+    expect(rows[8]).toMatchObject({ holds: null, figure: '—', note: expect.stringContaining('not given') });
   });
 });

@@ -1,14 +1,10 @@
 import type { RailChecks } from '@shared/schemas/checks.schema';
 import { formatFixed, formatQuantity } from '@shared/units/format';
 import { Table, Td, Th } from '@/components/ui/table';
+import { type Check, neededText, stepRows } from './time-checks';
 
-interface Check {
-  name: string;
-  /** null: nothing to hold it against. */
-  holds: boolean | null;
-  figure: string;
-  note: string;
-}
+/** Beside the name there is room on a desk only; a phone has figure and place under the name. */
+const WIDE = 'max-sm:hidden';
 
 const headroom = (dB: number) => `${formatFixed(Math.abs(dB), Math.abs(dB) < 0.095 ? 2 : 1)}\u00a0dB`;
 
@@ -41,11 +37,7 @@ export function checkRows(checks: RailChecks): Check[] {
       figure: missing.tightest ? headroom(missing.tightest.headroom_dB) : 'nothing left',
       note: `one ${missing.part}${missing.tightest ? `, at ${formatQuantity(missing.tightest.frequency_Hz, 'Hz')}` : ''}`,
     });
-  if (checks.step)
-    rows.push(
-      { name: 'load step, droop', ...against(checks.step.droop_V) },
-      { name: 'load step, overshoot', ...against(checks.step.overshoot_V) },
-    );
+  rows.push(...stepRows(checks, against));
   if (checks.pattern) {
     const { swing_V, frequency_Hz, q } = checks.pattern;
     const row = against(swing_V);
@@ -65,7 +57,7 @@ export function checkRows(checks: RailChecks): Check[] {
     note:
       start.limit_A === null
         ? 'soft start and current limit are not given'
-        : `of ${formatQuantity(start.limit_A, 'A')}; ${formatQuantity(start.energy_J, 'J')} stored`,
+        : `of ${formatQuantity(start.limit_A, 'A')}; ${formatQuantity(start.energy_J, 'J')} stored${neededText(start)}`,
   });
   return rows;
 }
@@ -74,8 +66,10 @@ const HEAD = (
   <>
     <Th>check</Th>
     <Th>result</Th>
-    <Th numeric>figure</Th>
-    <Th>where</Th>
+    <Th numeric className={WIDE}>
+      figure
+    </Th>
+    <Th className={WIDE}>where</Th>
   </>
 );
 
@@ -85,12 +79,19 @@ export function ChecksList({ rail, checks }: { rail: string; checks: RailChecks 
     <Table caption={`checks of ${rail}`} head={HEAD}>
       {checkRows(checks).map((row) => (
         <tr key={row.name}>
-          <Td className="whitespace-nowrap">{row.name}</Td>
-          <Td className="whitespace-nowrap">
+          <Td className="sm:whitespace-nowrap">
+            {row.name}
+            <span className="block text-small text-stone sm:hidden">
+              {row.figure}, {row.note}
+            </span>
+          </Td>
+          <Td className="sm:whitespace-nowrap">
             <Result holds={row.holds} />
           </Td>
-          <Td numeric>{row.figure}</Td>
-          <Td className="text-stone">{row.note}</Td>
+          <Td numeric className={WIDE}>
+            {row.figure}
+          </Td>
+          <Td className={`text-stone ${WIDE}`}>{row.note}</Td>
         </tr>
       ))}
     </Table>

@@ -102,6 +102,17 @@ describe('draftOf', () => {
     expect(draft.short).toEqual(['B']);
   });
 
+  it('names what is short in its worst case or with one part open, though it holds in service', () => {
+    const tightest = { frequency_Hz: 1e6, impedance_ohm: 1, target_ohm: 0.5, headroom_dB: -6 };
+    const summary = {
+      ...a.summary,
+      worst: { holds: false, tightest, corner: 'cold' },
+      missing: { holds: true, tightest, part: 'C-1' },
+    };
+    const draft = draftOf({ rails: [{ ...a, summary }], parts: [part] }, EMPTY_SETUP, null);
+    expect(draft).toMatchObject({ short: [], worst: ['A'], missing: [] });
+  });
+
   it('tells edited, added and deleted rails apart', () => {
     const draft = draftOf({ rails: [rail('a', 5), rail('c', 1)], parts: [part] }, EMPTY_SETUP, cut(a, b));
     expect(draft).toMatchObject({ edited: ['A'], added: ['C'], deleted: ['B'], byParts: [] });

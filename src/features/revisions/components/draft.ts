@@ -1,7 +1,7 @@
 import { canonicalJson } from '@shared/formats/canonical-json';
 import { railDocument } from '@shared/rail/document';
 import type { BoardSetup } from '@shared/schemas/board-setup.schema';
-import type { RailList } from '@shared/schemas/rail.schema';
+import type { RailList, RailSummary } from '@shared/schemas/rail.schema';
 import type { RailDocument } from '@shared/schemas/rail-document.schema';
 import type { RevisionDetail } from '@shared/schemas/revision.schema';
 
@@ -17,7 +17,10 @@ export interface Draft {
   byParts: string[];
   /** In the revision, and no longer on the board. */
   deleted: string[];
+  /** In service; then those that are short in their worst case, and with one part open. */
   short: string[];
+  worst: string[];
+  missing: string[];
   /** Rails that have no result, e.g. since nothing feeds them. */
   unknown: string[];
 }
@@ -40,6 +43,9 @@ type Latest = Pick<RevisionDetail, 'letter'> & {
   railResults: readonly Pick<RevisionDetail['railResults'][number], 'railId' | 'document'>[];
 };
 
+const namesOf = (rails: RailList['rails'], picks: (summary: RailSummary) => boolean): string[] =>
+  rails.filter((rail) => picks(rail.summary)).map((rail) => rail.spec.name);
+
 const own = ({ rail, bank }: RailDocument): string => canonicalJson({ rail, bank });
 
 /** Compares what the rails say, not when they were saved: an edit that was taken back is none. */
@@ -55,8 +61,10 @@ export function draftOf({ rails, parts }: RailList, setup: BoardSetup, latest: L
     edited: [],
     byParts: [],
     deleted: [...cut].filter(([id]) => !here.has(id)).map(([, document]) => document.rail.name),
-    short: rails.filter((rail) => rail.summary.holds === false).map((rail) => rail.spec.name),
-    unknown: rails.filter((rail) => rail.summary.holds === null).map((rail) => rail.spec.name),
+    short: namesOf(rails, (summary) => summary.holds === false),
+    worst: namesOf(rails, (summary) => summary.worst?.holds === false),
+    missing: namesOf(rails, (summary) => summary.missing?.holds === false),
+    unknown: namesOf(rails, (summary) => summary.holds === null),
   };
   for (const { id, spec, bank } of rails) {
     const now = railDocument(spec, bank, byId, setup);

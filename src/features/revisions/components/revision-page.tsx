@@ -19,7 +19,14 @@ function Header({ revision }: { revision: RevisionDetail }) {
       className="max-w-4xl"
       rows={[
         ['cut by', `${revision.createdBy.name}, ${dayAndTime(revision.createdAt)}`],
-        ['rails', <RailTally key="rails" rails={revision.rails} />],
+        [
+          'rails',
+          <RailTally
+            key="rails"
+            rails={revision.rails}
+            inService={!revision.engineVersion.startsWith('1.')}
+          />,
+        ],
         ['parts', String(revision.parts)],
         ['cost', revision.cost === null ? '— (a part has no price)' : formatCost(revision.cost)],
         [

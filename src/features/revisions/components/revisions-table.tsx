@@ -59,7 +59,7 @@ export function RevisionsTable({ boardId, revisions }: { boardId: string; revisi
           <Td className={`whitespace-nowrap ${WIDE}`}>{one.createdBy.name}</Td>
           <Td className={`whitespace-nowrap text-stone ${WIDE}`}>{dayAndTime(one.createdAt)}</Td>
           <Td>
-            <RailTally rails={one.rails} />
+            <RailTally rails={one.rails} inService={!one.engineVersion.startsWith('1.')} />
           </Td>
           <Td numeric className={WIDE}>
             {one.parts}
