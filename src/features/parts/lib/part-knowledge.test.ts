@@ -61,7 +61,7 @@ describe('what is known of a part', () => {
     expect(estimatedRespects(known)).toEqual([]);
     expect(overBias(known).text).toBe('curve, 2 points');
     expect(temperatureRange(known).text).toBe('\u221240 … 85\u00a0°C, by its curve');
-    expect(ageing(known).text).toBe('3\u00a0% a decade of hours');
+    expect(ageing(known).text).toBe('3\u00a0% a decade of hours, from 1000 h on');
     expect([esrSpread(known).text, eslSpread(known).text]).toEqual(['±20\u00a0%', 'none']);
   });
 

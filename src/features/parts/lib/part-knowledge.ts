@@ -1,4 +1,4 @@
-import { ageingRate } from '@shared/engine/service/ageing';
+import { ageingRate, REFERENCE_AGE_H } from '@shared/engine/service/ageing';
 import { biasFactor } from '@shared/engine/service/bias';
 import { readDielectric } from '@shared/engine/service/dielectric';
 import { USUAL_ESL_PERCENT, USUAL_ESR_PERCENT } from '@shared/engine/service/parasitics';
@@ -54,7 +54,7 @@ export function ageing(part: Part): Knowledge {
   if ('refusal' in answer) return { text: answer.refusal, estimated: true };
   const { percentPerDecade, basis, estimated } = answer.value;
   if (percentPerDecade === 0) return { text: estimated ? basis : 'none', estimated };
-  const rate = `${percent(percentPerDecade)} a decade of hours`;
+  const rate = `${percent(percentPerDecade)} a decade of hours, from ${REFERENCE_AGE_H} h on`;
   return { text: estimated ? `${rate}, ${basis}` : rate, estimated };
 }
 
