@@ -85,6 +85,7 @@ function Row({ one, reasonIsAbove, room }: { one: Instance; reasonIsAbove: boole
       </Td>
       <Td numeric className={WIDE}>
         <Decimal value={one.mount_H} unit="H" fraction={room} />
+        {one.recipe && <span className="block text-small text-stone">{one.recipe}</span>}
       </Td>
       <Td numeric className={WIDE}>
         {one.distance_m === null ? (
