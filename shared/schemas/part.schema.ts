@@ -41,10 +41,12 @@ const curve = (what: string, lowest: number, highest: number, most: number, tooM
     });
 
 /** C ÷ C(0 V) over DC voltage: [volt, factor], from 0 V on, with factor 1 there. */
-export const biasCurveSchema = curve('voltage', 0, 1e5, 1.5, 'C ÷ C(0 V) is above 1.5').refine(
-  (points) => points[0][0] === 0 && Math.abs(points[0][1] - 1) < 1e-9,
-  'the first point is 0 V with factor 1',
-);
+export const biasCurveSchema = curve('voltage', 0, 1e5, 1.5, 'C ÷ C(0 V) is above 1.5')
+  .refine(
+    (points) => points[0][0] === 0 && Math.abs(points[0][1] - 1) < 1e-9,
+    'the first point is 0 V with factor 1',
+  )
+  .describe('[V, C ÷ C(0 V)], from [0, 1] on, voltages rising');
 
 /** What every factor of a temperature curve is counted from, and how far from 1 it may be read off there. */
 const REFERENCE_C = 25;
@@ -62,25 +64,21 @@ function factorAtReference(points: readonly (readonly [number, number])[]): numb
 }
 
 /** C ÷ C(25 °C) over temperature: [°C, factor], with factor 1 at 25 °C. */
-export const temperatureCurveSchema = curve(
-  'temperature',
-  -100,
-  300,
-  10,
-  'the factor is too large',
-).superRefine((points, ctx) => {
-  const factor = factorAtReference(points);
-  if (factor === null)
-    ctx.addIssue({
-      code: 'custom',
-      message: 'the curve must reach 25 °C, which its factors are counted from',
-    });
-  else if (!(Math.abs(factor - 1) <= READING_ERROR + 1e-12))
-    ctx.addIssue({
-      code: 'custom',
-      message: `C ÷ C(25 °C) must be 1 at 25 °C; this curve is ${Number(factor.toPrecision(3))} there`,
-    });
-});
+export const temperatureCurveSchema = curve('temperature', -100, 300, 10, 'the factor is too large')
+  .superRefine((points, ctx) => {
+    const factor = factorAtReference(points);
+    if (factor === null)
+      ctx.addIssue({
+        code: 'custom',
+        message: 'the curve must reach 25 °C, which its factors are counted from',
+      });
+    else if (!(Math.abs(factor - 1) <= READING_ERROR + 1e-12))
+      ctx.addIssue({
+        code: 'custom',
+        message: `C ÷ C(25 °C) must be 1 at 25 °C; this curve is ${Number(factor.toPrecision(3))} there`,
+      });
+  })
+  .describe('[°C, C ÷ C(25 °C)], temperatures rising; reaches 25 °C and is 1 there within 5 %');
 
 const rising = (points: readonly (readonly number[])[], ctx: z.RefinementCtx) => {
   for (let i = 1; i < points.length; i++)
@@ -94,7 +92,10 @@ export const esrTableSchema = z
   .array(z.tuple([frequency, z.number().gt(0, 'ESR must be above zero').max(1e6, 'ESR is too large')]))
   .min(2, 'a table needs at least two points')
   .max(2000, 'at most 2000 points')
-  .superRefine(rising);
+  .superRefine(rising)
+  .describe(
+    '[Hz, ohm], frequencies rising; instead of esr_ohm. Straight between its points on log–log paper, level beyond its ends',
+  );
 
 /** A measured impedance of the part alone: [Hz, Re, Im] in ohm. */
 export const impedanceTableSchema = z
@@ -107,7 +108,10 @@ export const impedanceTableSchema = z
   )
   .min(2, 'a table needs at least two points')
   .max(5000, 'at most 5000 points')
-  .superRefine(rising);
+  .superRefine(rising)
+  .describe(
+    '[Hz, Re, Im] in ohm of the part alone, frequencies rising; instead of C, ESR and ESL. ln|Z| and phase straight over ln f between its points, continued by the fitted series R–L–C beyond; mount_H is added',
+  );
 
 const percent = (most: number) => z.number().min(0, 'must not be negative').max(most, `at most ${most} %`);
 
@@ -116,11 +120,14 @@ export const partBehaviourShape = {
   bias_curve: biasCurveSchema.nullable().default(null),
   temperature_curve: temperatureCurveSchema.nullable().default(null),
   /** Loss in per cent of the 1000 h value with each decade of hours. */
-  ageing_percent_per_decade: percent(20).nullable().default(null),
+  ageing_percent_per_decade: percent(20)
+    .describe('Loss in per cent of the 1000 h value with each decade of hours')
+    .nullable()
+    .default(null),
   esr_table: esrTableSchema.nullable().default(null),
   impedance_table: impedanceTableSchema.nullable().default(null),
-  esr_tolerance_percent: percent(90).nullable().default(null),
-  esl_tolerance_percent: percent(90).nullable().default(null),
+  esr_tolerance_percent: percent(90).describe('±, in per cent of the ESR').nullable().default(null),
+  esl_tolerance_percent: percent(90).describe('±, in per cent of the ESL').nullable().default(null),
 };
 
 /** Identifies a part in documents and lists: letters, digits and a few signs, no spaces. */

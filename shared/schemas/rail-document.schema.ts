@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { partBehaviourShape, terminationSchema, toleranceSchema } from './part.schema';
+import { partBehaviourShape, partStateSchema, terminationSchema, toleranceSchema } from './part.schema';
 import { frequencySchema, railSpecSchema } from './rail-spec.schema';
 
 const positive = z.number().gt(0, 'must be above zero').max(1e15);
@@ -15,7 +15,9 @@ export const documentPartSchema = z.strictObject({
   capacitance_F: positive,
   esr_ohm: notNegative,
   esl_H: notNegative,
-  mount_H: notNegative.default(0),
+  mount_H: notNegative
+    .default(0)
+    .describe('Mounting inductance in H: added to esl_H, and to an impedance_table'),
   unit_cost: notNegative.optional(),
   area_mm2: notNegative.optional(),
   description: z.string().max(200).optional(),
@@ -26,6 +28,8 @@ export const documentPartSchema = z.strictObject({
   rated_voltage_V: positive.optional(),
   height_mm: positive.optional(),
   termination: terminationSchema.optional(),
+  /** Where it is not approved for new banks. */
+  state: partStateSchema.optional(),
   bias_curve: known.bias_curve.unwrap().unwrap().optional(),
   temperature_curve: known.temperature_curve.unwrap().unwrap().optional(),
   ageing_percent_per_decade: known.ageing_percent_per_decade.unwrap().unwrap().optional(),
@@ -43,11 +47,16 @@ export const documentLineSchema = z.strictObject({
     .min(1, 'count must be at least 1')
     .max(100_000, 'count must be at most 100 000'),
   /** Mounting inductance of this line, instead of the part's own. */
-  mount_H: notNegative.optional(),
+  mount_H: notNegative
+    .optional()
+    .describe('Mounting inductance of this line in H, instead of the part’s own'),
   /** The mount recipe that `mount_H` comes from, by name. */
   recipe: z.string().max(80).optional(),
   /** Farthest distance to the load; with the plane's geometry it gives the path inductance. */
-  distance_m: notNegative.max(10).optional(),
+  distance_m: notNegative
+    .max(10)
+    .optional()
+    .describe('To the load, in m; adds path inductance only where the plane has its geometry'),
   side: z.enum(['top', 'bottom']).optional(),
   locked: z.boolean().optional(),
 });
@@ -56,13 +65,20 @@ export type DocumentLine = z.infer<typeof documentLineSchema>;
 export const objectiveSchema = z.enum(['parts', 'cost', 'area']);
 
 export const documentSearchSchema = z.strictObject({
-  minimise: objectiveSchema.default('parts'),
-  candidates: z.array(z.string().min(1)).min(1, 'name at least one candidate').max(500),
-  max_kinds: z.int().min(1).max(500).optional(),
-  max_per_part: z.int().min(1).max(10_000).optional(),
+  minimise: objectiveSchema.default('parts').describe('Number of parts, their unit_cost or their area_mm2'),
+  candidates: z
+    .array(z.string().min(1))
+    .min(1, 'name at least one candidate')
+    .max(500)
+    .describe('Parts to choose from, by id'),
+  max_kinds: z.int().min(1).max(500).optional().describe('Most different parts in a mix'),
+  max_per_part: z.int().min(1).max(10_000).optional().describe('Most of one part in a mix'),
   /** How far from the load a candidate sits that the bank does not hold yet. */
-  distance_m: notNegative.max(10).optional(),
-  seed: z.int().min(0).max(4_294_967_295).optional(),
+  distance_m: notNegative
+    .max(10)
+    .optional()
+    .describe('Distance in m of candidates that the bank does not hold; without it the bank’s farthest'),
+  seed: z.int().min(0).max(4_294_967_295).optional().describe('The same seed gives the same search'),
 });
 
 /** One rail in one JSON document. Unknown keys are refused; the fixed fields never change their meaning. */
