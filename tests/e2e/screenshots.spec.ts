@@ -20,6 +20,17 @@ test('pictures by day', async ({ page }) => {
   await page.getByRole('link', { name: 'VDD_SERDES' }).first().click();
   await page.getByTestId('headroom').waitFor();
   await take(page, 'bench-light');
+  await page.getByRole('img', { name: /voltage under the worst pattern/ }).scrollIntoViewIfNeeded();
+  await take(page, 'load-step-light');
+  await page.getByRole('link', { name: 'Stack-up' }).first().click();
+  await page.getByRole('heading', { name: 'Stack-up and mount recipes' }).waitFor();
+  await take(page, 'stack-up-light');
+  await page.goto('/parts?q=AB-C0402-X6S-2U2-6V3');
+  await page.getByRole('link', { name: 'AB-C0402-X6S-2U2-6V3' }).first().click();
+  await page.getByRole('img', { name: /over DC bias/ }).waitFor();
+  await take(page, 'part-light');
+  await page.goto('/');
+  await page.getByRole('link', { name: 'Tide gateway' }).first().click();
   await page.getByRole('link', { name: 'Placement' }).first().click();
   await page.getByRole('link', { name: /CSV/ }).first().waitFor();
   await take(page, 'placement-light');
@@ -31,5 +42,7 @@ test('pictures at night', async ({ page }) => {
   await openBench(page, 'VDD_SERDES');
   await page.getByRole('button', { name: 'Search the smallest mix' }).click();
   await page.getByRole('button', { name: 'Preview the mix' }).click({ timeout: 30_000 });
+  await page.evaluate(() => window.scrollTo(0, 0));
+  await page.waitForTimeout(1500);
   await take(page, 'preview-dark');
 });

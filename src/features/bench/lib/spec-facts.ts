@@ -39,7 +39,7 @@ function targetText({ target, voltage_V }: RailSpec): string {
   }
 }
 
-/** `45 °C, 10 a`, with what was assumed said so. */
+/** `45 °C, 10 years`, with what was assumed said so. */
 export function conditionsText(spec: Pick<RailSpec, 'conditions'>): string {
   const { conditions, assumed } = conditionsOf(spec);
   const years = conditions.age_h / HOURS_A_YEAR;
