@@ -6,7 +6,7 @@ test('an edit made without a connection survives leaving the bench and loading t
   context,
 }) => {
   await signIn(page, demoEmail('engineer'));
-  await openBench(page, 'VBUS_72');
+  await openBench(page, 'VDD_IO');
   const before = await textOf(page.getByTestId('parts-kinds'));
   await context.setOffline(true);
   await page
@@ -20,6 +20,6 @@ test('an edit made without a connection survives leaving the bench and loading t
   await page.reload();
   await expect(page.getByRole('table', { name: 'rails of this board' })).toBeVisible();
   await expect(page.getByText('an edit waits to be sent')).toHaveCount(0, { timeout: 20_000 });
-  await page.getByRole('link', { name: 'VBUS_72' }).first().click();
+  await page.getByRole('link', { name: 'VDD_IO' }).first().click();
   await expect(page.getByTestId('parts-kinds')).not.toHaveText(before);
 });

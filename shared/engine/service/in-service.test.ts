@@ -95,11 +95,13 @@ describe('a part in service', () => {
       ],
       temperature_curve: [
         [-55, 0.9],
+        [25, 1],
+        [85, 0.9],
         [125, 0.9],
       ],
       ageing_percent_per_decade: 1,
     });
-    const values = inService(fromFile, state({ voltage_V: 6.3 }));
+    const values = inService(fromFile, state({ voltage_V: 6.3, temperature_C: 100 }));
     expect(values.factors.map((one) => one.factor)).toEqual([0.5, 0.9, 0.98, 1]);
     expect(values.estimated).toBe(false);
   });
