@@ -3,7 +3,7 @@ import { compileRail } from '../engine/rail';
 import { toleranceFactors } from '../engine/service/tolerance';
 import { kneeFrequency } from '../engine/target';
 import { type LoadStep, loadStep } from '../engine/time/load-step';
-import { poleForm } from '../engine/time/pole-form';
+import { type PoleForm, poleForm } from '../engine/time/pole-form';
 import { quasiStaticAbove } from '../engine/time/quasi-static';
 import { type StartUp, startUp } from '../engine/time/start-up';
 import { type WorstPattern, worstPattern } from '../engine/time/worst-pattern';
@@ -36,13 +36,15 @@ export interface RailTime {
 const PATTERN_BANDS = 10;
 const PATTERN_KNEES = 5;
 
+function stillAbove_Hz(band_Hz: readonly [number, number], step: LoadStepSpec | null): number {
+  const knees = step ? PATTERN_KNEES * kneeFrequency(step.rise_s) : 0;
+  return Math.max(PATTERN_BANDS * band_Hz[1], knees);
+}
+
 /** Load step and worst pattern of a rail whose parts are already what they are to be (give it the rail in service). */
 export function railTime(document: RailDocument): RailTime {
   const load = loadStepOf(document.rail);
-  const limit_Hz = Math.max(
-    PATTERN_BANDS * document.rail.band_Hz[1],
-    load ? PATTERN_KNEES * kneeFrequency(load.step.rise_s) : 0,
-  );
+  const limit_Hz = stillAbove_Hz(document.rail.band_Hz, load?.step ?? null);
   const base = {
     load: load?.step ?? null,
     assumed: load?.assumed ?? false,
@@ -78,17 +80,31 @@ export interface CornerStep {
   overshoot_V: number;
 }
 
-/** Every corner's load step, the furthest; null where the rail has none. `document` with catalogue parts. */
+/** So many corners are stepped in full: those that go furthest while what rings far above the band is left still. */
+const FULL_CORNERS = 3;
+
+/**
+ * The corner that takes the load step furthest; null where the rail has none. `document` with catalogue parts. Every corner is
+ * tried without the resonances above the worst pattern's limit, which cost most and move least; the furthest of them in full.
+ */
 export function worstCornerStep(document: RailDocument): CornerStep | null {
   const load = loadStepOf(document.rail);
   if (!load) return null;
+  const limit_Hz = stillAbove_Hz(document.rail.band_Hz, load.step);
+  const stepped = (corner: string, form: PoleForm): CornerStep => {
+    const { droop_V, overshoot_V } = loadStep(form, load.step, document.rail.voltage_V);
+    return { corner, droop_V, overshoot_V };
+  };
   try {
     return cornersOf(conditionsOf(document.rail).conditions)
       .map((corner) => {
         const form = poleForm(compileRail(networkOf(documentIn(document, corner))));
-        const { droop_V, overshoot_V } = loadStep(form, load.step, document.rail.voltage_V);
-        return { corner: cornerName(corner), droop_V, overshoot_V };
+        const name = cornerName(corner);
+        return { form, name, reach_V: furthest_V(stepped(name, quasiStaticAbove(form, limit_Hz))) };
       })
+      .sort((a, b) => b.reach_V - a.reach_V)
+      .slice(0, FULL_CORNERS)
+      .map(({ form, name }) => stepped(name, form))
       .reduce((worst, next) => (furthest_V(next) > furthest_V(worst) ? next : worst));
   } catch (error) {
     if (error instanceof EngineError) return null;
