@@ -1,7 +1,7 @@
 import type { RailDocument } from '@shared/schemas/rail-document.schema';
 import type { RailSpec } from '@shared/schemas/rail-spec.schema';
-import type { ReactNode } from 'react';
-import type { BenchChecks } from '../hooks/use-checks';
+import type { RailInTime, RailVerdicts } from '@workers/checks/checks.interface';
+import { memo, type ReactNode } from 'react';
 import { InServiceTable } from './in-service-table';
 import { LoadStepSection } from './load-step-section';
 import { WorstCasesSection } from './worst-cases-section';
@@ -9,18 +9,20 @@ import { YieldSection } from './yield-section';
 
 interface BenchSectionsProps {
   spec: RailSpec;
-  /** The bank as a document, catalogue parts; null while there is nothing to check. */
-  document: RailDocument | null;
-  checks: BenchChecks;
+  verdicts: RailVerdicts | null;
+  inTime: RailInTime | null;
   nameOf: (part: string) => string;
 }
 
-/** Under the bank: everything that the margin at the right sums up, in full. */
-export function BenchSections({ spec, document, checks, nameOf }: BenchSectionsProps) {
-  const verdicts = checks.verdicts.value;
-  const inTime = checks.inTime.value;
+/** Under the bank: everything that the margin at the right sums up, in full. Drawn anew only when an answer comes. */
+export const BenchSections = memo(function BenchSections({
+  spec,
+  verdicts,
+  inTime,
+  nameOf,
+}: BenchSectionsProps) {
   return (
-    <div className="flex flex-col gap-10 pt-8">
+    <>
       {verdicts && verdicts.parts.length > 0 && (
         <BenchSection
           id="in-service"
@@ -40,16 +42,26 @@ export function BenchSections({ spec, document, checks, nameOf }: BenchSectionsP
           <LoadStepSection time={inTime} />
         </BenchSection>
       )}
-      {document && document.bank.length > 0 && (
-        <BenchSection
-          id="yield"
-          title="yield over tolerance"
-          lead="Monte Carlo in service at the usual temperature and full age: every line’s C, ESR and ESL evenly drawn from their tolerances, the parts of one line alike, as from one reel."
-        >
-          <YieldSection document={document} nameOf={nameOf} />
-        </BenchSection>
-      )}
-    </div>
+    </>
+  );
+});
+
+/** Monte Carlo over the bank's tolerances, on demand. */
+export function YieldOfBank({
+  document,
+  nameOf,
+}: {
+  document: RailDocument;
+  nameOf: (part: string) => string;
+}) {
+  return (
+    <BenchSection
+      id="yield"
+      title="yield over tolerance"
+      lead="Monte Carlo in service at the usual temperature and full age: every line’s C, ESR and ESL evenly drawn from their tolerances, the parts of one line alike, as from one reel."
+    >
+      <YieldSection document={document} nameOf={nameOf} />
+    </BenchSection>
   );
 }
 

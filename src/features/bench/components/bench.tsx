@@ -22,7 +22,7 @@ import { askedOf, NO_QUESTION } from '../lib/search-question';
 import { cornerOfView, NEXT_VIEW, type ValuesView, VIEW_NAMES } from '../lib/values-view';
 import { BenchFacts } from './bench-facts';
 import { BenchFooter } from './bench-footer';
-import { BenchSections } from './bench-sections';
+import { BenchSections, YieldOfBank } from './bench-sections';
 import { CautionsPanel } from './cautions-panel';
 import { LoadStepPanel, StartUpPanel, WorstCasesPanel } from './check-panels';
 import { PartPicker } from './part-picker';
@@ -300,8 +300,9 @@ export function Bench(props: BenchProps) {
           <CautionsPanel cautions={cautions} />
         </SidePanel>
       </aside>
-      <div className="min-w-0 py-5 pr-5 pl-6">
-        <BenchSections spec={spec} document={document} checks={checks} nameOf={numberName} />
+      <div className="flex min-w-0 flex-col gap-10 py-5 pr-5 pl-6 pt-8">
+        <BenchSections spec={spec} verdicts={verdicts} inTime={checks.inTime.value} nameOf={numberName} />
+        {document.bank.length > 0 && <YieldOfBank document={document} nameOf={numberName} />}
       </div>
       {picking && (
         <PartPicker open voltage_V={spec.voltage_V} onPick={addPart} onClose={() => setPicking(false)} />

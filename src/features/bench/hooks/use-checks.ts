@@ -15,43 +15,56 @@ export interface BenchChecks {
   inTime: Asked<RailInTime>;
 }
 
-const NOTHING = { value: null, current: false, error: null };
+/** An answer with what it is an answer to. */
+interface Answered<T> {
+  value: T | null;
+  error: string | null;
+  to: RailDocument | null;
+}
+
+const NOTHING = { value: null, error: null, to: null };
+
+/** The curve comes first: checks are asked when the hand has rested for so long. */
+const REST_MS = 120;
 
 /** One worker for verdicts and one for what happens in time: neither waits for the other, and the bench for none. */
 const clients = { verdicts: new ChecksClient(), inTime: new ChecksClient() };
 
-/** Keeps the slower answers about the bank up to date; null: nothing to check. */
-export function useChecks(document: RailDocument | null, span_Hz: readonly [number, number]): BenchChecks {
-  const [verdicts, setVerdicts] = useState<Asked<RailVerdicts>>(NOTHING);
-  const [inTime, setInTime] = useState<Asked<RailInTime>>(NOTHING);
+/** Keeps the slower answers about the bank up to date. */
+export function useChecks(document: RailDocument, span_Hz: readonly [number, number]): BenchChecks {
+  const [verdicts, setVerdicts] = useState<Answered<RailVerdicts>>(NOTHING);
+  const [inTime, setInTime] = useState<Answered<RailInTime>>(NOTHING);
   useEffect(() => {
-    if (!document) {
-      setVerdicts(NOTHING);
-      setInTime(NOTHING);
-      return;
-    }
     let wanted = true;
-    setVerdicts((now) => ({ ...now, current: false }));
-    setInTime((now) => ({ ...now, current: false }));
-    const request = { document, span_Hz };
-    void clients.verdicts.verdicts(request).then((answer) => {
-      if (wanted) setVerdicts((now) => asked(now, answer));
-    });
-    void clients.inTime.inTime(request).then((answer) => {
-      if (wanted) setInTime((now) => asked(now, answer));
-    });
+    const timer = setTimeout(() => {
+      const request = { document, span_Hz };
+      void clients.verdicts.verdicts(request).then((answer) => {
+        if (wanted) setVerdicts((now) => answered(now, answer, document));
+      });
+      void clients.inTime.inTime(request).then((answer) => {
+        if (wanted) setInTime((now) => answered(now, answer, document));
+      });
+    }, REST_MS);
     return () => {
       wanted = false;
+      clearTimeout(timer);
     };
   }, [document, span_Hz]);
-  return { verdicts, inTime };
+  return { verdicts: asked(verdicts, document), inTime: asked(inTime, document) };
 }
 
-function asked<T>(
-  now: Asked<T>,
+function answered<T>(
+  now: Answered<T>,
   answer: { status: 'done'; value: T } | { status: 'failed'; message: string } | { status: 'stale' },
-): Asked<T> {
-  if (answer.status === 'done') return { value: answer.value, current: true, error: null };
-  if (answer.status === 'failed') return { value: null, current: true, error: answer.message };
+  to: RailDocument,
+): Answered<T> {
+  if (answer.status === 'done') return { value: answer.value, error: null, to };
+  if (answer.status === 'failed') return { value: null, error: answer.message, to };
   return now;
 }
+
+const asked = <T>({ value, error, to }: Answered<T>, document: RailDocument): Asked<T> => ({
+  value,
+  error,
+  current: to === document,
+});
