@@ -15,6 +15,8 @@ interface ShareStripProps {
 export const STRIP_HEIGHT = 30;
 /** Below this share a line does nothing that could be seen: the strip stays blank. */
 const NOTHING = 0.002;
+/** All of the current, with room for rounding: a line that carries it alone passes nothing back and forth. */
+const WHOLE = 1 + 1e-6;
 
 /**
  * A line's share of the load current, drawn on the chart's own axis. Full height is the whole current; where two lines
@@ -106,8 +108,8 @@ function caps(axis: FrequencyAxis, frequency_Hz: Float64Array, share: Float64Arr
   let previous = 0;
   for (let i = 0; i < share.length; i++) {
     const x = xOf(axis, frequency_Hz[i]);
-    if (share[i] > 1 && start === null) start = x;
-    if (share[i] <= 1 && start !== null) {
+    if (share[i] > WHOLE && start === null) start = x;
+    if (share[i] <= WHOLE && start !== null) {
       path += `M${start.toFixed(1)} 1.5H${Math.max(previous, start + 1).toFixed(1)}`;
       start = null;
     }

@@ -32,7 +32,7 @@ export const BenchSections = memo(function BenchSections({
           <InServiceTable spec={spec} parts={verdicts.parts} nameOf={nameOf} />
         </BenchSection>
       )}
-      {verdicts && (
+      {verdicts && verdicts.parts.length > 0 && (
         <BenchSection id="worst-cases" title="worst cases">
           <WorstCasesSection verdicts={verdicts} nameOf={nameOf} />
         </BenchSection>
